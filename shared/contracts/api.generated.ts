@@ -1,705 +1,133 @@
-// Made from schemas/requests and schemas/responses by `npm run generate`; do not edit.
+/** Types of what the API takes and gives. Made from the schemas by `npm run generate`; do not edit. */
 
-/** Somebody, as others see them. */
-export interface Person {
-  /** user */ id: string;
-  /** name as shown */ name: string;
+/** Accepts an application. */
+export interface AcceptApplicationRequest {
+  /** version that was read; a stale one is refused with 409 (count) */
+  version?: number;
+  /** the revision that is accepted */
+  revision: string;
+  /** words */
+  reason?: string;
+  /** conditions */
+  conditions?: string[];
 }
 
-/** An organisation. */
-export interface Party {
-  /** organisation */ id: string;
-  /** name */ name: string;
+/** Makes a run govern. */
+export interface AdoptRunRequest {
+  /** reason */
+  reason: string;
 }
 
-/** Findings that still stand, by grade. */
-export interface Grades {
-  /** findings of grade must-answer that still stand (count) */ mustAnswer: number;
-  /** findings of grade explain that still stand (count) */ explain: number;
-  /** notes that still stand (count) */ note: number;
+/** Opens a new round. */
+export interface AmendApplicationRequest {
+  /** version that was read; a stale one is refused with 409 (count) */
+  version?: number;
+  /** reason */
+  reason: string;
 }
 
-/** The working days that a step may take. */
-export interface Window {
-  /** which window */ kind: 'take-up' | 'review' | 'cure';
-  /** opened (instant, RFC 3339) */ openedAt: string;
-  /** due (instant, RFC 3339) */ dueAt: string;
-  /** closed (instant, RFC 3339) */ closedAt: string | null;
-  /** working days used (working days) */ used: number;
-  /** working days granted: working days (count) */ total: number;
-  /** working days left, negative when overdue (working days) */ left: number;
+/** Answers a discrepancy. */
+export interface AnswerDiscrepancyRequest {
+  /** version that was read; a stale one is refused with 409 (count) */
+  version?: number;
+  /** a change of the draft, or an explanation */
+  by: 'change' | 'explanation';
+  /** the answer */
+  text: string;
+  /** only keep the words, do not answer yet */
+  draft?: boolean;
 }
 
-/** A step and, when it is closed, what opens it. */
-export interface Step {
-  /** step of the case */ step:
-    | 'file'
-    | 'take'
-    | 'hand-over'
-    | 'put-back'
-    | 'return'
-    | 'raise'
-    | 'settle'
-    | 'waive'
-    | 'accept'
-    | 'decline'
-    | 'withdraw'
-    | 'amend';
-  /** may be taken now by who asks */ open: boolean;
-  /** what opens it, as a sentence */ reason: string | null;
+/** Asks for another check run. */
+export type CheckAgainRequest = Record<string, never>;
+
+/** Query of comparing two revisions. */
+export interface CompareRevisionsRequest {
+  /** the earlier revision */
+  from: string;
+  /** the later revision */
+  to: string;
 }
 
-/** Where the check run stands. */
-export interface CheckState {
-  /** ordinal of the run within its revision (count) */ run: number;
-  /** state of the run */ state: 'queued' | 'running' | 'done' | 'failed';
-  /** lines to check (count) */ lineCount: number;
-  /** lines checked so far (count) */ linesChecked: number;
-  /** started (instant, RFC 3339) */ startedAt: string | null;
-  /** finished (instant, RFC 3339) */ finishedAt: string | null;
-  /** why it failed, as a sentence */ failure: string | null;
+/** Query of comparing two runs. */
+export interface CompareRunsRequest {
+  /** ordinal of the earlier run */
+  from: string;
+  /** ordinal of the later run */
+  to: string;
 }
 
-/** Whom to ask about an application. */
-export interface Contact {
-  /** name */ name: string;
-  /** address for mail */ email: string;
-  /** telephone number */ phone: string | null;
-}
-
-/** An application as lists and the queue show it. */
-export interface ApplicationSummary {
-  /** application */ id: string;
-  /** application number YY-NNNN */ number: string;
-  /** version that was read; a stale one is refused with 409 (count) */ version: number;
-  /** title */ title: string;
-  applicant: Party;
-  /** kind of connection */ connectionKind: 'generation' | 'storage' | 'load' | 'network';
-  /** capacity asked for (MW) */ capacityMw: number | null;
-  /** substation or line to connect at */ pointOfConnection: string;
-  /** state of the current round */ state:
-    'draft' | 'filed' | 'in-review' | 'returned' | 'accepted' | 'declined' | 'withdrawn';
-  /** latest filed revision */ revision: string | null;
-  /** letter that the next filing gets */ nextRevision: string;
-  /** nominal voltages of the lines, highest first */ voltagesKv: number[];
-  /** lines (count) */ lineCount: number;
-  /** length of all lines together (km) */ totalLengthKm: number;
-  /** latest filing (instant, RFC 3339) */ filedAt: string | null;
-  filedBy: Person | null;
-  reviewer: Person | null;
-  /** when the current window ends (instant, RFC 3339) */ dueAt: string | null;
-  window: Window | null;
-  grades: Grades | null;
-  /** worst grade that still stands */ worstGrade: 'must-answer' | 'explain' | 'note' | null;
-  check: CheckState | null;
-  /** discrepancies not yet settled or waived (count) */ openDiscrepancies: number;
-  /** created (instant, RFC 3339) */ createdAt: string;
-  /** last step (instant, RFC 3339) */ updatedAt: string;
-}
-
-/** An application with all that its page shows. */
-export interface Application {
-  /** application */ id: string;
-  /** application number YY-NNNN */ number: string;
-  /** version that was read; a stale one is refused with 409 (count) */ version: number;
-  /** title */ title: string;
-  applicant: Party;
-  /** kind of connection */ connectionKind: 'generation' | 'storage' | 'load' | 'network';
-  /** capacity asked for (MW) */ capacityMw: number | null;
-  /** substation or line to connect at */ pointOfConnection: string;
-  /** state of the current round */ state:
-    'draft' | 'filed' | 'in-review' | 'returned' | 'accepted' | 'declined' | 'withdrawn';
-  /** latest filed revision */ revision: string | null;
-  /** letter that the next filing gets */ nextRevision: string;
-  /** nominal voltages of the lines, highest first */ voltagesKv: number[];
-  /** lines (count) */ lineCount: number;
-  /** length of all lines together (km) */ totalLengthKm: number;
-  /** latest filing (instant, RFC 3339) */ filedAt: string | null;
-  filedBy: Person | null;
-  reviewer: Person | null;
-  /** when the current window ends (instant, RFC 3339) */ dueAt: string | null;
-  window: Window | null;
-  grades: Grades | null;
-  /** worst grade that still stands */ worstGrade: 'must-answer' | 'explain' | 'note' | null;
-  check: CheckState | null;
-  /** discrepancies not yet settled or waived (count) */ openDiscrepancies: number;
-  /** created (instant, RFC 3339) */ createdAt: string;
-  /** last step (instant, RFC 3339) */ updatedAt: string;
+/** A new application. */
+export interface CreateApplicationRequest {
+  /** title */
+  title: string;
+  /** kind of connection */
+  connectionKind: 'generation' | 'storage' | 'load' | 'network';
+  /** capacity asked for (MW) */
+  capacityMw?: number | null;
+  /** substation or line to connect at */
+  pointOfConnection: string;
   contact: Contact;
-  /** the open or last round */ round: {
-    /** 1 is the first application (count) */ ordinal: number;
-    /** kind of round */ kind: 'first' | 'amendment';
-    /** why it was amended */ reason: string | null;
-  };
-  /** the accepted revision that stands */ acceptedRevision: string | null;
-  owner: Party;
-  /** steps that the caller’s role has */ steps: Step[];
-  /** all windows, oldest first */ windows: Window[];
-  decision: Decision | null;
-  /** proposals that wait for a second reviewer */ pendingCountersigns: Countersign[];
-  /** what the check does not replace */ caution: string;
 }
 
-/** A decision. */
-export interface Decision {
-  /** decision */ kind: 'accepted' | 'declined';
-  /** decided on */ revision: string;
-  /** reason */ reason: string | null;
-  /** conditions */ conditions: string[];
-  /** decided (instant, RFC 3339) */ decidedAt: string;
-  decidedBy: Person;
-  countersignedBy: Person | null;
-  /** SHA-256 of the record */ recordHash: string;
+/** The second reviewer’s word. */
+export interface DecideCountersignRequest {
+  /** outcome */
+  outcome: 'granted' | 'refused';
+  /** words */
+  remark?: string;
 }
 
-/** Applications, a page. */
-export interface ApplicationList {
-  /** this page */ items: ApplicationSummary[];
-  /** cursor of the next page */ nextCursor: string | null;
-  /** items of the whole list (count) */ total: number;
+/** Proposes to decline; a second reviewer countersigns. */
+export interface DeclineApplicationRequest {
+  /** version that was read; a stale one is refused with 409 (count) */
+  version?: number;
+  /** the revision that is declined */
+  revision: string;
+  /** reason */
+  reason: string;
 }
 
-/** Open applications with their due dates, a page. */
-export interface Queue {
-  /** this page */ items: ApplicationSummary[];
-  /** cursor of the next page */ nextCursor: string | null;
-  /** applications that fit the filters (count) */ total: number;
-  /** counts over all open applications, whatever the filters */ counts: {
-    /** open applications of the caller (count) */ mine: number;
-    /** open applications (count) */ everyone: number;
-    /** open applications without a reviewer (count) */ nobody: number;
-    /** open applications past their due date (count) */ overdue: number;
-  };
+/** Query of deleting a line of the draft. */
+export interface DeleteDraftLineRequest {
+  /** version that was read */
+  version?: string;
 }
 
-/** One fault of what was sent. */
-export interface Fault {
-  /** JSON Pointer of the value */ pointer?: string;
-  /** row of the file, the header is 1 (count) */ row?: number;
-  /** column of the file */ column?: string;
-  /** the line’s key within the application, L1, L2 …; it stays through all revisions */ lineKey?: string;
-  /** what is there, unbounded (as found) */ value: unknown;
-  /** what is wanted */ expected: string;
-  /** the fault as a sentence */ message: string;
+/** Query of exporting lines. */
+export interface ExportLinesRequest {
+  /** format, json by default */
+  format?: 'json' | 'csv';
+  /** revision; the draft, or the latest revision for the owner, without one */
+  revision?: string;
 }
 
-/** Something that was assumed or done and is worth knowing. */
-export interface Notice {
-  /** JSON Pointer */ pointer?: string;
-  /** row of the file (count) */ row?: number;
-  /** as a sentence */ message: string;
+/** Files the draft. */
+export interface FileApplicationRequest {
+  /** version that was read; a stale one is refused with 409 (count) */
+  version?: number;
+  /** words to go with the revision */
+  note?: string;
 }
 
-/** A line of the draft. */
-export interface DraftLine {
-  /** the line’s key within the application, L1, L2 …; it stays through all revisions */ lineKey: string;
-  /** place in the filing (count) */ ordinal: number;
-  /** version that was read; a stale one is refused with 409 (count) */ version: number;
-  /** the line as in a filing, perhaps incomplete */ line: Record<string, unknown>;
-  /** fields as they were typed, by JSON Pointer within the line */ asTyped: Record<
-    string,
-    { /** text as typed */ text: string; /** unit as chosen */ unit?: string }
-  >;
-  /** name */ name: string | null;
-  /** nominal voltage (kV) */ nominalVoltageKv: number | null;
-  /** length (km) */ lengthKm: number | null;
-  /** circuits (count) */ circuitCount: number;
-  /** complete by schema, and its geometry can be computed */ complete: boolean;
-  /** what is missing or wrong; pointers within the line */ faults: Fault[];
-  /** saved (instant, RFC 3339) */ updatedAt: string;
-}
-
-/** The draft of the next revision. */
-export interface Draft {
-  /** application */ applicationId: string;
-  /** version that was read; a stale one is refused with 409 (count) */ version: number;
-  /** the line’s key within the application, L1, L2 …; it stays through all revisions */ nextLineKey: string;
-  /** lines in filing order */ lines: DraftLine[];
-  /** may be filed as it stands */ ready: boolean;
-  /** what stands in the way of filing; pointers within the filing */ faults: Fault[];
-}
-
-/** A file read for the draft. */
-export interface Import {
-  /** import */ id: string;
-  /** application */ applicationId: string;
-  /** staged: read and waiting for the applicant’s word; taken: in the draft; refused: nothing in it can be used */ state:
-    'staged' | 'taken' | 'refused';
-  /** name of the file */ fileName: string;
-  /** SHA-256 of the file */ sha256: string;
-  /** format */ format: 'json' | 'csv';
-  /** how the file is written, as found */ dialect: {
-    /** delimiter */ delimiter: 'comma' | 'semicolon' | 'tab';
-    /** decimal sign */ decimal: 'point' | 'comma';
-    /** encoding */ encoding: 'utf-8' | 'windows-1252';
-    /** line ends */ lineEnds: 'crlf' | 'lf' | 'cr' | 'mixed';
-  } | null;
-  /** rows without the header (count) */ rowCount: number;
-  /** lines that can be taken */ lines: {
-    /** name */ name: string;
-    /** the line’s key within the application, L1, L2 …; it stays through all revisions */ lineKey:
-      string | null;
-    /** length (km) */ lengthKm: number | null;
-    /** nominal voltage (kV) */ nominalVoltageKv: number | null;
-    /** a line of this name is in the draft and would be replaced */ replaces: boolean;
-  }[];
-  /** every fault */ faults: Fault[];
-  /** what was assumed */ notices: Notice[];
-  /** read (instant, RFC 3339) */ createdAt: string;
-  /** taken (instant, RFC 3339) */ takenAt: string | null;
-}
-
-/** A slip that explains findings. */
-export interface Cause {
-  /** cause code */ code: string;
-  /** where the slip lies */ in: 'declared' | 'geometry';
-  /** parameters that it brings back */ explains: string[];
-  /** values that they get, per km */ corrected?: Record<string, number>;
-  /** JSON Pointer of the slip in the geometry */ where?: string;
-  /** the corrected entry, unbounded (in the unit of its field) */ entry?: unknown;
-  /** largest remaining difference (ratio) */ residual: number;
-  /** causes that give the same correction */ alternatives?: string[];
-  /** fitted without geometry */ possible?: boolean;
-  /** the cause as a sentence */ sentence: string;
-}
-
-/** What a reviewer did with a finding. */
-export interface Disposition {
-  /** what was done with it */ kind: 'settled' | 'waived' | 'set-aside';
-  /** false while a countersign is waited for */ inForce: boolean;
-  /** made on */ revision: string;
-  /** reason */ reason: string;
-  by: Person;
-  /** made (instant, RFC 3339) */ at: string;
-  countersignedBy: Person | null;
-  /** made on an older revision and carried over */ carriedOver: boolean;
-}
-
-/** What the check noticed, and what became of it. */
-export interface Finding {
-  /** what makes a finding the same from revision to revision: code, circuit and figures, hashed */ fingerprint: string;
-  /** finding code */ code: string;
-  /** family */ family: 'physics' | 'geometry' | 'typical' | 'drawing';
-  /** grade */ grade: 'must-answer' | 'explain' | 'note';
-  /** the line’s key within the application, L1, L2 …; it stays through all revisions */ lineKey: string;
-  /** circuit (count) */ circuit: number | null;
-  /** section, from 1 (count) */ section: number | null;
-  /** position, from 1 (count) */ position: number | null;
-  /** parameter */ parameter: string | null;
-  /** declared (Ω/km, µS/km, Ω or ratio, unbounded) */ declared: number | null;
-  /** recomputed (Ω/km, µS/km, Ω or ratio, unbounded) */ recomputed: number | null;
-  /** difference (ratio, unbounded) */ deviation: number | null;
-  /** tolerance (ratio) */ tolerance: number | null;
-  /** JSON Pointer within the filing */ where: string | null;
-  /** as a sentence */ message: string;
-  /** findings of one matter share it (count) */ group: number | null;
-  /** best first */ causes: Cause[];
-  /** carries its group’s cause */ first: boolean;
-  /** parameter that it follows from */ follows: string | null;
-  /** not settled, waived or set aside */ stands: boolean;
-  disposition: Disposition | null;
-  /** number of the discrepancy raised from it (count) */ discrepancy: number | null;
-}
-
-/** One parameter weighed: declared, recomputed, typical. */
-export interface ParameterValue {
-  /** circuit (count) */ circuit: number;
-  /** parameter */ parameter: string;
-  /** declared (Ω/km, µS/km, Ω or ratio, unbounded) */ declared: number | null;
-  /** as written, with its unit */ asDeclared: string | null;
-  /** recomputed (Ω/km, µS/km, Ω or ratio, unbounded) */ recomputed: number | null;
-  /** lower end of its range (Ω/km, µS/km, Ω or ratio, unbounded) */ low: number | null;
-  /** upper end of its range (Ω/km, µS/km, Ω or ratio, unbounded) */ high: number | null;
-  /** declared less recomputed, by recomputed (ratio, unbounded) */ deviation: number | null;
-  /** tolerance in use (ratio) */ tolerance: number | null;
-  /** typical range of the class */ typical: [number, number] | null;
-  /** outer range of the class */ outer: [number, number] | null;
-  /** source of the band */ source: string | null;
-  /** worst grade that the check gave it */ grade: 'must-answer' | 'explain' | 'note' | null;
-  /** parameter that it follows from */ follows: string | null;
-}
-
-/** A check run of a revision. */
-export interface Run {
-  /** ordinal within the revision (count) */ ordinal: number;
-  /** state */ state: 'queued' | 'running' | 'done' | 'failed';
-  /** its findings govern */ governing: boolean;
-  /** engine version */ engine: string | null;
-  /** rule set version */ ruleSet: string | null;
-  /** why it was made */ reason: 'filing' | 'again';
-  requestedBy: Person | null;
-  /** asked for (instant, RFC 3339) */ createdAt: string;
-  /** finished (instant, RFC 3339) */ finishedAt: string | null;
-  /** lines (count) */ lineCount: number;
-  /** lines checked so far (count) */ linesChecked: number;
-  grades: Grades | null;
-  /** why it failed */ failure: string | null;
-}
-
-/** A line of a revision, as lists show it. */
-export interface LineSummary {
-  /** the line’s key within the application, L1, L2 …; it stays through all revisions */ lineKey: string;
-  /** place in the filing (count) */ ordinal: number;
-  /** name */ name: string;
-  /** from */ from: string;
-  /** to */ to: string;
-  /** nominal voltage (kV) */ nominalVoltageKv: number;
-  /** frequency (Hz) */ frequencyHz: number;
-  /** length (km) */ lengthKm: number;
-  /** circuits (count) */ circuitCount: number;
-  /** sections (count) */ sectionCount: number;
-  /** phase conductors in words */ conductors: string;
-  grades: Grades | null;
-  /** worst grade that still stands */ worstGrade: 'must-answer' | 'explain' | 'note' | null;
-  /** one a matter, worst first */ marks: {
-    /** parameter */ parameter: string | null;
-    /** finding code */ code: string;
-    /** grade */ grade: 'must-answer' | 'explain' | 'note';
-    /** still stands */ stands: boolean;
-    /** short words, as “X1” or “X0 settled” */ words: string;
-  }[];
-  /** against the revision before */ change: 'first' | 'new' | 'changed' | 'same';
-}
-
-/** A revision. */
-export interface RevisionSummary {
-  /** revision letter */ letter: string;
-  /** 1 is A (count) */ ordinal: number;
-  /** round (count) */ round: number;
-  /** filed (instant, RFC 3339) */ filedAt: string;
-  filedBy: Person;
-  /** SHA-256 of the canonical filing */ contentHash: string;
-  /** lines (count) */ lineCount: number;
-  /** length together (km) */ totalLengthKm: number;
-  /** what changed, in words */ change: string;
-  /** the applicant’s words with it */ note: string | null;
-  /** the latest */ current: boolean;
-}
-
-/** Revisions. */
-export interface RevisionList {
-  /** newest first */ items: RevisionSummary[];
-}
-
-/** A revision with its lines, its check and what became of each finding. */
-export interface Revision {
-  /** revision letter */ letter: string;
-  /** 1 is A (count) */ ordinal: number;
-  /** round (count) */ round: number;
-  /** filed (instant, RFC 3339) */ filedAt: string;
-  filedBy: Person;
-  /** SHA-256 of the canonical filing */ contentHash: string;
-  /** what changed, in words */ change: string;
-  /** the applicant’s words with it */ note: string | null;
-  /** the latest */ current: boolean;
-  /** lines in filing order */ lines: LineSummary[];
-  /** lines of the revision before that are gone */ removed: string[];
-  /** check runs, newest first */ runs: Run[];
-  run: Run | null;
-  /** findings of the governing run, worst first */ findings: Finding[];
-  /** what the check does not replace */ caution: string;
-}
-
-/** A line of a revision with its balance rows, findings and geometry. */
-export interface RevisionLine {
-  /** the line’s key within the application, L1, L2 …; it stays through all revisions */ lineKey: string;
-  /** place in the filing (count) */ ordinal: number;
-  /** name */ name: string;
-  /** from */ from: string;
-  /** to */ to: string;
-  /** nominal voltage (kV) */ nominalVoltageKv: number;
-  /** frequency (Hz) */ frequencyHz: number;
-  /** length (km) */ lengthKm: number;
-  /** circuits (count) */ circuitCount: number;
-  /** sections (count) */ sectionCount: number;
-  /** phase conductors in words */ conductors: string;
-  /** revision letter */ revision: string;
-  /** against the revision before */ change: 'first' | 'new' | 'changed' | 'same';
-  /** the line as filed, conductor data copied in */ line: Record<string, unknown>;
-  /** SHA-256 of the line */ lineHash: string;
-  run: Run | null;
-  /** voltage class it was weighed against (kV) */ bandClassKv: number | null;
-  /** balance rows */ values: ParameterValue[];
-  /** a circuit each */ equivalents: {
-    /** circuit (count) */ circuit: number;
-    /** series resistance (Ω, unbounded) */ r: number;
-    /** series reactance (Ω, unbounded) */ x: number;
-    /** shunt susceptance (µS, unbounded) */ b: number;
-    /** zero-sequence resistance (Ω, unbounded) */ r0: number;
-    /** zero-sequence reactance (Ω, unbounded) */ x0: number;
-    /** zero-sequence susceptance (µS, unbounded) */ b0: number;
-  }[];
-  /** zero-sequence mutuals */ mutual: {
-    /** the pair */ circuits: [number, number];
-    /** mutual resistance (Ω/km, unbounded) */ r0m: number;
-    /** mutual reactance (Ω/km, unbounded) */ x0m: number;
-    /** mutual susceptance (µS/km, unbounded) */ b0m: number;
-  }[];
-  /** what the declared X1 and B1 would need */ impliedGeometry: {
-    /** circuit (count) */ circuit: number;
-    /** mean phase spacing that X1 and B1 need (m) */ meanSpacingM: number | null;
-    /** conductor GMR that they need (mm) */ gmrMm: number | null;
-    /** in words */ sentence: string;
-  }[];
-  /** findings of this line */ findings: Finding[];
-  /** values of the revision before */ previous:
-    | {
-        /** circuit (count) */ circuit: number;
-        /** parameter */ parameter: string;
-        /** declared (Ω/km or µS/km, unbounded) */ declared: number | null;
-        /** recomputed (Ω/km or µS/km, unbounded) */ recomputed: number | null;
-      }[]
-    | null;
-}
-
-/** Check runs. */
-export interface RunList {
-  /** newest first */ items: Run[];
-}
-
-/** Two check runs of a revision compared. */
-export interface RunComparison {
-  /** revision letter */ revision: string;
-  from: Run;
-  to: Run;
-  /** only in the later */ appeared: Finding[];
-  /** only in the earlier */ gone: Finding[];
-  /** in both (count) */ kept: number;
-}
-
-/** Two revisions compared. */
-export interface RevisionComparison {
-  /** revision letter */ from: string;
-  /** revision letter */ to: string;
-  /** lines of either */ lines: {
-    /** the line’s key within the application, L1, L2 …; it stays through all revisions */ lineKey: string;
-    /** name */ name: string;
-    /** change */ change: 'new' | 'changed' | 'same' | 'removed';
-    /** fields that differ */ changes: {
-      /** JSON Pointer within the line */ pointer: string;
-      /** value before, unbounded (in the unit of its field) */ before: unknown;
-      /** value after, unbounded (in the unit of its field) */ after: unknown;
-    }[];
-    /** more fields differ than are listed */ limitReached: boolean;
-  }[];
-}
-
-/** A file kept with the case. */
-export interface Attachment {
-  /** attachment */ id: string;
-  /** name of the file */ fileName: string;
-  /** media type */ mediaType: string;
-  /** size: bytes (count) */ byteLength: number;
-  /** SHA-256 */ sha256: string;
-  subject: {
-    /** what it belongs to */ kind: 'application' | 'line' | 'discrepancy';
-    /** the line’s key within the application, L1, L2 …; it stays through all revisions */ lineKey:
-      string | null;
-    /** number of the discrepancy (count) */ discrepancy: number | null;
-  };
-  uploadedBy: Person;
-  /** uploaded (instant, RFC 3339) */ uploadedAt: string;
-  /** address of its bytes */ href: string;
-}
-
-/** Attachments. */
-export interface AttachmentList {
-  /** newest first */ items: Attachment[];
-}
-
-/** An entry of a discrepancy’s thread. */
-export interface DiscrepancyEntry {
-  /** entry */ id: string;
-  /** what it is */ kind: 'raised' | 'answer' | 'reopened' | 'settled' | 'waived' | 'remark';
-  /** made on */ revision: string;
-  by: Person;
-  party: Party;
-  /** when (instant, RFC 3339) */ at: string;
-  /** words */ text: string;
-}
-
-/** What a reviewer raised and an applicant answers. */
-export interface Discrepancy {
-  /** discrepancy */ id: string;
-  /** D-number within the application (count) */ number: number;
-  /** state */ state: 'open' | 'answered' | 'settled' | 'waived';
-  /** version that was read; a stale one is refused with 409 (count) */ version: number;
-  /** what it is about */ title: string;
-  /** worst grade of its findings */ grade: 'must-answer' | 'explain' | 'note';
-  /** the value questioned */ question: string;
-  /** what would settle it */ wanted: string | null;
-  /** revision letter */ raisedOn: string;
-  /** raised (instant, RFC 3339) */ raisedAt: string;
-  raisedBy: Person;
-  /** lines it is about */ lineKeys: string[];
-  /** findings it was raised from, as the current revision has them */ findings: Finding[];
-  /** how it was answered */ answeredBy: 'change' | 'explanation' | null;
-  /** answer not yet sent */ draftAnswer: string | null;
-  /** thread, oldest first */ entries: DiscrepancyEntry[];
-  /** files */ attachments: Attachment[];
-}
-
-/** Discrepancies of an application. */
-export interface DiscrepancyList {
-  /** by number */ items: Discrepancy[];
-}
-
-/** A step that a second reviewer must agree to. */
-export interface Countersign {
-  /** countersign */ id: string;
-  /** application */ applicationId: string;
-  /** application number YY-NNNN */ number: string;
-  /** what is proposed */ subject: 'waive' | 'decline';
-  /** revision letter */ revision: string;
-  /** what makes a finding the same from revision to revision: code, circuit and figures, hashed */ fingerprint:
-    string | null;
-  /** the finding’s sentence */ finding: string | null;
-  /** reason */ reason: string;
-  proposedBy: Person;
-  /** proposed (instant, RFC 3339) */ proposedAt: string;
-  /** where it stands */ outcome: 'waiting' | 'agreed' | 'refused' | 'lapsed';
-  decidedBy: Person | null;
-  /** decided (instant, RFC 3339) */ decidedAt: string | null;
-  /** the second reviewer’s words */ remark: string | null;
-}
-
-/** Countersigns. */
-export interface CountersignList {
-  /** newest first */ items: Countersign[];
-}
-
-/** A letter as it was sent. */
-export interface Letter {
-  /** number within the application (count) */ number: number;
-  /** application */ applicationId: string;
-  /** application number YY-NNNN */ applicationNumber: string;
-  /** title */ applicationTitle: string;
-  /** kind */ kind: 'discrepancy' | 'accepted' | 'declined';
-  /** revision letter */ revision: string;
-  /** SHA-256 of the PDF */ sha256: string;
-  /** size: bytes (count) */ byteLength: number;
-  /** sent (instant, RFC 3339) */ sentAt: string;
-  sentBy: Person;
-  /** answers due (instant, RFC 3339) */ dueAt: string | null;
-  /** discrepancies in it */ discrepancies: number[];
-  /** address of the PDF */ href: string;
-}
-
-/** Letters, a page. */
-export interface LetterList {
-  /** newest first */ items: Letter[];
-  /** cursor of the next page */ nextCursor: string | null;
-  /** letters (count) */ total: number;
-}
-
-/** One thing that happened. */
-export interface TimelineEvent {
-  /** place in the trail (count) */ seq: number;
-  /** when (instant, RFC 3339) */ at: string;
-  /** act */ act: string;
-  actor: Person | null;
-  party: Party | null;
-  /** what happened, as a sentence */ sentence: string;
-  /** revision letter */ revision: string | null;
-  /** hash of the entry */ hash: string;
-}
-
-/** What happened to an application. */
-export interface Timeline {
-  /** oldest first */ items: TimelineEvent[];
-  /** more happened than is listed */ limitReached: boolean;
-}
-
-/** Lines of the latest revisions, a page. */
-export interface LineList {
-  /** this page */ items: {
-    /** the line’s key within the application, L1, L2 …; it stays through all revisions */ lineKey: string;
-    /** place in the filing (count) */ ordinal: number;
-    /** name */ name: string;
-    /** from */ from: string;
-    /** to */ to: string;
-    /** nominal voltage (kV) */ nominalVoltageKv: number;
-    /** frequency (Hz) */ frequencyHz: number;
-    /** length (km) */ lengthKm: number;
-    /** circuits (count) */ circuitCount: number;
-    /** sections (count) */ sectionCount: number;
-    /** phase conductors in words */ conductors: string;
-    /** application */ applicationId: string;
-    /** application number YY-NNNN */ applicationNumber: string;
-    /** title */ applicationTitle: string;
-    applicant: Party;
-    /** state of the application */ state:
-      'draft' | 'filed' | 'in-review' | 'returned' | 'accepted' | 'declined' | 'withdrawn';
-    /** revision letter */ revision: string;
-    grades: Grades | null;
-    /** worst grade that still stands */ worstGrade: 'must-answer' | 'explain' | 'note' | null;
-  }[];
-  /** cursor of the next page */ nextCursor: string | null;
-  /** lines (count) */ total: number;
-}
-
-/** Reviewers. */
-export interface ReviewerList {
-  /** reviewers who may take this application */ items: {
-    /** user */ id: string;
-    /** name */ name: string;
-    /** cases in hand (count) */ openCases: number;
-  }[];
-}
-
-/** An account of the demo. */
-export interface DemoAccount {
-  /** address to sign in with */ email: string;
-  /** password */ password: string;
-  /** name */ name: string;
-  /** role */ role: 'applicant' | 'reviewer' | 'administrator';
-  /** organisations */ organisation: string;
-}
-
-/** Accounts of the demo scenario. */
-export interface DemoAccountList {
-  /** accounts */ items: DemoAccount[];
-}
-
-/** The rules in force, for the live check. */
-export interface Rules {
-  /** version of the bands */ bandsVersion: string;
-  /** version of the tolerances */ tolerancesVersion: string;
-  /** bands */ bands: {
-    /** voltage class (kV) */ classKv: number;
-    /** frequency (Hz) */ frequencyHz: number;
-    /** parameter */ parameter: string;
-    /** typical range */ typical: [number, number];
-    /** outer range */ outer: [number, number];
-    /** source of the band */ source: string;
-  }[];
-  /** tolerances by parameter */ tolerances: Record<string, unknown>;
-  /** uncertainties of the inputs */ uncertainties: Record<string, unknown>;
-  /** what the owner assumes where nothing is filed */ owner: {
-    /** base (MVA) */ baseMva: number;
-    /** earth resistivity (Ω·m) */ earthResistivityOhmM: number;
-  };
-}
-
-/** A conductor of the library. */
-export interface Conductor {
-  /** name */ name: string;
-  /** family */ family: string;
-  /** handbook data in the fields of a filing’s conductor */ data: Record<string, unknown> | null;
-  /** may not be chosen any more */ retired: boolean;
-  /** source */ source: string;
-}
-
-/** The conductor library. */
-export interface ConductorList {
-  /** by name */ items: Conductor[];
+/** Hands a case over. */
+export interface HandOverApplicationRequest {
+  /** version that was read; a stale one is refused with 409 (count) */
+  version?: number;
+  /** the other reviewer */
+  to: string;
+  /** reason */
+  reason: string;
 }
 
 /** Query of the list of applications. */
 export interface ListApplicationsRequest {
-  /** items a page, 1 to 200 */ limit?: string;
-  /** cursor of a page */ cursor?: string;
-  /** order, descending with a minus */ sort?:
+  /** items a page, 1 to 200 */
+  limit?: string;
+  /** cursor of a page */
+  cursor?: string;
+  /** order, descending with a minus */
+  sort?:
     | 'number'
     | '-number'
     | 'title'
@@ -716,20 +144,80 @@ export interface ListApplicationsRequest {
     | '-created'
     | 'updated'
     | '-updated';
-  /** states; several with commas */ 'filter[state]'?: string;
-  /** applicant, part of the name */ 'filter[applicant]'?: string;
-  /** nominal voltage in kV; several with commas */ 'filter[voltage]'?: string;
-  /** worst grade; several with commas */ 'filter[grade]'?: string;
-  /** a reviewer’s id, “me” or “nobody” */ 'filter[reviewer]'?: string;
-  /** number, title, applicant or place, in part */ 'filter[search]'?: string;
-  /** when it is due */ 'filter[due]'?: 'overdue' | 'today' | 'week';
+  /** states; several with commas */
+  'filter[state]'?: string;
+  /** applicant, part of the name */
+  'filter[applicant]'?: string;
+  /** nominal voltage in kV; several with commas */
+  'filter[voltage]'?: string;
+  /** worst grade; several with commas */
+  'filter[grade]'?: string;
+  /** a reviewer’s id, “me” or “nobody” */
+  'filter[reviewer]'?: string;
+  /** number, title, applicant or place, in part */
+  'filter[search]'?: string;
+  /** when it is due */
+  'filter[due]'?: 'overdue' | 'today' | 'week';
+}
+
+/** Query of the list of countersigns. */
+export interface ListCountersignsRequest {
+  /** where it stands */
+  outcome?: 'pending' | 'granted' | 'refused' | 'lapsed';
+}
+
+/** Query of the list of letters. */
+export interface ListLettersRequest {
+  /** items a page, 1 to 200 */
+  limit?: string;
+  /** cursor of a page */
+  cursor?: string;
+  /** order, descending with a minus */
+  sort?: 'sent' | '-sent' | 'number' | '-number';
+  /** kind */
+  'filter[kind]'?: 'receipt' | 'return' | 'decision' | 'notice';
+  /** number or title, in part */
+  'filter[search]'?: string;
+}
+
+/** Query of the list of lines. */
+export interface ListLinesRequest {
+  /** items a page, 1 to 200 */
+  limit?: string;
+  /** cursor of a page */
+  cursor?: string;
+  /** order, descending with a minus */
+  sort?:
+    | 'name'
+    | '-name'
+    | 'number'
+    | '-number'
+    | 'voltage'
+    | '-voltage'
+    | 'length'
+    | '-length'
+    | 'grade'
+    | '-grade';
+  /** name, place or application, in part */
+  'filter[search]'?: string;
+  /** nominal voltage in kV; several with commas */
+  'filter[voltage]'?: string;
+  /** worst grade; several with commas */
+  'filter[grade]'?: string;
+  /** states; several with commas */
+  'filter[state]'?: string;
+  /** applicant, part of the name */
+  'filter[applicant]'?: string;
 }
 
 /** Query of the queue. */
 export interface ListQueueRequest {
-  /** items a page, 1 to 200 */ limit?: string;
-  /** cursor of a page */ cursor?: string;
-  /** order, descending with a minus */ sort?:
+  /** items a page, 1 to 200 */
+  limit?: string;
+  /** cursor of a page */
+  cursor?: string;
+  /** order, descending with a minus */
+  sort?:
     | 'number'
     | '-number'
     | 'applicant'
@@ -748,227 +236,1268 @@ export interface ListQueueRequest {
     | '-age'
     | 'reviewer'
     | '-reviewer';
-  /** states; several with commas */ 'filter[state]'?: string;
-  /** applicant, part of the name */ 'filter[applicant]'?: string;
-  /** nominal voltage in kV; several with commas */ 'filter[voltage]'?: string;
-  /** worst grade; several with commas */ 'filter[grade]'?: string;
-  /** a reviewer’s id, “me” or “nobody” */ 'filter[reviewer]'?: string;
-  /** number, title, applicant or place, in part */ 'filter[search]'?: string;
-  /** when it is due */ 'filter[due]'?: 'overdue' | 'today' | 'week';
-}
-
-/** Query of the list of lines. */
-export interface ListLinesRequest {
-  /** items a page, 1 to 200 */ limit?: string;
-  /** cursor of a page */ cursor?: string;
-  /** order, descending with a minus */ sort?:
-    | 'name'
-    | '-name'
-    | 'number'
-    | '-number'
-    | 'voltage'
-    | '-voltage'
-    | 'length'
-    | '-length'
-    | 'grade'
-    | '-grade';
-  /** name, place or application, in part */ 'filter[search]'?: string;
-  /** nominal voltage in kV; several with commas */ 'filter[voltage]'?: string;
-  /** worst grade; several with commas */ 'filter[grade]'?: string;
-  /** states; several with commas */ 'filter[state]'?: string;
-  /** applicant, part of the name */ 'filter[applicant]'?: string;
-}
-
-/** Query of the list of letters. */
-export interface ListLettersRequest {
-  /** items a page, 1 to 200 */ limit?: string;
-  /** cursor of a page */ cursor?: string;
-  /** order, descending with a minus */ sort?: 'sent' | '-sent' | 'number' | '-number';
-  /** kind */ 'filter[kind]'?: 'discrepancy' | 'accepted' | 'declined';
-  /** number or title, in part */ 'filter[search]'?: string;
-}
-
-/** A new application. */
-export interface CreateApplicationRequest {
-  /** title */ title: string;
-  /** kind of connection */ connectionKind: 'generation' | 'storage' | 'load' | 'network';
-  /** capacity asked for (MW) */ capacityMw?: number | null;
-  /** substation or line to connect at */ pointOfConnection: string;
-  contact: Contact;
-}
-
-/** Changes of the head of a draft. */
-export interface UpdateApplicationRequest {
-  /** version that was read; a stale one is refused with 409 (count) */ version?: number;
-  /** title */ title?: string;
-  /** kind of connection */ connectionKind?: 'generation' | 'storage' | 'load' | 'network';
-  /** capacity asked for (MW) */ capacityMw?: number | null;
-  /** substation or line to connect at */ pointOfConnection?: string;
-  contact?: Contact;
-}
-
-/** A line of the draft; version 0 for a new one. */
-export interface SaveDraftLineRequest {
-  /** version that was read; a stale one is refused with 409 (count) */ version?: number;
-  /** the line as in a filing, perhaps incomplete */ line: Record<string, unknown>;
-  /** fields as they were typed, by JSON Pointer within the line */ asTyped?: Record<
-    string,
-    { /** text as typed */ text: string; /** unit as chosen */ unit?: string }
-  >;
-  /** place in the filing (count) */ ordinal?: number;
-}
-
-/** Query of deleting a line of the draft. */
-export interface DeleteDraftLineRequest {
-  /** version that was read */ version?: string;
-}
-
-/** The applicant’s word on a file that was read. */
-export interface TakeImportRequest {
-  /** all lines, which needs a file without faults, or only the good ones */ take: 'all' | 'good';
-  /** also remove the draft’s other lines */ replaceAll?: boolean;
-}
-
-/** Files the draft. */
-export interface FileApplicationRequest {
-  /** version that was read; a stale one is refused with 409 (count) */ version?: number;
-  /** words to go with the revision */ note?: string;
-}
-
-/** Takes a filed application. */
-export interface TakeApplicationRequest {
-  /** version that was read; a stale one is refused with 409 (count) */ version?: number;
-}
-
-/** Hands a case over. */
-export interface HandOverApplicationRequest {
-  /** version that was read; a stale one is refused with 409 (count) */ version?: number;
-  /** the other reviewer */ to: string;
-  /** reason */ reason: string;
+  /** states; several with commas */
+  'filter[state]'?: string;
+  /** applicant, part of the name */
+  'filter[applicant]'?: string;
+  /** nominal voltage in kV; several with commas */
+  'filter[voltage]'?: string;
+  /** worst grade; several with commas */
+  'filter[grade]'?: string;
+  /** a reviewer’s id, “me” or “nobody” */
+  'filter[reviewer]'?: string;
+  /** number, title, applicant or place, in part */
+  'filter[search]'?: string;
+  /** when it is due */
+  'filter[due]'?: 'overdue' | 'today' | 'week';
 }
 
 /** Puts a case back into the queue. */
 export interface PutBackApplicationRequest {
-  /** version that was read; a stale one is refused with 409 (count) */ version?: number;
-  /** reason */ reason: string;
-}
-
-/** Returns a case with its open discrepancies. */
-export interface ReturnApplicationRequest {
-  /** version that was read; a stale one is refused with 409 (count) */ version?: number;
-  /** the revision that it was decided on */ revision: string;
-  /** words to go with the letter */ message?: string;
+  /** version that was read; a stale one is refused with 409 (count) */
+  version?: number;
+  /** reason */
+  reason: string;
 }
 
 /** Raises a discrepancy. */
 export interface RaiseDiscrepancyRequest {
-  /** the revision that it is raised on */ revision: string;
-  /** findings it is raised from */ fingerprints?: string[];
-  /** lines it is about */ lineKeys?: string[];
-  /** what it is about */ title: string;
-  /** the value questioned */ question: string;
-  /** what would settle it */ wanted?: string;
-}
-
-/** Answers a discrepancy. */
-export interface AnswerDiscrepancyRequest {
-  /** version that was read; a stale one is refused with 409 (count) */ version?: number;
-  /** a change of the draft, or an explanation */ by: 'change' | 'explanation';
-  /** the answer */ text: string;
-  /** only keep the words, do not answer yet */ draft?: boolean;
-}
-
-/** Settles a discrepancy. */
-export interface SettleDiscrepancyRequest {
-  /** version that was read; a stale one is refused with 409 (count) */ version?: number;
-  /** the revision that it is settled on */ revision: string;
-  /** words */ text?: string;
-}
-
-/** Asks again. */
-export interface ReopenDiscrepancyRequest {
-  /** version that was read; a stale one is refused with 409 (count) */ version?: number;
-  /** the revision that it is reopened on */ revision: string;
-  /** what is asked now */ text: string;
+  /** the revision that it is raised on */
+  revision: string;
+  /** findings it is raised from */
+  fingerprints?: string[];
+  /** lines it is about */
+  lineKeys?: string[];
+  /** what it is about */
+  title: string;
+  /** the value questioned */
+  question: string;
+  /** what would settle it */
+  wanted?: string;
 }
 
 /** Adds words to the thread. */
 export interface RemarkOnDiscrepancyRequest {
-  /** words */ text: string;
+  /** words */
+  text: string;
 }
 
-/** Waives a finding. */
-export interface WaiveFindingRequest {
-  /** the revision that it is waived on */ revision: string;
-  /** reason */ reason: string;
+/** Asks again. */
+export interface ReopenDiscrepancyRequest {
+  /** version that was read; a stale one is refused with 409 (count) */
+  version?: number;
+  /** the revision that it is reopened on */
+  revision: string;
+  /** what is asked now */
+  text: string;
+}
+
+/** Returns a case with its open discrepancies. */
+export interface ReturnApplicationRequest {
+  /** version that was read; a stale one is refused with 409 (count) */
+  version?: number;
+  /** the revision that it was decided on */
+  revision: string;
+  /** words to go with the letter */
+  message?: string;
+}
+
+/** A line of the draft; version 0 for a new one. */
+export interface SaveDraftLineRequest {
+  /** version that was read; a stale one is refused with 409 (count) */
+  version?: number;
+  /** the line as in a filing, perhaps incomplete */
+  line: Record<string, unknown>;
+  /** fields as they were typed, by JSON Pointer within the line */
+  asTyped?: Record<
+    string,
+    {
+      /** text as typed */
+      text: string;
+      /** unit as chosen */
+      unit?: string;
+    }
+  >;
+  /** place in the filing (count) */
+  ordinal?: number;
 }
 
 /** Sets a Note or an Explain aside. */
 export interface SetAsideFindingRequest {
-  /** the revision that it is set aside on */ revision: string;
-  /** reason */ reason: string;
+  /** the revision that it is set aside on */
+  revision: string;
+  /** reason */
+  reason: string;
 }
 
-/** The second reviewer’s word. */
-export interface DecideCountersignRequest {
-  /** outcome */ outcome: 'agreed' | 'refused';
-  /** words */ remark?: string;
+/** Settles a discrepancy. */
+export interface SettleDiscrepancyRequest {
+  /** version that was read; a stale one is refused with 409 (count) */
+  version?: number;
+  /** the revision that it is settled on */
+  revision: string;
+  /** words */
+  text?: string;
 }
 
-/** Accepts an application. */
-export interface AcceptApplicationRequest {
-  /** version that was read; a stale one is refused with 409 (count) */ version?: number;
-  /** the revision that is accepted */ revision: string;
-  /** words */ reason?: string;
-  /** conditions */ conditions?: string[];
+/** Takes a filed application. */
+export interface TakeApplicationRequest {
+  /** version that was read; a stale one is refused with 409 (count) */
+  version?: number;
 }
 
-/** Proposes to decline; a second reviewer countersigns. */
-export interface DeclineApplicationRequest {
-  /** version that was read; a stale one is refused with 409 (count) */ version?: number;
-  /** the revision that is declined */ revision: string;
-  /** reason */ reason: string;
+/** The applicant’s word on a file that was read. */
+export interface TakeImportRequest {
+  /** all lines, which needs a file without faults, or only the good ones */
+  take: 'all' | 'good';
+  /** also remove the draft’s other lines */
+  replaceAll?: boolean;
+}
+
+/** Changes of the head of a draft. */
+export interface UpdateApplicationRequest {
+  /** version that was read; a stale one is refused with 409 (count) */
+  version?: number;
+  /** title */
+  title?: string;
+  /** kind of connection */
+  connectionKind?: 'generation' | 'storage' | 'load' | 'network';
+  /** capacity asked for (MW) */
+  capacityMw?: number | null;
+  /** substation or line to connect at */
+  pointOfConnection?: string;
+  contact?: Contact;
+}
+
+/** Waives a finding. */
+export interface WaiveFindingRequest {
+  /** the revision that it is waived on */
+  revision: string;
+  /** reason */
+  reason: string;
 }
 
 /** Withdraws the open round. */
 export interface WithdrawApplicationRequest {
-  /** version that was read; a stale one is refused with 409 (count) */ version?: number;
-  /** reason */ reason?: string;
+  /** version that was read; a stale one is refused with 409 (count) */
+  version?: number;
+  /** reason */
+  reason?: string;
 }
 
-/** Opens a new round. */
-export interface AmendApplicationRequest {
-  /** version that was read; a stale one is refused with 409 (count) */ version?: number;
-  /** reason */ reason: string;
+/** Applications, a page. */
+export interface ApplicationList {
+  /** this page */
+  items: ApplicationSummary[];
+  /** cursor of the next page */
+  nextCursor: string | null;
+  /** items of the whole list (count) */
+  total: number;
 }
 
-/** Asks for another check run. */
-export interface CheckAgainRequest {}
-
-/** Makes a run govern. */
-export interface AdoptRunRequest {
-  /** reason */ reason: string;
+/** An application as lists and the queue show it. */
+export interface ApplicationSummary {
+  /** application */
+  id: string;
+  /** application number YY-NNNN */
+  number: string;
+  /** version that was read; a stale one is refused with 409 (count) */
+  version: number;
+  /** title */
+  title: string;
+  applicant: Party;
+  /** kind of connection */
+  connectionKind: 'generation' | 'storage' | 'load' | 'network';
+  /** capacity asked for (MW) */
+  capacityMw: number | null;
+  /** substation or line to connect at */
+  pointOfConnection: string;
+  /** state of the current round */
+  state: 'draft' | 'filed' | 'in-review' | 'returned' | 'accepted' | 'declined' | 'withdrawn';
+  /** latest filed revision */
+  revision: string | null;
+  /** letter that the next filing gets */
+  nextRevision: string;
+  /** nominal voltages of the lines, highest first */
+  voltagesKv: number[];
+  /** lines (count) */
+  lineCount: number;
+  /** length of all lines together (km) */
+  totalLengthKm: number;
+  /** latest filing (instant, RFC 3339) */
+  filedAt: string | null;
+  filedBy: Person | null;
+  reviewer: Person | null;
+  /** when the current window ends (instant, RFC 3339) */
+  dueAt: string | null;
+  window: Window | null;
+  grades: Grades | null;
+  /** worst grade that still stands */
+  worstGrade: 'must-answer' | 'explain' | 'note' | null;
+  check: CheckState | null;
+  /** discrepancies not yet settled or waived (count) */
+  openDiscrepancies: number;
+  /** created (instant, RFC 3339) */
+  createdAt: string;
+  /** last step (instant, RFC 3339) */
+  updatedAt: string;
 }
 
-/** Query of comparing two runs. */
-export interface CompareRunsRequest {
-  /** ordinal of the earlier run */ from: string;
-  /** ordinal of the later run */ to: string;
+/** An application with all that its page shows. */
+export interface Application {
+  /** application */
+  id: string;
+  /** application number YY-NNNN */
+  number: string;
+  /** version that was read; a stale one is refused with 409 (count) */
+  version: number;
+  /** title */
+  title: string;
+  applicant: Party;
+  /** kind of connection */
+  connectionKind: 'generation' | 'storage' | 'load' | 'network';
+  /** capacity asked for (MW) */
+  capacityMw: number | null;
+  /** substation or line to connect at */
+  pointOfConnection: string;
+  /** state of the current round */
+  state: 'draft' | 'filed' | 'in-review' | 'returned' | 'accepted' | 'declined' | 'withdrawn';
+  /** latest filed revision */
+  revision: string | null;
+  /** letter that the next filing gets */
+  nextRevision: string;
+  /** nominal voltages of the lines, highest first */
+  voltagesKv: number[];
+  /** lines (count) */
+  lineCount: number;
+  /** length of all lines together (km) */
+  totalLengthKm: number;
+  /** latest filing (instant, RFC 3339) */
+  filedAt: string | null;
+  filedBy: Person | null;
+  reviewer: Person | null;
+  /** when the current window ends (instant, RFC 3339) */
+  dueAt: string | null;
+  window: Window | null;
+  grades: Grades | null;
+  /** worst grade that still stands */
+  worstGrade: 'must-answer' | 'explain' | 'note' | null;
+  check: CheckState | null;
+  /** discrepancies not yet settled or waived (count) */
+  openDiscrepancies: number;
+  /** created (instant, RFC 3339) */
+  createdAt: string;
+  /** last step (instant, RFC 3339) */
+  updatedAt: string;
+  contact: Contact;
+  /** the open or last round */
+  round: {
+    /** 1 is the first application (count) */
+    ordinal: number;
+    /** kind of round */
+    kind: 'first' | 'amendment';
+    /** why it was amended */
+    reason: string | null;
+  };
+  /** the accepted revision that stands */
+  acceptedRevision: string | null;
+  owner: Party;
+  /** steps that the caller’s role has */
+  steps: Step[];
+  /** all windows, oldest first */
+  windows: Window[];
+  decision: Decision | null;
+  /** proposals that wait for a second reviewer */
+  pendingCountersigns: Countersign[];
+  /** what the check does not replace */
+  caution: string;
 }
 
-/** Query of comparing two revisions. */
-export interface CompareRevisionsRequest {
-  /** the earlier revision */ from: string;
-  /** the later revision */ to: string;
+/** Attachments. */
+export interface AttachmentList {
+  /** newest first */
+  items: Attachment[];
 }
 
-/** Query of exporting lines. */
-export interface ExportLinesRequest {
-  /** format, json by default */ format?: 'json' | 'csv';
-  /** revision; the draft, or the latest revision for the owner, without one */ revision?: string;
+/** A file kept with the case. */
+export interface Attachment {
+  /** attachment */
+  id: string;
+  /** name of the file */
+  fileName: string;
+  /** media type */
+  mediaType: string;
+  /** size: bytes (count) */
+  byteLength: number;
+  /** SHA-256 */
+  sha256: string;
+  subject: {
+    /** what it belongs to */
+    kind: 'application' | 'line' | 'discrepancy';
+    /** the line’s key within the application, L1, L2 …; it stays through all revisions */
+    lineKey: string | null;
+    /** number of the discrepancy (count) */
+    discrepancy: number | null;
+  };
+  uploadedBy: Person;
+  /** uploaded (instant, RFC 3339) */
+  uploadedAt: string;
+  /** address of its bytes */
+  href: string;
 }
 
-/** Query of the list of countersigns. */
-export interface ListCountersignsRequest {
-  /** where it stands */ outcome?: 'waiting' | 'agreed' | 'refused' | 'lapsed';
+/** A slip that explains findings. */
+export interface Cause {
+  /** cause code */
+  code: string;
+  /** where the slip lies */
+  in: 'declared' | 'geometry';
+  /** parameters that it brings back */
+  explains: string[];
+  /** values that they get, per km */
+  corrected?: Record<string, number>;
+  /** JSON Pointer of the slip in the geometry */
+  where?: string;
+  /** the corrected entry, unbounded (in the unit of its field) */
+  entry?: unknown;
+  /** largest remaining difference (ratio) */
+  residual: number;
+  /** causes that give the same correction */
+  alternatives?: string[];
+  /** fitted without geometry */
+  possible?: boolean;
+  /** the cause as a sentence */
+  sentence: string;
+}
+
+/** Where the check run stands. */
+export interface CheckState {
+  /** ordinal of the run within its revision (count) */
+  run: number;
+  /** state of the run */
+  state: 'queued' | 'running' | 'done' | 'failed';
+  /** lines to check (count) */
+  lineCount: number;
+  /** lines checked so far (count) */
+  linesChecked: number;
+  /** started (instant, RFC 3339) */
+  startedAt: string | null;
+  /** finished (instant, RFC 3339) */
+  finishedAt: string | null;
+  /** why it failed, as a sentence */
+  failure: string | null;
+}
+
+/** The conductor library. */
+export interface ConductorList {
+  /** by name */
+  items: Conductor[];
+}
+
+/** A conductor of the library. */
+export interface Conductor {
+  /** name */
+  name: string;
+  /** family */
+  family: string;
+  /** handbook data in the fields of a filing’s conductor */
+  data: Record<string, unknown> | null;
+  /** may not be chosen any more */
+  retired: boolean;
+  /** source */
+  source: string;
+}
+
+/** Whom to ask about an application. */
+export interface Contact {
+  /** name */
+  name: string;
+  /** address for mail */
+  email: string;
+  /** telephone number */
+  phone: string | null;
+}
+
+/** Countersigns. */
+export interface CountersignList {
+  /** newest first */
+  items: Countersign[];
+}
+
+/** A step that a second reviewer must agree to. */
+export interface Countersign {
+  /** countersign */
+  id: string;
+  /** application */
+  applicationId: string;
+  /** application number YY-NNNN */
+  number: string;
+  /** what is proposed */
+  subject: 'waive' | 'decline';
+  /** revision letter */
+  revision: string;
+  /** what makes a finding the same from revision to revision: code, circuit and figures, hashed */
+  fingerprint: string | null;
+  /** the finding’s sentence */
+  finding: string | null;
+  /** reason */
+  reason: string;
+  proposedBy: Person;
+  /** proposed (instant, RFC 3339) */
+  proposedAt: string;
+  /** where it stands */
+  outcome: 'pending' | 'granted' | 'refused' | 'lapsed';
+  decidedBy: Person | null;
+  /** decided (instant, RFC 3339) */
+  decidedAt: string | null;
+  /** the second reviewer’s words */
+  remark: string | null;
+}
+
+/** A decision. */
+export interface Decision {
+  /** decision */
+  kind: 'accepted' | 'declined';
+  /** decided on */
+  revision: string;
+  /** reason */
+  reason: string | null;
+  /** conditions */
+  conditions: string[];
+  /** decided (instant, RFC 3339) */
+  decidedAt: string;
+  decidedBy: Person;
+  countersignedBy: Person | null;
+  /** SHA-256 of the record */
+  recordHash: string;
+}
+
+/** Accounts of the demo scenario. */
+export interface DemoAccountList {
+  /** accounts */
+  items: DemoAccount[];
+}
+
+/** An account of the demo. */
+export interface DemoAccount {
+  /** address to sign in with */
+  email: string;
+  /** password */
+  password: string;
+  /** name */
+  name: string;
+  /** role */
+  role: 'applicant' | 'reviewer' | 'administrator';
+  /** organisations */
+  organisation: string;
+}
+
+/** An entry of a discrepancy’s thread. */
+export interface DiscrepancyEntry {
+  /** entry */
+  id: string;
+  /** what it is */
+  kind: 'raised' | 'answered' | 'commented' | 'settled' | 'reopened' | 'waived';
+  /** made on */
+  revision: string;
+  by: Person;
+  party: Party;
+  /** when (instant, RFC 3339) */
+  at: string;
+  /** words */
+  text: string;
+}
+
+/** Discrepancies of an application. */
+export interface DiscrepancyList {
+  /** by number */
+  items: Discrepancy[];
+}
+
+/** What a reviewer raised and an applicant answers. */
+export interface Discrepancy {
+  /** discrepancy */
+  id: string;
+  /** D-number within the application (count) */
+  number: number;
+  /** state */
+  state: 'open' | 'answered' | 'settled' | 'waived';
+  /** version that was read; a stale one is refused with 409 (count) */
+  version: number;
+  /** what it is about */
+  title: string;
+  /** worst grade of its findings */
+  grade: 'must-answer' | 'explain' | 'note';
+  /** the value questioned */
+  question: string;
+  /** what would settle it */
+  wanted: string | null;
+  /** revision letter */
+  raisedOn: string;
+  /** raised (instant, RFC 3339) */
+  raisedAt: string;
+  raisedBy: Person;
+  /** lines it is about */
+  lineKeys: string[];
+  /** findings it was raised from, as the current revision has them */
+  findings: Finding[];
+  /** how it was answered */
+  answeredBy: 'change' | 'explanation' | null;
+  /** answer not yet sent */
+  draftAnswer: string | null;
+  /** thread, oldest first */
+  entries: DiscrepancyEntry[];
+  /** files */
+  attachments: Attachment[];
+}
+
+/** What a reviewer did with a finding. */
+export interface Disposition {
+  /** what was done with it */
+  kind: 'settled' | 'waived' | 'set-aside';
+  /** false while a countersign is waited for */
+  inForce: boolean;
+  /** made on */
+  revision: string;
+  /** reason */
+  reason: string;
+  by: Person;
+  /** made (instant, RFC 3339) */
+  at: string;
+  countersignedBy: Person | null;
+  /** made on an older revision and carried over */
+  carriedOver: boolean;
+}
+
+/** A line of the draft. */
+export interface DraftLine {
+  /** the line’s key within the application, L1, L2 …; it stays through all revisions */
+  lineKey: string;
+  /** place in the filing (count) */
+  ordinal: number;
+  /** version that was read; a stale one is refused with 409 (count) */
+  version: number;
+  /** the line as in a filing, perhaps incomplete */
+  line: Record<string, unknown>;
+  /** fields as they were typed, by JSON Pointer within the line */
+  asTyped: Record<
+    string,
+    {
+      /** text as typed */
+      text: string;
+      /** unit as chosen */
+      unit?: string;
+    }
+  >;
+  /** name */
+  name: string | null;
+  /** nominal voltage (kV) */
+  nominalVoltageKv: number | null;
+  /** length (km) */
+  lengthKm: number | null;
+  /** circuits (count) */
+  circuitCount: number;
+  /** complete by schema, and its geometry can be computed */
+  complete: boolean;
+  /** what is missing or wrong; pointers within the line */
+  faults: Fault[];
+  /** saved (instant, RFC 3339) */
+  updatedAt: string;
+}
+
+/** The draft of the next revision. */
+export interface Draft {
+  /** application */
+  applicationId: string;
+  /** version that was read; a stale one is refused with 409 (count) */
+  version: number;
+  /** the line’s key within the application, L1, L2 …; it stays through all revisions */
+  nextLineKey: string;
+  /** lines in filing order */
+  lines: DraftLine[];
+  /** may be filed as it stands */
+  ready: boolean;
+  /** what stands in the way of filing; pointers within the filing */
+  faults: Fault[];
+}
+
+/** One fault of what was sent. */
+export interface Fault {
+  /** JSON Pointer of the value */
+  pointer?: string;
+  /** row of the file, the header is 1 (count) */
+  row?: number;
+  /** column of the file */
+  column?: string;
+  /** the line’s key within the application, L1, L2 …; it stays through all revisions */
+  lineKey?: string;
+  /** what is there, unbounded (as found) */
+  value: unknown;
+  /** what is wanted */
+  expected: string;
+  /** the fault as a sentence */
+  message: string;
+}
+
+/** What the check noticed, and what became of it. */
+export interface Finding {
+  /** what makes a finding the same from revision to revision: code, circuit and figures, hashed */
+  fingerprint: string;
+  /** finding code */
+  code: string;
+  /** family */
+  family: 'physics' | 'geometry' | 'typical' | 'drawing';
+  /** grade */
+  grade: 'must-answer' | 'explain' | 'note';
+  /** the line’s key within the application, L1, L2 …; it stays through all revisions */
+  lineKey: string;
+  /** circuit (count) */
+  circuit: number | null;
+  /** section, from 1 (count) */
+  section: number | null;
+  /** position, from 1 (count) */
+  position: number | null;
+  /** parameter */
+  parameter: string | null;
+  /** declared (Ω/km, µS/km, Ω or ratio, unbounded) */
+  declared: number | null;
+  /** recomputed (Ω/km, µS/km, Ω or ratio, unbounded) */
+  recomputed: number | null;
+  /** difference (ratio, unbounded) */
+  deviation: number | null;
+  /** tolerance (ratio) */
+  tolerance: number | null;
+  /** JSON Pointer within the filing */
+  where: string | null;
+  /** as a sentence */
+  message: string;
+  /** findings of one matter share it (count) */
+  group: number | null;
+  /** best first */
+  causes: Cause[];
+  /** carries its group’s cause */
+  first: boolean;
+  /** parameter that it follows from */
+  follows: string | null;
+  /** not settled, waived or set aside */
+  stands: boolean;
+  disposition: Disposition | null;
+  /** number of the discrepancy raised from it (count) */
+  discrepancy: number | null;
+}
+
+/** Findings that still stand, by grade. */
+export interface Grades {
+  /** findings of grade must-answer that still stand (count) */
+  mustAnswer: number;
+  /** findings of grade explain that still stand (count) */
+  explain: number;
+  /** notes that still stand (count) */
+  note: number;
+}
+
+/** A file read for the draft. */
+export interface Import {
+  /** import */
+  id: string;
+  /** application */
+  applicationId: string;
+  /** staged: read and waiting for the applicant’s word; imported: in the draft; refused: nothing in it can be used */
+  state: 'staged' | 'imported' | 'refused';
+  /** name of the file */
+  fileName: string;
+  /** SHA-256 of the file */
+  sha256: string;
+  /** format */
+  format: 'json' | 'csv';
+  /** how the file is written, as found */
+  dialect: {
+    /** delimiter */
+    delimiter: 'comma' | 'semicolon' | 'tab';
+    /** decimal sign */
+    decimal: 'point' | 'comma';
+    /** encoding */
+    encoding: 'utf-8' | 'windows-1252';
+    /** line ends */
+    lineEnds: 'crlf' | 'lf' | 'cr' | 'mixed';
+  } | null;
+  /** rows without the header (count) */
+  rowCount: number;
+  /** lines that can be taken */
+  lines: {
+    /** name */
+    name: string;
+    /** the line’s key within the application, L1, L2 …; it stays through all revisions */
+    lineKey: string | null;
+    /** length (km) */
+    lengthKm: number | null;
+    /** nominal voltage (kV) */
+    nominalVoltageKv: number | null;
+    /** a line of this name is in the draft and would be replaced */
+    replaces: boolean;
+  }[];
+  /** every fault */
+  faults: Fault[];
+  /** what was assumed */
+  notices: Notice[];
+  /** read (instant, RFC 3339) */
+  createdAt: string;
+  /** imported (instant, RFC 3339) */
+  importedAt: string | null;
+}
+
+/** Letters, a page. */
+export interface LetterList {
+  /** newest first */
+  items: Letter[];
+  /** cursor of the next page */
+  nextCursor: string | null;
+  /** letters (count) */
+  total: number;
+}
+
+/** A letter as it was sent. */
+export interface Letter {
+  /** number within the application (count) */
+  number: number;
+  /** application */
+  applicationId: string;
+  /** application number YY-NNNN */
+  applicationNumber: string;
+  /** title */
+  applicationTitle: string;
+  /** kind */
+  kind: 'receipt' | 'return' | 'decision' | 'notice';
+  /** what it says in a line */
+  subject: string;
+  /** revision letter */
+  revision: string;
+  /** SHA-256 of the PDF */
+  sha256: string;
+  /** size: bytes (count) */
+  byteLength: number;
+  /** sent (instant, RFC 3339) */
+  sentAt: string;
+  sentBy: Person;
+  /** answers due (instant, RFC 3339) */
+  dueAt: string | null;
+  /** discrepancies in it */
+  discrepancies: number[];
+  /** address of the PDF */
+  href: string;
+}
+
+/** Lines of the latest revisions, a page. */
+export interface LineList {
+  /** this page */
+  items: {
+    /** the line’s key within the application, L1, L2 …; it stays through all revisions */
+    lineKey: string;
+    /** place in the filing (count) */
+    ordinal: number;
+    /** name */
+    name: string;
+    /** from */
+    from: string;
+    /** to */
+    to: string;
+    /** nominal voltage (kV) */
+    nominalVoltageKv: number;
+    /** frequency (Hz) */
+    frequencyHz: number;
+    /** length (km) */
+    lengthKm: number;
+    /** circuits (count) */
+    circuitCount: number;
+    /** sections (count) */
+    sectionCount: number;
+    /** phase conductors in words */
+    conductors: string;
+    /** application */
+    applicationId: string;
+    /** application number YY-NNNN */
+    applicationNumber: string;
+    /** title */
+    applicationTitle: string;
+    applicant: Party;
+    /** state of the application */
+    state: 'draft' | 'filed' | 'in-review' | 'returned' | 'accepted' | 'declined' | 'withdrawn';
+    /** revision letter */
+    revision: string;
+    grades: Grades | null;
+    /** worst grade that still stands */
+    worstGrade: 'must-answer' | 'explain' | 'note' | null;
+  }[];
+  /** cursor of the next page */
+  nextCursor: string | null;
+  /** lines (count) */
+  total: number;
+}
+
+/** A line of a revision, as lists show it. */
+export interface LineSummary {
+  /** the line’s key within the application, L1, L2 …; it stays through all revisions */
+  lineKey: string;
+  /** place in the filing (count) */
+  ordinal: number;
+  /** name */
+  name: string;
+  /** from */
+  from: string;
+  /** to */
+  to: string;
+  /** nominal voltage (kV) */
+  nominalVoltageKv: number;
+  /** frequency (Hz) */
+  frequencyHz: number;
+  /** length (km) */
+  lengthKm: number;
+  /** circuits (count) */
+  circuitCount: number;
+  /** sections (count) */
+  sectionCount: number;
+  /** phase conductors in words */
+  conductors: string;
+  grades: Grades | null;
+  /** worst grade that still stands */
+  worstGrade: 'must-answer' | 'explain' | 'note' | null;
+  /** one a matter, worst first */
+  marks: {
+    /** parameter */
+    parameter: string | null;
+    /** finding code */
+    code: string;
+    /** grade */
+    grade: 'must-answer' | 'explain' | 'note';
+    /** still stands */
+    stands: boolean;
+    /** short words, as “X1” or “X0 settled” */
+    words: string;
+  }[];
+  /** against the revision before */
+  change: 'first' | 'new' | 'changed' | 'same';
+}
+
+/** Something that was assumed or done and is worth knowing. */
+export interface Notice {
+  /** JSON Pointer */
+  pointer?: string;
+  /** row of the file (count) */
+  row?: number;
+  /** as a sentence */
+  message: string;
+}
+
+/** One parameter weighed: declared, recomputed, typical. */
+export interface ParameterValue {
+  /** circuit (count) */
+  circuit: number;
+  /** parameter */
+  parameter: string;
+  /** declared (Ω/km, µS/km, Ω or ratio, unbounded) */
+  declared: number | null;
+  /** as written, with its unit */
+  asDeclared: string | null;
+  /** recomputed (Ω/km, µS/km, Ω or ratio, unbounded) */
+  recomputed: number | null;
+  /** lower end of its range (Ω/km, µS/km, Ω or ratio, unbounded) */
+  low: number | null;
+  /** upper end of its range (Ω/km, µS/km, Ω or ratio, unbounded) */
+  high: number | null;
+  /** declared less recomputed, by recomputed (ratio, unbounded) */
+  deviation: number | null;
+  /** tolerance in use (ratio) */
+  tolerance: number | null;
+  /** typical range of the class */
+  typical: [number, number] | null;
+  /** outer range of the class */
+  outer: [number, number] | null;
+  /** source of the band */
+  source: string | null;
+  /** worst grade that the check gave it */
+  grade: 'must-answer' | 'explain' | 'note' | null;
+  /** parameter that it follows from */
+  follows: string | null;
+}
+
+/** An organisation. */
+export interface Party {
+  /** organisation */
+  id: string;
+  /** name */
+  name: string;
+}
+
+/** Somebody, as others see them. */
+export interface Person {
+  /** user */
+  id: string;
+  /** name as shown */
+  name: string;
+}
+
+/** Open applications with their due dates, a page. */
+export interface Queue {
+  /** this page */
+  items: ApplicationSummary[];
+  /** cursor of the next page */
+  nextCursor: string | null;
+  /** applications that fit the filters (count) */
+  total: number;
+  /** counts over all open applications, whatever the filters */
+  counts: {
+    /** open applications of the caller (count) */
+    mine: number;
+    /** open applications (count) */
+    everyone: number;
+    /** open applications without a reviewer (count) */
+    nobody: number;
+    /** open applications past their due date (count) */
+    overdue: number;
+  };
+}
+
+/** Reviewers. */
+export interface ReviewerList {
+  /** reviewers who may take this application */
+  items: {
+    /** user */
+    id: string;
+    /** name */
+    name: string;
+    /** cases in hand (count) */
+    openCases: number;
+  }[];
+}
+
+/** Two revisions compared. */
+export interface RevisionComparison {
+  /** revision letter */
+  from: string;
+  /** revision letter */
+  to: string;
+  /** lines of either */
+  lines: {
+    /** the line’s key within the application, L1, L2 …; it stays through all revisions */
+    lineKey: string;
+    /** name */
+    name: string;
+    /** change */
+    change: 'new' | 'changed' | 'same' | 'removed';
+    /** fields that differ */
+    changes: {
+      /** JSON Pointer within the line */
+      pointer: string;
+      /** value before, unbounded (in the unit of its field) */
+      before: unknown;
+      /** value after, unbounded (in the unit of its field) */
+      after: unknown;
+    }[];
+    /** more fields differ than are listed */
+    limitReached: boolean;
+  }[];
+}
+
+/** A line of a revision with its balance rows, findings and geometry. */
+export interface RevisionLine {
+  /** the line’s key within the application, L1, L2 …; it stays through all revisions */
+  lineKey: string;
+  /** place in the filing (count) */
+  ordinal: number;
+  /** name */
+  name: string;
+  /** from */
+  from: string;
+  /** to */
+  to: string;
+  /** nominal voltage (kV) */
+  nominalVoltageKv: number;
+  /** frequency (Hz) */
+  frequencyHz: number;
+  /** length (km) */
+  lengthKm: number;
+  /** circuits (count) */
+  circuitCount: number;
+  /** sections (count) */
+  sectionCount: number;
+  /** phase conductors in words */
+  conductors: string;
+  /** revision letter */
+  revision: string;
+  /** against the revision before */
+  change: 'first' | 'new' | 'changed' | 'same';
+  /** the line as filed, conductor data copied in */
+  line: Record<string, unknown>;
+  /** SHA-256 of the line */
+  lineHash: string;
+  run: Run | null;
+  /** voltage class it was weighed against (kV) */
+  bandClassKv: number | null;
+  /** balance rows */
+  values: ParameterValue[];
+  /** a circuit each */
+  equivalents: {
+    /** circuit (count) */
+    circuit: number;
+    /** series resistance (Ω, unbounded) */
+    r: number;
+    /** series reactance (Ω, unbounded) */
+    x: number;
+    /** shunt susceptance (µS, unbounded) */
+    b: number;
+    /** zero-sequence resistance (Ω, unbounded) */
+    r0: number;
+    /** zero-sequence reactance (Ω, unbounded) */
+    x0: number;
+    /** zero-sequence susceptance (µS, unbounded) */
+    b0: number;
+  }[];
+  /** zero-sequence mutuals */
+  mutual: {
+    /** the pair */
+    circuits: [number, number];
+    /** mutual resistance (Ω/km, unbounded) */
+    r0m: number;
+    /** mutual reactance (Ω/km, unbounded) */
+    x0m: number;
+    /** mutual susceptance (µS/km, unbounded) */
+    b0m: number;
+  }[];
+  /** what the declared X1 and B1 would need */
+  impliedGeometry: {
+    /** circuit (count) */
+    circuit: number;
+    /** mean phase spacing that X1 and B1 need (m) */
+    meanSpacingM: number | null;
+    /** conductor GMR that they need (mm) */
+    gmrMm: number | null;
+    /** in words */
+    sentence: string;
+  }[];
+  /** findings of this line */
+  findings: Finding[];
+  /** values of the revision before */
+  previous:
+    | {
+        /** circuit (count) */
+        circuit: number;
+        /** parameter */
+        parameter: string;
+        /** declared (Ω/km or µS/km, unbounded) */
+        declared: number | null;
+        /** recomputed (Ω/km or µS/km, unbounded) */
+        recomputed: number | null;
+      }[]
+    | null;
+}
+
+/** Revisions. */
+export interface RevisionList {
+  /** newest first */
+  items: RevisionSummary[];
+}
+
+/** A revision. */
+export interface RevisionSummary {
+  /** revision letter */
+  letter: string;
+  /** 1 is A (count) */
+  ordinal: number;
+  /** round (count) */
+  round: number;
+  /** filed (instant, RFC 3339) */
+  filedAt: string;
+  filedBy: Person;
+  /** SHA-256 of the canonical filing */
+  contentHash: string;
+  /** lines (count) */
+  lineCount: number;
+  /** length together (km) */
+  totalLengthKm: number;
+  /** what changed, in words */
+  change: string;
+  /** the applicant’s words with it */
+  note: string | null;
+  /** the latest */
+  current: boolean;
+}
+
+/** A revision with its lines, its check and what became of each finding. */
+export interface Revision {
+  /** revision letter */
+  letter: string;
+  /** 1 is A (count) */
+  ordinal: number;
+  /** round (count) */
+  round: number;
+  /** filed (instant, RFC 3339) */
+  filedAt: string;
+  filedBy: Person;
+  /** SHA-256 of the canonical filing */
+  contentHash: string;
+  /** what changed, in words */
+  change: string;
+  /** the applicant’s words with it */
+  note: string | null;
+  /** the latest */
+  current: boolean;
+  /** lines in filing order */
+  lines: LineSummary[];
+  /** lines of the revision before that are gone */
+  removed: string[];
+  /** check runs, newest first */
+  runs: Run[];
+  run: Run | null;
+  /** findings of the governing run, worst first */
+  findings: Finding[];
+  /** what the check does not replace */
+  caution: string;
+}
+
+/** The rules in force, for the live check. */
+export interface Rules {
+  /** version of the bands */
+  bandsVersion: string;
+  /** version of the tolerances */
+  tolerancesVersion: string;
+  /** bands */
+  bands: {
+    /** voltage class (kV) */
+    classKv: number;
+    /** frequency (Hz) */
+    frequencyHz: number;
+    /** parameter */
+    parameter: string;
+    /** typical range */
+    typical: [number, number];
+    /** outer range */
+    outer: [number, number];
+    /** source of the band */
+    source: string;
+  }[];
+  /** tolerances by parameter */
+  tolerances: Record<string, unknown>;
+  /** uncertainties of the inputs */
+  uncertainties: Record<string, unknown>;
+  /** what the owner assumes where nothing is filed */
+  owner: {
+    /** base (MVA) */
+    baseMva: number;
+    /** earth resistivity (Ω·m) */
+    earthResistivityOhmM: number;
+  };
+}
+
+/** Two check runs of a revision compared. */
+export interface RunComparison {
+  /** revision letter */
+  revision: string;
+  from: Run;
+  to: Run;
+  /** only in the later */
+  appeared: Finding[];
+  /** only in the earlier */
+  gone: Finding[];
+  /** in both (count) */
+  kept: number;
+}
+
+/** Check runs. */
+export interface RunList {
+  /** newest first */
+  items: Run[];
+}
+
+/** A check run of a revision. */
+export interface Run {
+  /** ordinal within the revision (count) */
+  ordinal: number;
+  /** state */
+  state: 'queued' | 'running' | 'done' | 'failed';
+  /** its findings govern */
+  governing: boolean;
+  /** engine version */
+  engine: string | null;
+  /** rule set version */
+  ruleSet: string | null;
+  /** why it was made */
+  reason: 'filing' | 'again';
+  requestedBy: Person | null;
+  /** asked for (instant, RFC 3339) */
+  createdAt: string;
+  /** finished (instant, RFC 3339) */
+  finishedAt: string | null;
+  /** lines (count) */
+  lineCount: number;
+  /** lines checked so far (count) */
+  linesChecked: number;
+  grades: Grades | null;
+  /** why it failed */
+  failure: string | null;
+}
+
+/** A step and, when it is closed, what opens it. */
+export interface Step {
+  /** step of the case */
+  step:
+    | 'file'
+    | 'take'
+    | 'hand-over'
+    | 'put-back'
+    | 'return'
+    | 'raise'
+    | 'settle'
+    | 'waive'
+    | 'accept'
+    | 'decline'
+    | 'withdraw'
+    | 'amend';
+  /** may be taken now by who asks */
+  open: boolean;
+  /** what opens it, as a sentence */
+  reason: string | null;
+}
+
+/** One thing that happened. */
+export interface TimelineEvent {
+  /** place in the trail (count) */
+  seq: number;
+  /** when (instant, RFC 3339) */
+  at: string;
+  /** act */
+  act: string;
+  actor: Person | null;
+  party: Party | null;
+  /** what happened, as a sentence */
+  sentence: string;
+  /** revision letter */
+  revision: string | null;
+  /** hash of the entry */
+  hash: string;
+}
+
+/** What happened to an application. */
+export interface Timeline {
+  /** oldest first */
+  items: TimelineEvent[];
+  /** more happened than is listed */
+  limitReached: boolean;
+}
+
+/** The working days that a step may take. */
+export interface Window {
+  /** which window */
+  kind: 'take-up' | 'review' | 'cure';
+  /** opened (instant, RFC 3339) */
+  openedAt: string;
+  /** due (instant, RFC 3339) */
+  dueAt: string;
+  /** closed (instant, RFC 3339) */
+  closedAt: string | null;
+  /** working days used (working days) */
+  used: number;
+  /** working days granted: working days (count) */
+  total: number;
+  /** working days left, negative when overdue (working days) */
+  left: number;
 }
