@@ -3,29 +3,28 @@ import type { Fault } from './api.generated';
 
 /** Every problem by its short name. `type` on the wire is `/problems/<name>`. */
 export const PROBLEMS = {
-  'malformed-request': { status: 400, title: 'The request cannot be read' },
-  'not-signed-in': { status: 401, title: 'Sign in first' },
-  'wrong-credentials': { status: 401, title: 'Address or password is not right' },
-  forbidden: { status: 403, title: 'Your role does not do this' },
-  'csrf-missing': { status: 403, title: 'The request does not come from this product’s page' },
+  'invalid-request': { status: 400, title: 'The request cannot be read' },
+  'not-signed-in': { status: 401, title: 'Sign in to go on' },
+  'sign-in-refused': { status: 401, title: 'Email or password does not match' },
+  'code-refused': { status: 401, title: 'The code does not match' },
+  forbidden: { status: 403, title: 'Your role may not do this' },
+  'cross-site': { status: 403, title: 'The request did not come from a page of this site' },
   'not-found': { status: 404, title: 'Not found' },
   'method-not-allowed': { status: 405, title: 'This address does not take that method' },
-  'not-acceptable': { status: 406, title: 'No answer in the form asked for' },
-  'wrong-state': { status: 409, title: 'Not in this state' },
-  'step-closed': { status: 409, title: 'Not open yet' },
-  stale: { status: 409, title: 'Changed since you read it' },
-  'check-running': { status: 409, title: 'The check is still running' },
+  conflict: { status: 409, title: 'This is not possible in the present state' },
   'already-taken': { status: 409, title: 'Somebody else has it' },
-  'in-flight': { status: 409, title: 'The same request is being worked on' },
-  conflict: { status: 409, title: 'Already there' },
-  'too-large': { status: 413, title: 'Too large' },
-  'unsupported-media': { status: 415, title: 'This kind of file is not taken' },
-  faults: { status: 422, title: 'Something in it needs another look' },
-  'key-reused': { status: 422, title: 'The idempotency key was used for another request' },
+  'check-running': { status: 409, title: 'The check is still running' },
+  stale: { status: 409, title: 'Somebody changed this in the meantime' },
+  'in-flight': { status: 409, title: 'The same request is still being worked on' },
+  gone: { status: 410, title: 'This link has been used or has expired' },
+  'too-large': { status: 413, title: 'The request is too large' },
+  'unsupported-media-type': { status: 415, title: 'This kind of content is not taken here' },
+  'invalid-content': { status: 422, title: 'Some entries need correcting' },
+  'key-reused': { status: 422, title: 'The Idempotency-Key belongs to another request' },
   'version-required': { status: 428, title: 'Say which version you read' },
-  'too-many-requests': { status: 429, title: 'Too many requests' },
-  'internal-error': { status: 500, title: 'Something went wrong here' },
-  unavailable: { status: 503, title: 'Not available just now' },
+  'too-many-requests': { status: 429, title: 'Too many attempts' },
+  internal: { status: 500, title: 'Something went wrong here' },
+  unavailable: { status: 503, title: 'Not available for the moment' },
 } as const;
 
 /** Short name of a problem. */
@@ -53,8 +52,6 @@ export interface Problem {
   currentRevision?: string;
   /** Of a step that is closed: the state of the round. */
   state?: string;
-  /** Seconds after which to try again. */
-  retryAfterS?: number;
 }
 
 /**
