@@ -1,0 +1,81 @@
+import type { DataSource, EntityManager } from 'typeorm';
+import { appendToChain } from './audit/chain';
+import type { ChainedEvent } from './audit/chain';
+import { actorRole } from './actor';
+import type { Actor } from './actor';
+
+/** One unit of work: what it reads, writes, mails and records comes to pass together or not at all. */
+export interface Transaction {
+  manager: EntityManager;
+  actor: Actor;
+  /** The moment of the whole transaction, from the product's clock. */
+  now: Date;
+  /** Entries for the audit trail; use `recordEvent`. */
+  events: Omit<ChainedEvent, 'seq' | 'prevHash'>[];
+  /** Run once the commit has succeeded (waking a worker and the like; never a write). */
+  afterCommit: (() => void)[];
+}
+
+/** What a transaction needs from its surroundings. */
+export interface Surroundings {
+  dataSource: DataSource;
+  clock: { now(): Date };
+}
+
+// Serialisation failure and deadlock: PostgreSQL asks for the whole transaction again.
+const RETRIED = new Set(['40001', '40P01']);
+const TRIES = 3;
+
+async function declareActor(manager: EntityManager, actor: Actor): Promise<void> {
+  const user = actor.kind === 'user' ? actor : undefined;
+  await manager.query(
+    `SELECT set_config('app.role', $1, true), set_config('app.org_id', $2, true), set_config('app.user_id', $3, true)`,
+    [actorRole(actor), user?.orgId ?? '', user?.userId ?? ''],
+  );
+}
+
+/** Runs one look-up or write with the product's own sight (a reviewer's address, the next number), then the actor's again. */
+export async function asSystem<T>(tx: Transaction, work: (manager: EntityManager) => Promise<T>): Promise<T> {
+  await declareActor(tx.manager, { kind: 'system', name: 'system' });
+  const result = await work(tx.manager);
+  await declareActor(tx.manager, tx.actor);
+  return result;
+}
+
+async function once<T>(
+  { dataSource, clock }: Surroundings,
+  actor: Actor,
+  work: (tx: Transaction) => Promise<T>,
+): Promise<T> {
+  const afterCommit: (() => void)[] = [];
+  const result = await dataSource.transaction(async (manager) => {
+    await declareActor(manager, actor);
+    const tx: Transaction = { manager, actor, now: clock.now(), events: [], afterCommit };
+    const value = await work(tx);
+    if (tx.events.length > 0) await asSystem(tx, () => appendToChain(manager, tx.events));
+    return value;
+  });
+  for (const follow of afterCommit) follow();
+  return result;
+}
+
+function isRetried(error: unknown): boolean {
+  const code = (error as { driverError?: { code?: string } } | null)?.driverError?.code;
+  return code !== undefined && RETRIED.has(code);
+}
+
+/** Runs `work` in one transaction under the actor's sight; deadlocks are tried again as a whole. */
+export async function inTransaction<T>(
+  surroundings: Surroundings,
+  actor: Actor,
+  work: (tx: Transaction) => Promise<T>,
+): Promise<T> {
+  for (let attempt = 1; ; attempt++) {
+    try {
+      return await once(surroundings, actor, work);
+    } catch (error) {
+      if (attempt >= TRIES || !isRetried(error)) throw error;
+      await new Promise((resolve) => setTimeout(resolve, 20 * attempt + Math.random() * 30));
+    }
+  }
+}

@@ -1,0 +1,70 @@
+import type { DataSource } from 'typeorm';
+import { inject } from 'vitest';
+import { makeDataSource } from '#server/database/data-source';
+import { roleUrl } from '#server/database/roles';
+import { inTransaction } from '#server/database/transaction';
+import type { Surroundings, Transaction } from '#server/database/transaction';
+import { system } from '#server/database/actor';
+import type { Actor } from '#server/database/actor';
+import { createDatabase, dropDatabase, randomDatabaseName } from './databases';
+
+/** A clock that stands still until a test moves it. */
+export class TestClock {
+  private instant = new Date('2027-03-01T09:00:00.000Z');
+  now(): Date {
+    return new Date(this.instant);
+  }
+  set(iso: string): void {
+    this.instant = new Date(iso);
+  }
+  advance(ms: number): void {
+    this.instant = new Date(this.instant.getTime() + ms);
+  }
+}
+
+export interface TestDatabase {
+  ownerUrl: string;
+  secret: string;
+  /** Connected as the role that serves requests. */
+  web: DataSource;
+  worker: DataSource;
+  /** Connected as the owner, who passes all walls: for arranging and looking, never for what is tested. */
+  owner: DataSource;
+  clock: TestClock;
+  surroundings: Surroundings;
+  /** One transaction as somebody, through the same door as the product's. */
+  as<T>(actor: Actor, work: (tx: Transaction) => Promise<T>): Promise<T>;
+  asSystem<T>(work: (tx: Transaction) => Promise<T>): Promise<T>;
+  close(): Promise<void>;
+}
+
+/** A database of one's own, cloned from the migrated template. */
+export async function makeTestDatabase(): Promise<TestDatabase> {
+  const cluster = inject('postgres');
+  const name = randomDatabaseName();
+  const ownerUrl = await createDatabase(cluster.ownerUrl, name, cluster.template);
+  const connect = (role: 'web' | 'worker') => makeDataSource(roleUrl(ownerUrl, cluster.secret, role), role);
+  const web = connect('web');
+  const worker = connect('worker');
+  const owner = makeDataSource(ownerUrl, 'owner');
+  await Promise.all([web.initialize(), worker.initialize(), owner.initialize()]);
+  const clock = new TestClock();
+  const surroundings: Surroundings = { dataSource: web, clock };
+  return {
+    ownerUrl,
+    secret: cluster.secret,
+    web,
+    worker,
+    owner,
+    clock,
+    surroundings,
+    as: (actor, work) => inTransaction(surroundings, actor, work),
+    asSystem: (work) => inTransaction(surroundings, system('test'), work),
+    close: async () => {
+      await Promise.all(
+        [web.destroy(), worker.destroy(), owner.destroy()].map((end) => end.catch(() => undefined)),
+      );
+      await dropDatabase(cluster.ownerUrl, name);
+    },
+  };
+}
