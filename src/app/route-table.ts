@@ -1,0 +1,23 @@
+import type { QueryClient } from '@tanstack/react-query';
+import type { RouteObject } from 'react-router-dom';
+import type { Role } from '../lib/api/session';
+
+/** One URL: who may open it (everybody signed in, if none is named) and the file that composes its page. */
+export interface RouteEntry {
+  path: string;
+  roles?: readonly Role[];
+  lazy: () => Promise<RouteModule>;
+}
+
+/** What a file of src/app/routes exports. */
+export interface RouteModule {
+  Component: RouteObject['Component'];
+  /** Loads what the page shows at once, with the same query options that the page's hooks use. */
+  prefetch?: (client: QueryClient, params: Readonly<Record<string, string | undefined>>, url: URL) => unknown;
+}
+
+/** Pages that need nobody signed in. */
+export const OPEN_ROUTES: readonly RouteEntry[] = [];
+
+/** Pages inside the frame with the bar on top. */
+export const ROUTES: readonly RouteEntry[] = [];

@@ -1,0 +1,67 @@
+import { Dialog as Radix } from 'radix-ui';
+import type { ReactNode } from 'react';
+import { IconButton } from './button';
+import { classNames } from './class-names';
+
+interface DialogProps {
+  open: boolean;
+  onOpenChange: (open: boolean) => void;
+  title: string;
+  /** What the dialog is for, read out with its title. */
+  description?: ReactNode;
+  children: ReactNode;
+  /** Buttons, in a row ruled off at the foot. */
+  foot?: ReactNode;
+  wide?: boolean;
+  /** Cannot be put aside by Escape or a click beside it; it has no cross either. */
+  insistent?: boolean;
+}
+
+/** A sheet above the page, which waits. The focus stays inside and goes back to where it came from. */
+export function Dialog({
+  open,
+  onOpenChange,
+  title,
+  description,
+  children,
+  foot,
+  wide,
+  insistent,
+}: DialogProps) {
+  const hold = insistent ? (event: Event) => event.preventDefault() : undefined;
+  return (
+    <Radix.Root open={open} onOpenChange={onOpenChange}>
+      <Radix.Portal>
+        <Radix.Overlay className="dialog-veil" />
+        <Radix.Content
+          className={classNames('dialog', wide && 'dialog-wide')}
+          onEscapeKeyDown={hold}
+          onInteractOutside={hold}
+          {...(description ? {} : { 'aria-describedby': undefined })}
+        >
+          <div className="dialog-head">
+            <div>
+              <Radix.Title asChild>
+                <h2>{title}</h2>
+              </Radix.Title>
+              {description && (
+                <Radix.Description className="mt-1 text-table text-ink-soft">{description}</Radix.Description>
+              )}
+            </div>
+            {!insistent && (
+              <Radix.Close asChild>
+                <IconButton label="Close">
+                  <svg width={12} height={12} viewBox="0 0 12 12" aria-hidden="true">
+                    <path d="M1 1 11 11M11 1 1 11" stroke="currentColor" strokeWidth={1.5} />
+                  </svg>
+                </IconButton>
+              </Radix.Close>
+            )}
+          </div>
+          <div className="dialog-body">{children}</div>
+          {foot && <div className="dialog-foot">{foot}</div>}
+        </Radix.Content>
+      </Radix.Portal>
+    </Radix.Root>
+  );
+}
