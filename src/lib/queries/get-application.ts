@@ -3,16 +3,23 @@ import type { Application } from '#shared/contracts/api.generated';
 import { call } from '../api/call';
 import { caseKey } from './case-key';
 
-const isChecking = (application: Application | undefined): boolean =>
-  application?.check?.state === 'queued' || application?.check?.state === 'running';
+const WHILE_CHECKING_MS = 1_500;
 
-/** An application with all that its page shows; asked for again each second while its check runs. */
+/** While a check runs the page follows it; else it waits to be told. */
+function pollWhileChecking(application: Application | undefined): number | false {
+  const state = application?.check?.state;
+  return state === 'queued' || state === 'running' ? WHILE_CHECKING_MS : false;
+}
+
 export const applicationQuery = (number: string) =>
   queryOptions({
-    queryKey: [...caseKey(number), 'application'],
-    queryFn: ({ signal }) => call('getApplication', { params: { applicationId: number }, signal }),
-    refetchInterval: (query) => (isChecking(query.state.data) ? 1000 : false),
+    queryKey: [...caseKey(number), 'head'],
+    queryFn: ({ signal }): Promise<Application> =>
+      call('getApplication', { params: { applicationId: number }, signal }),
+    refetchInterval: (query) => pollWhileChecking(query.state.data),
   });
 
-export const useApplication = (number: string): Application =>
-  useSuspenseQuery(applicationQuery(number)).data;
+/** An application with its state, windows and the steps that the caller may take. */
+export function useApplication(number: string): Application {
+  return useSuspenseQuery(applicationQuery(number)).data;
+}

@@ -1,14 +1,15 @@
-import { queryOptions, useQuery } from '@tanstack/react-query';
+import { queryOptions, useSuspenseQuery } from '@tanstack/react-query';
+import type { Draft } from '#shared/contracts/api.generated';
 import { call } from '../api/call';
 import { caseKey } from './case-key';
 
-/** The draft of the next revision: its lines and what stands in the way of filing. */
 export const draftQuery = (number: string) =>
   queryOptions({
     queryKey: [...caseKey(number), 'draft'],
-    queryFn: ({ signal }) => call('getDraft', { params: { applicationId: number }, signal }),
+    queryFn: ({ signal }): Promise<Draft> => call('getDraft', { params: { applicationId: number }, signal }),
   });
 
-/** The draft, asked for only while the application has one. */
-export const useDraft = (number: string, hasDraft: boolean) =>
-  useQuery({ ...draftQuery(number), enabled: hasDraft });
+/** The draft of the next revision: its lines and what stands in the way of filing. */
+export function useDraft(number: string): Draft {
+  return useSuspenseQuery(draftQuery(number)).data;
+}

@@ -1,14 +1,16 @@
-import { queryOptions, useQuery } from '@tanstack/react-query';
+import { queryOptions, useSuspenseQuery } from '@tanstack/react-query';
+import type { Revision } from '#shared/contracts/api.generated';
 import { call } from '../api/call';
 import { caseKey } from './case-key';
 
-/** A filed revision with its lines and what the check found. */
 export const revisionQuery = (number: string, letter: string) =>
   queryOptions({
     queryKey: [...caseKey(number), 'revision', letter],
-    queryFn: ({ signal }) => call('getRevision', { params: { applicationId: number, letter }, signal }),
+    queryFn: ({ signal }): Promise<Revision> =>
+      call('getRevision', { params: { applicationId: number, letter }, signal }),
   });
 
-/** A revision, or nothing while none was filed. */
-export const useRevision = (number: string, letter: string | null) =>
-  useQuery({ ...revisionQuery(number, letter ?? ''), enabled: letter !== null });
+/** A filed revision with its lines, its runs and what the check found. */
+export function useRevision(number: string, letter: string): Revision {
+  return useSuspenseQuery(revisionQuery(number, letter)).data;
+}

@@ -1,12 +1,16 @@
-import { queryOptions, useQuery } from '@tanstack/react-query';
+import { queryOptions, useSuspenseQuery } from '@tanstack/react-query';
+import type { AttachmentList } from '#shared/contracts/api.generated';
 import { call } from '../api/call';
 import { caseKey } from './case-key';
 
-/** The files kept with a case, newest first. */
 export const attachmentsQuery = (number: string) =>
   queryOptions({
     queryKey: [...caseKey(number), 'attachments'],
-    queryFn: ({ signal }) => call('listAttachments', { params: { applicationId: number }, signal }),
+    queryFn: ({ signal }): Promise<AttachmentList> =>
+      call('listAttachments', { params: { applicationId: number }, signal }),
   });
 
-export const useAttachments = (number: string) => useQuery(attachmentsQuery(number));
+/** The files kept with a case, newest first. */
+export function useAttachments(number: string): AttachmentList {
+  return useSuspenseQuery(attachmentsQuery(number)).data;
+}

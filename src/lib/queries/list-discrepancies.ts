@@ -1,12 +1,16 @@
-import { queryOptions, useQuery } from '@tanstack/react-query';
+import { queryOptions, useSuspenseQuery } from '@tanstack/react-query';
+import type { DiscrepancyList } from '#shared/contracts/api.generated';
 import { call } from '../api/call';
 import { caseKey } from './case-key';
 
-/** What the reviewer raised, by number. */
 export const discrepanciesQuery = (number: string) =>
   queryOptions({
     queryKey: [...caseKey(number), 'discrepancies'],
-    queryFn: ({ signal }) => call('listDiscrepancies', { params: { applicationId: number }, signal }),
+    queryFn: ({ signal }): Promise<DiscrepancyList> =>
+      call('listDiscrepancies', { params: { applicationId: number }, signal }),
   });
 
-export const useDiscrepancies = (number: string) => useQuery(discrepanciesQuery(number));
+/** What the reviewer raised, by number. */
+export function useDiscrepancies(number: string): DiscrepancyList {
+  return useSuspenseQuery(discrepanciesQuery(number)).data;
+}

@@ -1,12 +1,16 @@
-import { queryOptions, useQuery } from '@tanstack/react-query';
+import { queryOptions, useSuspenseQuery } from '@tanstack/react-query';
+import type { RevisionList } from '#shared/contracts/api.generated';
 import { call } from '../api/call';
 import { caseKey } from './case-key';
 
-/** The revisions that were filed, newest first. */
 export const revisionsQuery = (number: string) =>
   queryOptions({
     queryKey: [...caseKey(number), 'revisions'],
-    queryFn: ({ signal }) => call('listRevisions', { params: { applicationId: number }, signal }),
+    queryFn: ({ signal }): Promise<RevisionList> =>
+      call('listRevisions', { params: { applicationId: number }, signal }),
   });
 
-export const useRevisions = (number: string) => useQuery(revisionsQuery(number));
+/** The revisions that were filed, newest first. */
+export function useRevisions(number: string): RevisionList {
+  return useSuspenseQuery(revisionsQuery(number)).data;
+}
