@@ -9,13 +9,15 @@ export const caseKey = (number: string) => ['application', number] as const;
 
 /** Lists of cases, in which a write to one may show. */
 export const caseListsKey = () => ['applications'] as const;
+export const queueKey = () => ['queue'] as const;
+export const linesKey = () => ['lines'] as const;
+export const lettersKey = () => ['letters'] as const;
+export const countersignsKey = () => ['countersigns'] as const;
 
 /** After a write to a case: everything read of it is asked for again, and the lists that it stands in. */
 export async function caseChanged(client: QueryClient, number: string): Promise<void> {
-  await Promise.all([
-    client.invalidateQueries({ queryKey: caseKey(number) }),
-    client.invalidateQueries({ queryKey: caseListsKey() }),
-  ]);
+  const stale = [caseKey(number), caseListsKey(), queueKey(), linesKey(), lettersKey(), countersignsKey()];
+  await Promise.all(stale.map((queryKey) => client.invalidateQueries({ queryKey })));
 }
 
 /** The same as a hook, for a mutation's `onSettled`. */
