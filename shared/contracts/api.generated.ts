@@ -12,6 +12,16 @@ export interface AcceptApplicationRequest {
   conditions?: string[];
 }
 
+/** The invited person takes the account up. */
+export interface AcceptInvitationRequest {
+  /** token from the mail */
+  token: string;
+  /** name as shown */
+  name: string;
+  /** new password, 12 characters or more */
+  password: string;
+}
+
 /** Makes a run govern. */
 export interface AdoptRunRequest {
   /** reason */
@@ -36,6 +46,48 @@ export interface AnswerDiscrepancyRequest {
   text: string;
   /** only keep the words, do not answer yet */
   draft?: boolean;
+}
+
+/** An account that was asked for is granted. */
+export interface ApproveInvitationRequest {
+  /** organisation */
+  organisationId: string;
+  /** role */
+  role: 'applicant' | 'reviewer' | 'administrator';
+}
+
+/** Somebody without an account asks for one. */
+export interface AskForAccountRequest {
+  /** email address */
+  email: string;
+  /** name as shown */
+  name: string;
+  /** organisation, as a name */
+  organisation: string;
+  /** what it is for */
+  message?: string;
+}
+
+/** The address of an account whose password is forgotten. */
+export interface AskForResetRequest {
+  /** email address */
+  email: string;
+}
+
+/** A reviewer is kept from an organisation’s cases. */
+export interface BarReviewerRequest {
+  /** organisation */
+  organisationId: string;
+  /** reason */
+  reason: string;
+}
+
+/** A new password in place of the present one. */
+export interface ChangePasswordRequest {
+  /** present password */
+  present: string;
+  /** new password, 12 characters or more */
+  password: string;
 }
 
 /** Asks for another check run. */
@@ -68,6 +120,12 @@ export interface CreateApplicationRequest {
   /** substation or line to connect at */
   pointOfConnection: string;
   contact: Contact;
+}
+
+/** A new applicant organisation. */
+export interface CreateOrganisationRequest {
+  /** name */
+  name: string;
 }
 
 /** The second reviewer’s word. */
@@ -110,6 +168,12 @@ export interface FileApplicationRequest {
   note?: string;
 }
 
+/** A role in an organisation. */
+export interface GrantRoleRequest {
+  /** role */
+  role: 'applicant' | 'reviewer' | 'administrator';
+}
+
 /** Hands a case over. */
 export interface HandOverApplicationRequest {
   /** version that was read; a stale one is refused with 409 (count) */
@@ -118,6 +182,18 @@ export interface HandOverApplicationRequest {
   to: string;
   /** reason */
   reason: string;
+}
+
+/** An invitation by mail. */
+export interface InvitePersonRequest {
+  /** email address */
+  email: string;
+  /** name as shown */
+  name: string;
+  /** organisation */
+  organisationId: string;
+  /** role */
+  role: 'applicant' | 'reviewer' | 'administrator';
 }
 
 /** Query of the list of applications. */
@@ -158,6 +234,20 @@ export interface ListApplicationsRequest {
   'filter[search]'?: string;
   /** when it is due */
   'filter[due]'?: 'overdue' | 'today' | 'week';
+}
+
+/** Query of the audit trail. */
+export interface ListAuditEventsRequest {
+  /** items a page, 1 to 200 */
+  limit?: string;
+  /** cursor of a page */
+  cursor?: string;
+  /** act, or its beginning */
+  'filter[act]'?: string;
+  /** who did it */
+  'filter[actor]'?: string;
+  /** number of the application */
+  'filter[application]'?: string;
 }
 
 /** Query of the list of countersigns. */
@@ -252,6 +342,14 @@ export interface ListQueueRequest {
   'filter[due]'?: 'overdue' | 'today' | 'week';
 }
 
+/** The draft comes into force. */
+export interface PublishBandsRequest {
+  /** version that was read; a stale one is refused with 409 (count) */
+  version: number;
+  /** reason */
+  reason: string;
+}
+
 /** Puts a case back into the queue. */
 export interface PutBackApplicationRequest {
   /** version that was read; a stale one is refused with 409 (count) */
@@ -276,6 +374,12 @@ export interface RaiseDiscrepancyRequest {
   wanted?: string;
 }
 
+/** An account that was asked for is refused, or an invitation taken back. */
+export interface RefuseInvitationRequest {
+  /** reason */
+  reason: string;
+}
+
 /** Adds words to the thread. */
 export interface RemarkOnDiscrepancyRequest {
   /** words */
@@ -292,6 +396,14 @@ export interface ReopenDiscrepancyRequest {
   text: string;
 }
 
+/** A new password, with the token of the mail. */
+export interface ResetPasswordRequest {
+  /** token from the mail */
+  token: string;
+  /** new password, 12 characters or more */
+  password: string;
+}
+
 /** Returns a case with its open discrepancies. */
 export interface ReturnApplicationRequest {
   /** version that was read; a stale one is refused with 409 (count) */
@@ -300,6 +412,44 @@ export interface ReturnApplicationRequest {
   revision: string;
   /** words to go with the letter */
   message?: string;
+}
+
+/** The next rule set as a draft: what is named is replaced, the rest stays. Version 0 for a new draft. */
+export interface SaveBandDraftRequest {
+  /** version of the draft that was read (count) */
+  version: number;
+  /** bands */
+  bands?: Band[];
+  /** tolerances by parameter */
+  tolerances?: Record<
+    string,
+    {
+      /** tolerance, a share of the recomputed value (ratio) */
+      relative: number;
+      /** the most that uncertainty may widen it to (ratio) */
+      cap: number;
+    }
+  >;
+  /** uncertainties of the inputs, each in the unit that its name says */
+  uncertainties?: Record<string, number>;
+  /** what the owner assumes where nothing is filed */
+  owner?: {
+    /** base of per-unit values (MVA) */
+    baseMva: number;
+    /** earth resistivity where none is filed (Ω·m) */
+    earthResistivityOhmM: number;
+  };
+  /** windows of the case */
+  windows?: {
+    /** to take a filed case up, working days (count) */
+    takeUpDays: number;
+    /** to review, working days (count) */
+    reviewDays: number;
+    /** to answer a return, working days (count) */
+    cureDays: number;
+    /** of an extension, working days (count) */
+    extensionDays: number;
+  };
 }
 
 /** A line of the draft; version 0 for a new one. */
@@ -330,6 +480,28 @@ export interface SetAsideFindingRequest {
   reason: string;
 }
 
+/** Whether the account may sign in. */
+export interface SetPersonStatusRequest {
+  /** status */
+  status: 'active' | 'disabled';
+  /** reason */
+  reason: string;
+}
+
+/** The first start: the grid owner and its first administrator. */
+export interface SetUpRequest {
+  /** token printed at the start */
+  token: string;
+  /** name of the grid owner */
+  organisation: string;
+  /** name as shown */
+  name: string;
+  /** email address */
+  email: string;
+  /** new password, 12 characters or more */
+  password: string;
+}
+
 /** Settles a discrepancy. */
 export interface SettleDiscrepancyRequest {
   /** version that was read; a stale one is refused with 409 (count) */
@@ -338,6 +510,20 @@ export interface SettleDiscrepancyRequest {
   revision: string;
   /** words */
   text?: string;
+}
+
+/** Email and password. */
+export interface SignInRequest {
+  /** email address */
+  email: string;
+  /** password */
+  password: string;
+}
+
+/** The organisation to act for. */
+export interface SwitchOrganisationRequest {
+  /** organisation */
+  organisationId: string;
 }
 
 /** Takes a filed application. */
@@ -367,6 +553,12 @@ export interface UpdateApplicationRequest {
   /** substation or line to connect at */
   pointOfConnection?: string;
   contact?: Contact;
+}
+
+/** The code that the authenticator shows. */
+export interface VerifyTotpRequest {
+  /** six digits */
+  code: string;
 }
 
 /** Waives a finding. */
@@ -546,6 +738,112 @@ export interface Attachment {
   href: string;
 }
 
+/** The audit trail, newest first. */
+export interface AuditEventList {
+  /** entries */
+  items: AuditEvent[];
+  /** cursor of the next page */
+  next: string | null;
+}
+
+/** An entry of the audit trail. */
+export interface AuditEvent {
+  /** place in the chain (count) */
+  seq: number;
+  /** when */
+  at: string;
+  /** what happened */
+  act: string;
+  /** who, as the name was */
+  actor: string;
+  /** role */
+  actorRole: string;
+  /** application */
+  applicationNumber: string | null;
+  /** plain data of the act */
+  before: unknown;
+  /** plain data of the act */
+  after: unknown;
+  /** hash of the entry */
+  hash: string;
+}
+
+/** The next rule set as it stands; version 0 while it is the one in force and nothing was saved. */
+export interface BandDraft {
+  /** version of the draft (count) */
+  version: number;
+  /** number that it will have (count) */
+  ruleSetVersion: number;
+  /** bands */
+  bands: Band[];
+  /** tolerances by parameter */
+  tolerances: Record<
+    string,
+    {
+      /** tolerance, a share of the recomputed value (ratio) */
+      relative: number;
+      /** the most that uncertainty may widen it to (ratio) */
+      cap: number;
+    }
+  >;
+  /** uncertainties of the inputs, each in the unit that its name says */
+  uncertainties: Record<string, number>;
+  /** what the owner assumes where nothing is filed */
+  owner: {
+    /** base of per-unit values (MVA) */
+    baseMva: number;
+    /** earth resistivity where none is filed (Ω·m) */
+    earthResistivityOhmM: number;
+  };
+  /** windows of the case */
+  windows: {
+    /** to take a filed case up, working days (count) */
+    takeUpDays: number;
+    /** to review, working days (count) */
+    reviewDays: number;
+    /** to answer a return, working days (count) */
+    cureDays: number;
+    /** of an extension, working days (count) */
+    extensionDays: number;
+  };
+}
+
+/** The two nested ranges of one parameter in one voltage class. */
+export interface Band {
+  /** voltage class (kV) */
+  classKv: number;
+  /** frequency (Hz) */
+  frequencyHz: 50 | 60;
+  /** parameter */
+  parameter:
+    | 'r1'
+    | 'x1'
+    | 'b1'
+    | 'r0MinusR1'
+    | 'x0'
+    | 'b0'
+    | 'x1OverR1'
+    | 'x0OverX1'
+    | 'r0OverR1'
+    | 'b0OverB1'
+    | 'surgeImpedanceOhm'
+    | 'waveSpeed';
+  /** typical range */
+  typical: [number, number];
+  /** outer range */
+  outer: [number, number];
+  /** source of the bounds */
+  source: string;
+  bounds?: {
+    /** source of the lower typical bound */
+    typicalLow: string;
+    /** source of the upper typical bound */
+    typicalHigh: string;
+    /** source of the outer bounds */
+    outer: string;
+  };
+}
+
 /** A slip that explains findings. */
 export interface Cause {
   /** cause code */
@@ -554,16 +852,12 @@ export interface Cause {
   in: 'declared' | 'geometry';
   /** parameters that it brings back */
   explains: string[];
-  /** values that they get, per km */
-  corrected?: Record<string, number>;
+  /** values that they get, Ω/km or µS/km; for a slip in the geometry the corrected entries, named from where, in the unit of their field */
+  corrected: Record<string, number>;
   /** JSON Pointer of the slip in the geometry */
   where?: string;
-  /** the corrected entry, unbounded (in the unit of its field) */
-  entry?: unknown;
   /** largest remaining difference (ratio) */
   residual: number;
-  /** causes that give the same correction */
-  alternatives?: string[];
   /** fitted without geometry */
   possible?: boolean;
   /** the cause as a sentence */
@@ -769,6 +1063,12 @@ export interface Disposition {
   carriedOver: boolean;
 }
 
+/** It is done; there is nothing more to say. */
+export interface Done {
+  /** always true */
+  done: true;
+}
+
 /** A line of the draft. */
 export interface DraftLine {
   /** the line’s key within the application, L1, L2 …; it stays through all revisions */
@@ -877,8 +1177,19 @@ export interface Finding {
   causes: Cause[];
   /** carries its group’s cause */
   first: boolean;
-  /** parameter that it follows from */
+  /** parameter that it follows from; then it is not counted again */
   follows: string | null;
+  /** what the tolerance in use comes from */
+  toleranceOf: {
+    /** the administrator’s tolerance (ratio) */
+    administrator: number;
+    /** what the inputs’ uncertainty explains (ratio) */
+    inputs: number;
+    /** the input that dominates it */
+    dominantInput: string;
+    /** half a unit of the last digit declared (ratio) */
+    rounding: number;
+  } | null;
   /** not settled, waived or set aside */
   stands: boolean;
   disposition: Disposition | null;
@@ -894,6 +1205,12 @@ export interface Grades {
   explain: number;
   /** notes that still stand (count) */
   note: number;
+}
+
+/** Whether the server can work. */
+export interface Health {
+  /** status */
+  status: 'live' | 'ready';
 }
 
 /** A file read for the draft. */
@@ -944,6 +1261,41 @@ export interface Import {
   createdAt: string;
   /** imported (instant, RFC 3339) */
   importedAt: string | null;
+}
+
+/** Invitations, newest first. */
+export interface InvitationList {
+  /** invitations */
+  items: Invitation[];
+}
+
+/** An invitation, or an account that was asked for. */
+export interface Invitation {
+  /** invitation */
+  id: string;
+  /** email address */
+  email: string;
+  /** name */
+  name: string;
+  /** organisation invited to */
+  organisation: {
+    /** organisation */
+    id: string;
+    /** name */
+    name: string;
+  } | null;
+  /** organisation as it was asked for */
+  askedOrganisation: string | null;
+  /** what it is for */
+  message: string | null;
+  /** role */
+  role: 'applicant' | 'reviewer' | 'administrator';
+  /** status */
+  status: 'asked' | 'sent' | 'accepted' | 'refused' | 'revoked';
+  /** made */
+  createdAt: string;
+  /** expires */
+  expiresAt: string | null;
 }
 
 /** Letters, a page. */
@@ -1078,6 +1430,28 @@ export interface LineSummary {
   change: 'first' | 'new' | 'changed' | 'same';
 }
 
+/** Mails of the demo, newest first. */
+export interface MailRoom {
+  /** mails */
+  items: ReceivedMail[];
+}
+
+/** A role in an organisation. */
+export interface Membership {
+  /** organisation */
+  organisationId: string;
+  /** its name */
+  organisationName: string;
+  /** role */
+  role: 'applicant' | 'reviewer' | 'administrator';
+}
+
+/** The password was right; one more step is needed. */
+export interface NextStep {
+  /** the step */
+  next: 'totp' | 'totp-enrolment';
+}
+
 /** Something that was assumed or done and is worth knowing. */
 export interface Notice {
   /** JSON Pointer */
@@ -1086,6 +1460,26 @@ export interface Notice {
   row?: number;
   /** as a sentence */
   message: string;
+}
+
+/** All organisations. */
+export interface OrganisationList {
+  /** organisations */
+  items: Organisation[];
+}
+
+/** An organisation. */
+export interface Organisation {
+  /** organisation */
+  id: string;
+  /** name */
+  name: string;
+  /** kind */
+  kind: 'owner' | 'applicant';
+  /** members (count) */
+  members: number;
+  /** applications (count) */
+  applications: number;
 }
 
 /** One parameter weighed: declared, recomputed, typical. */
@@ -1128,6 +1522,39 @@ export interface Party {
   name: string;
 }
 
+/** A person with all roles. */
+export interface PeopleEntry {
+  /** user */
+  id: string;
+  /** name as shown */
+  name: string;
+  /** email address */
+  email: string;
+  /** status */
+  status: 'active' | 'disabled';
+  /** whether a second factor is in place */
+  hasSecondFactor: boolean;
+  /** last sign-in */
+  lastSignInAt: string | null;
+  /** roles */
+  memberships: Membership[];
+  /** organisations kept from */
+  bars: {
+    /** organisation */
+    organisationId: string;
+    /** its name */
+    organisationName: string;
+    /** reason */
+    reason: string;
+  }[];
+}
+
+/** Everybody with an account. */
+export interface PeopleList {
+  /** people */
+  items: PeopleEntry[];
+}
+
 /** Somebody, as others see them. */
 export interface Person {
   /** user */
@@ -1155,6 +1582,29 @@ export interface Queue {
     /** open applications past their due date (count) */
     overdue: number;
   };
+}
+
+/** A mail that the demo’s own mail server took in. */
+export interface ReceivedMail {
+  /** mail */
+  id: string;
+  /** sender */
+  from: string;
+  /** recipient */
+  to: string;
+  /** subject */
+  subject: string;
+  /** text */
+  body: string;
+  /** attachments */
+  attachments: {
+    /** file name */
+    name: string;
+    /** size (bytes) (count) */
+    byteLength: number;
+  }[];
+  /** received */
+  receivedAt: string;
 }
 
 /** Reviewers. */
@@ -1354,6 +1804,28 @@ export interface Revision {
   caution: string;
 }
 
+/** All rule sets, newest first. */
+export interface RuleSetList {
+  /** rule sets */
+  items: RuleSetSummary[];
+}
+
+/** A rule set in the list of versions. */
+export interface RuleSetSummary {
+  /** number of the rule set (count) */
+  version: number;
+  /** status */
+  status: 'draft' | 'published';
+  /** in force from */
+  effectiveFrom: string | null;
+  /** reason */
+  reason: string;
+  /** who published it */
+  publishedBy: Person | null;
+  /** whether it is the one in force */
+  inForce: boolean;
+}
+
 /** The rules in force, for the live check. */
 export interface Rules {
   /** version of the bands */
@@ -1436,6 +1908,47 @@ export interface Run {
   failure: string | null;
 }
 
+/** Who is signed in, and what may be shown before anybody is. */
+export interface Session {
+  /** who is signed in */
+  user: {
+    /** user */
+    id: string;
+    /** name as shown */
+    name: string;
+    /** email address */
+    email: string;
+  } | null;
+  /** role in the active organisation */
+  role: 'applicant' | 'reviewer' | 'administrator' | null;
+  /** active organisation */
+  organisation: {
+    /** organisation */
+    id: string;
+    /** name */
+    name: string;
+    /** kind */
+    kind: 'owner' | 'applicant';
+  } | null;
+  /** organisations to act for */
+  memberships: Membership[];
+  /** organisations whose cases are not this reviewer’s to see */
+  barredOrganisationIds: string[];
+  /** to be sent back as X-CSRF-Token */
+  csrfToken: string | null;
+  /** what is still to come */
+  next: 'totp' | 'totp-enrolment' | null;
+  /** the grid owner */
+  gridOwner: {
+    /** name */
+    name: string;
+  } | null;
+  /** whether this is the demo */
+  demo: boolean;
+  /** whether the first start is still to be completed */
+  setUpNeeded: boolean;
+}
+
 /** A step and, when it is closed, what opens it. */
 export interface Step {
   /** step of the case */
@@ -1482,6 +1995,14 @@ export interface Timeline {
   items: TimelineEvent[];
   /** more happened than is listed */
   limitReached: boolean;
+}
+
+/** A new second factor, to be confirmed with a code. */
+export interface TotpEnrolment {
+  /** secret in base 32 */
+  secret: string;
+  /** address for an authenticator */
+  uri: string;
 }
 
 /** The working days that a step may take. */
