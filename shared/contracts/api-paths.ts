@@ -5,6 +5,8 @@
  * `{applicationId}` takes the application's UUID or its number YY-NNNN.
  */
 
+import { ACCOUNT_OPERATIONS } from './account-paths';
+
 /** The part of an application that most paths start with. */
 const CASE = '/api/applications/{applicationId}';
 
@@ -69,6 +71,7 @@ export const CASE_OPERATIONS = {
 
 /** Method and path of every operation. */
 export const API_OPERATIONS = {
+  ...ACCOUNT_OPERATIONS,
   ...CASE_OPERATIONS,
 } as const;
 

@@ -1,5 +1,7 @@
 /** What goes in and what comes out of every operation of the case: types of query, body and answer. */
 import type * as Api from './api.generated';
+import type { ACCOUNT_OPERATIONS } from './account-paths';
+import type { AccountExchanges } from './account-types';
 import type { CASE_OPERATIONS, PathParameter } from './api-paths';
 
 /** A file sent as multipart/form-data: field `file`, and the text fields named. */
@@ -80,5 +82,15 @@ export type CaseApiTypes = {
   };
 };
 
+/** The same of people, sign-in, rules and the server itself. */
+export type AccountApiTypes = {
+  [K in keyof typeof ACCOUNT_OPERATIONS]: {
+    params: { [P in PathParameter<(typeof ACCOUNT_OPERATIONS)[K]['path']>]: string | number };
+    query: Part<AccountExchanges[K], 'query'>;
+    body: Part<AccountExchanges[K], 'body'>;
+    response: AccountExchanges[K]['response'];
+  };
+};
+
 /** All operations. */
-export type ApiTypes = CaseApiTypes;
+export type ApiTypes = AccountApiTypes & CaseApiTypes;

@@ -442,13 +442,11 @@ export interface SaveBandDraftRequest {
   /** windows of the case */
   windows?: {
     /** to take a filed case up, working days (count) */
-    takeUpDays: number;
+    'take-up': number;
     /** to review, working days (count) */
-    reviewDays: number;
+    review: number;
     /** to answer a return, working days (count) */
-    cureDays: number;
-    /** of an extension, working days (count) */
-    extensionDays: number;
+    cure: number;
   };
 }
 
@@ -798,13 +796,11 @@ export interface BandDraft {
   /** windows of the case */
   windows: {
     /** to take a filed case up, working days (count) */
-    takeUpDays: number;
+    'take-up': number;
     /** to review, working days (count) */
-    reviewDays: number;
+    review: number;
     /** to answer a return, working days (count) */
-    cureDays: number;
-    /** of an extension, working days (count) */
-    extensionDays: number;
+    cure: number;
   };
 }
 
