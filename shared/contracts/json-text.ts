@@ -1,0 +1,253 @@
+/**
+ * Reads JSON text strictly and keeps what `JSON.parse` loses: digits as they were written (`0.40`), keys that occur
+ * twice, numbers that no double holds, and the place of whatever is wrong. One fault does not hide the next where
+ * reading can go on.
+ */
+import { inWords, MAX_FAULTS, pointerToken, shown } from './faults';
+import type { PointerFault } from './faults';
+import { FORBIDDEN_KEY, forbiddenKey, MAX_DEPTH, notFinite, tooDeep } from './plain-data';
+
+/** What came of a JSON text. */
+export type JsonText =
+  | {
+      ok: true;
+      value: unknown;
+      /** pointer → digits, where they are not the number's shortest form */ written: Record<string, string>;
+    }
+  | { ok: false; faults: PointerFault[] };
+
+/** Thrown inside this file only: the text cannot be read past this place. */
+class Stop {
+  constructor(
+    readonly message: string,
+    readonly at: number,
+  ) {}
+}
+
+const NUMBER = /-?(?:0|[1-9]\d*)(?:\.\d+)?(?:[eE][+-]?\d+)?/y;
+const WORD = /[+-]?[\w.#]+/y;
+const ESCAPES: Readonly<Record<string, string>> = {
+  '"': '"',
+  '\\': '\\',
+  '/': '/',
+  b: '\b',
+  f: '\f',
+  n: '\n',
+  r: '\r',
+  t: '\t',
+};
+
+class Reader {
+  private at = 0;
+  private readonly path: (string | number)[] = [];
+  readonly faults: PointerFault[] = [];
+  readonly written: Record<string, string> = {};
+
+  constructor(private readonly text: string) {}
+
+  whole(): unknown {
+    this.blanks();
+    if (this.at >= this.text.length) throw new Stop('There is nothing in it.', this.at);
+    const value = this.value();
+    this.blanks();
+    if (this.at < this.text.length) throw new Stop('Something follows after the end.', this.at);
+    return value;
+  }
+
+  pointer(): string {
+    return this.path.map((p) => `/${pointerToken(p)}`).join('');
+  }
+
+  private fault(f: PointerFault): void {
+    if (this.faults.length < MAX_FAULTS) this.faults.push(f);
+  }
+
+  private blanks(): void {
+    for (;;) {
+      const c = this.text.charCodeAt(this.at);
+      if (c !== 0x20 && c !== 0x0a && c !== 0x0d && c !== 0x09) return;
+      this.at += 1;
+    }
+  }
+
+  private value(): unknown {
+    switch (this.text[this.at]) {
+      case '{':
+        return this.nested(() => this.object());
+      case '[':
+        return this.nested(() => this.list());
+      case '"':
+        return this.string();
+      default:
+        return this.word();
+    }
+  }
+
+  private nested<T>(read: () => T): T {
+    if (this.path.length >= MAX_DEPTH) {
+      this.fault(tooDeep(this.pointer()));
+      throw new Stop('It is nested too deeply.', this.at);
+    }
+    return read();
+  }
+
+  private object(): Record<string, unknown> {
+    const out: Record<string, unknown> = {};
+    this.at += 1;
+    this.blanks();
+    if (this.text[this.at] === '}') {
+      this.at += 1;
+      return out;
+    }
+    do {
+      this.blanks();
+      if (this.text[this.at] !== '"') throw new Stop(this.instead('a name in double quotes'), this.at);
+      const key = this.string();
+      this.blanks();
+      if (this.text[this.at] !== ':') throw new Stop(this.instead('a colon'), this.at);
+      this.at += 1;
+      this.blanks();
+      this.path.push(key);
+      const value = this.value();
+      this.keep(out, key, value);
+      this.path.pop();
+    } while (this.more('}'));
+    return out;
+  }
+
+  private keep(out: Record<string, unknown>, key: string, value: unknown): void {
+    if (key === FORBIDDEN_KEY) this.fault(forbiddenKey(this.pointer()));
+    else if (Object.hasOwn(out, key))
+      this.fault({
+        pointer: this.pointer(),
+        value: shown(value),
+        expected: 'each name once',
+        message: `The name ${inWords(key)} occurs twice here (${this.place(this.at)}).`,
+      });
+    else out[key] = value;
+  }
+
+  private list(): unknown[] {
+    const out: unknown[] = [];
+    this.at += 1;
+    this.blanks();
+    if (this.text[this.at] === ']') {
+      this.at += 1;
+      return out;
+    }
+    do {
+      this.blanks();
+      this.path.push(out.length);
+      out.push(this.value());
+      this.path.pop();
+    } while (this.more(']'));
+    return out;
+  }
+
+  /** After an entry: whether another follows. */
+  private more(end: string): boolean {
+    this.blanks();
+    const c = this.text[this.at];
+    if (c !== ',' && c !== end) throw new Stop(this.instead(`a comma or ${end}`), this.at);
+    this.at += 1;
+    if (c === end) return false;
+    this.blanks();
+    if (this.text[this.at] === end) throw new Stop(`A comma stands before ${end}: take it out.`, this.at);
+    return true;
+  }
+
+  private string(): string {
+    const start = this.at + 1;
+    let out = '';
+    let from = start;
+    for (let i = start; i < this.text.length; i++) {
+      const c = this.text.charCodeAt(i);
+      if (c === 0x22) {
+        this.at = i + 1;
+        return out + this.text.slice(from, i);
+      }
+      if (c < 0x20) throw new Stop('A control character or a line end stands inside a text.', i);
+      if (c !== 0x5c) continue;
+      const [char, next] = this.escape(i);
+      out += this.text.slice(from, i) + char;
+      from = next;
+      i = next - 1;
+    }
+    throw new Stop('A text begins here and does not end.', start - 1);
+  }
+
+  /** The character that the escape at `i` stands for, and where the text goes on. */
+  private escape(i: number): [string, number] {
+    const c = this.text[i + 1] ?? '';
+    if (c === 'u') {
+      const hex = this.text.slice(i + 2, i + 6);
+      if (!/^[0-9a-fA-F]{4}$/.test(hex)) throw new Stop('After \\u four hexadecimal digits are wanted.', i);
+      return [String.fromCharCode(parseInt(hex, 16)), i + 6];
+    }
+    const char = ESCAPES[c];
+    if (char === undefined) throw new Stop('This backslash begins no escape that JSON has.', i);
+    return [char, i + 2];
+  }
+
+  private word(): unknown {
+    WORD.lastIndex = this.at;
+    const word = WORD.exec(this.text)?.[0] ?? '';
+    NUMBER.lastIndex = this.at;
+    const number = NUMBER.exec(this.text)?.[0] ?? '';
+    if (number !== '' && number.length >= word.length) {
+      this.at += number.length;
+      return this.number(number);
+    }
+    const literal = { true: true, false: false, null: null }[word];
+    if (literal === undefined && !/^[+-]?(nan|inf(inity)?)$/i.test(word))
+      throw new Stop(this.instead('a value', word || undefined), this.at);
+    this.at += word.length;
+    if (literal !== undefined) return literal;
+    this.fault(notFinite(this.pointer(), word));
+    return null;
+  }
+
+  private number(digits: string): number {
+    const value = Number(digits);
+    const vanished = value === 0 && /[1-9]/.test(digits.replace(/e.*$/i, ''));
+    if (!Number.isFinite(value) || vanished) this.fault(notFinite(this.pointer(), digits));
+    else if (String(value) !== digits) this.written[this.pointer()] = digits;
+    return Number.isFinite(value) ? value : 0;
+  }
+
+  private instead(wanted: string, found = this.text[this.at] ?? ''): string {
+    const hint = found.startsWith('/')
+      ? ' JSON has no comments.'
+      : found.startsWith("'")
+        ? ' Use double quotes.'
+        : '';
+    const isNumber = /^[+-]?[\d.]/.test(found) ? ' Write numbers as 1234.5.' : '';
+    return `Here ${wanted} is wanted, ${found === '' ? 'and the text ends' : `and ${inWords(found)} is there`}.${hint}${isNumber}`;
+  }
+
+  place(at: number): string {
+    const before = this.text.slice(0, at);
+    const line = before.split('\n').length;
+    return `line ${line}, column ${at - before.lastIndexOf('\n')}`;
+  }
+}
+
+/**
+ * Reads a JSON text.
+ * @param text the text, without a byte order mark
+ * @returns the value with the digits as written; or every fault that reading could reach
+ */
+export function readJsonText(text: string): JsonText {
+  const reader = new Reader(text);
+  try {
+    const value = reader.whole();
+    if (reader.faults.length === 0) return { ok: true, value, written: reader.written };
+  } catch (e) {
+    if (!(e instanceof Stop)) throw e;
+    const message = `Not valid JSON at ${reader.place(e.at)}: ${e.message}`;
+    // The nesting fault has said it already, with its pointer.
+    if (!reader.faults.some((f) => f.pointer === reader.pointer()))
+      reader.faults.push({ pointer: reader.pointer(), value: null, expected: 'JSON', message });
+  }
+  return { ok: false, faults: reader.faults };
+}
