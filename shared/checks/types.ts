@@ -105,7 +105,10 @@ export interface Finding {
 }
 
 /** The six constants and the two derived values that findings use. */
-export type RecomputedValues = Record<LineParameter, number> & { surgeImpedanceOhm: number; waveSpeed: number };
+export type RecomputedValues = Record<LineParameter, number> & {
+  surgeImpedanceOhm: number;
+  waveSpeed: number;
+};
 
 /** A whole line's equivalent pi: Ω, and µS for the whole charging. */
 export interface EquivalentPi {
