@@ -3,7 +3,7 @@
  * in SI beside the words in which they were declared, and a JSON Pointer for whatever a finding may name.
  */
 import type { LineInput, OverheadSection, CableSection } from '../engine/types';
-import type { Filing, FilingLine, DeclaredCircuit } from '../contracts/filing.generated';
+import type { FilingLine, DeclaredCircuit } from '../contracts/filing.generated';
 
 /** The six values declared of a circuit. */
 export type DeclaredKey = 'r1' | 'x1' | 'b1' | 'r0' | 'x0' | 'b0';
@@ -108,8 +108,18 @@ export interface NormalisedLine {
   /** The declared circuits, in the filing's order. */
   circuits: readonly NormalisedCircuit[];
   mutual: readonly NormalisedMutual[];
-  /** The line in the filing's own format, defaults filled in and library data copied: what a revision freezes. */
-  filed: FilingLine;
+  /** What a revision freezes of the line; `readLine` makes the same of it again. */
+  sheet: LineSheet;
+}
+
+/** A line as it is kept: complete in itself, with what reading it again must know. Pointers count from the line. */
+export interface LineSheet {
+  /** The line in the filing's own format, defaults filled in and library data copied. */
+  line: FilingLine;
+  /** Digits as written, where they differ from the number's shortest form. */
+  written: WrittenDigits;
+  /** Pointers of values that the owner's settings filled in. */
+  assumed: readonly string[];
 }
 
 /** Something assumed or done in reading that is worth knowing; it is no fault. */
@@ -130,10 +140,6 @@ export interface Notice {
 /** A filing that has been read without a fault. */
 export interface NormalisedFiling {
   lines: readonly NormalisedLine[];
-  /** The filing in its own format, defaults filled in and library data copied. */
-  filed: Filing;
-  /** Numbers whose written form is not the shortest one: JSON Pointer → the digits as written. */
-  written: WrittenDigits;
 }
 
 /** Digits as they stood in the text, by JSON Pointer, where they differ from the number's shortest form. */

@@ -1,0 +1,87 @@
+/** Copies the data of library conductors into a filing, so that what is frozen holds all that it was judged by. */
+import { inWords, pointerToken, shown } from '../contracts/faults';
+import type { PointerFault } from '../contracts/faults';
+import type { Conductor, FilingLine, Section } from '../contracts/filing.generated';
+import { nearestNames } from '../contracts/nearest';
+import { handbookData, handbookLacks, isChoosable } from '../library/handbook-data';
+import type { ConductorLibrary, LibraryConductor } from '../library/types';
+import type { Notice } from './types';
+
+/** A line whose conductors all carry their data; or the faults of those that cannot. */
+export interface Resolved {
+  line: FilingLine;
+  faults: PointerFault[];
+  notices: Notice[];
+}
+
+/** Libraries are looked up for every conductor of every line: one index a library. */
+const indices = new WeakMap<ConductorLibrary, Map<string, LibraryConductor>>();
+
+function indexOf(library: ConductorLibrary): Map<string, LibraryConductor> {
+  const known = indices.get(library);
+  if (known) return known;
+  const index = new Map(library.conductors.map((c) => [c.name.normalize('NFC'), c]));
+  indices.set(library, index);
+  return index;
+}
+
+function choosableNames(library: ConductorLibrary): string[] {
+  return library.conductors.filter(isChoosable).map((c) => c.name);
+}
+
+function unknown(name: string, pointer: string, library: ConductorLibrary): PointerFault {
+  const near = nearestNames(name, choosableNames(library));
+  const hint = near.length ? ` The nearest are: ${near.join(', ')}.` : ' Give its data instead.';
+  const expected = near.length
+    ? `a conductor of the library, such as ${near.join(', ')}`
+    : 'a conductor of the library';
+  return {
+    pointer,
+    value: shown(name),
+    expected,
+    message: `The library has no conductor ${inWords(name)}.${hint}`,
+  };
+}
+
+function incomplete(row: LibraryConductor, pointer: string): PointerFault {
+  const lacks = handbookLacks(row).join(' and ');
+  return {
+    pointer,
+    value: row.name,
+    expected: 'a conductor whose row is complete, or the data themselves',
+    message: `The library’s row of ${row.name} lacks ${lacks}, so it cannot be chosen. Give its data instead.`,
+  };
+}
+
+/** Looks up one conductor; faults and notices go to `out`. */
+function resolve(c: Conductor, pointer: string, library: ConductorLibrary, out: Resolved): Conductor {
+  if (c.library === undefined) return c;
+  const row = indexOf(library).get(c.library.normalize('NFC'));
+  const data = row && handbookData(row, c.temperatureC ?? 20);
+  if (data) {
+    const message = `The data of ${row.name} at ${data.temperatureC}\u2009°C are copied from library ${library.version}.`;
+    out.notices.push({ code: 'library-copied', pointer, message });
+    return data;
+  }
+  const at = `${pointer}/library`;
+  out.faults.push(row ? incomplete(row, at) : unknown(c.library, at, library));
+  return c;
+}
+
+/**
+ * Replaces every `{ library, temperatureC }` of a line by the library's data.
+ * @param line a line that holds by schema
+ * @param library the library's current version
+ * @returns the line with data; faults name unknown conductors (with the nearest names) and rows that lack data
+ */
+export function resolveLibrary(line: FilingLine, library: ConductorLibrary): Resolved {
+  const out: Resolved = { line, faults: [], notices: [] };
+  const sections = line.sections.map((s, i): Section => {
+    if (!s.conductors) return s;
+    const rows = Object.entries(s.conductors).map(([key, c]): [string, Conductor] => {
+      return [key, resolve(c, `/sections/${i}/conductors/${pointerToken(key)}`, library, out)];
+    });
+    return { ...s, conductors: Object.fromEntries(rows) };
+  });
+  return { ...out, line: { ...line, sections } };
+}
