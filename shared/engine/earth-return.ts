@@ -11,15 +11,15 @@ import { MU_0 } from './constants';
  */
 
 /** Half the border below which Carson's real series is used: it shares all logarithms between u₊ and u₋. */
-const CARSON_LIMIT = 2;
+export const CARSON_LIMIT = 2;
 
 const scratch = new Float64Array(2);
 
 /** Coefficients of Carson's series: A_k of u^(2k+1), B_k of u^(2k), and ψ_k beside ln(u/2). */
-const TERMS = 16;
-const ODD = new Float64Array(TERMS);
-const EVEN = new Float64Array(TERMS);
-const PSI = new Float64Array(TERMS);
+export const TERMS = 16;
+export const ODD = new Float64Array(TERMS);
+export const EVEN = new Float64Array(TERMS);
+export const PSI = new Float64Array(TERMS);
 for (let k = 0, a = 1 / 3, b = 0.5, psi = 0.5 - 0.5772156649015329; k < TERMS; k++) {
   ODD[k] = a;
   EVEN[k] = b;

@@ -10,3 +10,5 @@ export * from './types';
 export { solveSection } from './section';
 export { solveLine } from './line';
 export { sectionMatrices } from './matrices';
+export { sensitivities, uncertainty } from './uncertainty';
+export * from './sensitivity-types';

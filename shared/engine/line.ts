@@ -1,7 +1,8 @@
 import { fail, inSection, succeed } from './failures';
 import { solveSection } from './section';
 import { cascade, equivalentPi, THROUGH, uniformTwoPort } from './two-port';
-import type { Complex, TwoPort } from './two-port';
+import type { Complex } from '../numerics/complex';
+import type { TwoPort } from './two-port';
 import {
   SEQUENCE_KEYS,
   type CableSection,
@@ -17,8 +18,8 @@ import {
 } from './types';
 import { checkFrequency } from './validate';
 
-/** A cable's values as declared, scaled in frequency (x and b in proportion, r kept) when another one is asked for. */
-function cableConstants(s: CableSection, ratio: number): Result<SectionConstants> {
+/** A cable's values as its maker declares them, scaled in frequency (x and b in proportion, r kept) when another one is asked for. */
+export function solveCable(s: CableSection, ratio: number): Result<SectionConstants> {
   if (!(s.lengthKm > 0) || !Number.isFinite(s.lengthKm)) {
     return fail(
       'out-of-range',
@@ -52,7 +53,7 @@ function cableConstants(s: CableSection, ratio: number): Result<SectionConstants
 }
 
 function solveAny(s: LineSection, frequencyHz: number, ratio: number): Result<SectionConstants> {
-  return s.kind === 'cable' ? cableConstants(s, ratio) : solveSection(s, frequencyHz);
+  return s.kind === 'cable' ? solveCable(s, ratio) : solveSection(s, frequencyHz);
 }
 
 /** Adds a section's values to the sums, weighted by its length. */
@@ -120,24 +121,49 @@ function nominalPi(mean: SequenceConstants, lengthKm: number): PiTotals {
   };
 }
 
-/** Solves every section in turn, all of which must hold the same number of circuits. */
-function solveSections(l: LineInput, frequencyHz: number): SectionConstants[] | Failure {
-  const parts: SectionConstants[] = [];
-  for (let i = 0; i < l.sections.length; i++) {
-    const section = l.sections[i] as LineSection;
-    const result = solveAny(section, frequencyHz, frequencyHz / l.frequencyHz);
-    if (!result.ok) return inSection(result, i);
-    const first = parts[0];
-    if (first && first.circuits.length !== result.value.circuits.length) {
-      return fail(
-        'circuit-mismatch',
-        { section: i },
-        `the section has ${result.value.circuits.length} circuits, the first one ${first.circuits.length}`,
-      );
-    }
-    parts.push(result.value);
+/**
+ * Checks what concerns a line as a whole: frequencies and that there is a section.
+ *
+ * @returns the failure, or null
+ */
+export function checkLine(l: LineInput, frequencyHz: number): Failure | null {
+  const fault = checkFrequency(frequencyHz) ?? checkFrequency(l.frequencyHz);
+  if (fault) return fault;
+  if (Array.isArray(l.sections) && l.sections.length > 0) return null;
+  return fail('empty-line', {}, 'the line has no section');
+}
+
+/**
+ * Puts solved sections in series: length-weighted means, equivalent pi, nominal totals.
+ *
+ * @param l the line
+ * @param parts its sections' constants in the same order
+ * @returns the line's constants, or the failure when the sections differ in their number of circuits
+ */
+export function combineSections(l: LineInput, parts: readonly SectionConstants[]): Result<LineConstants> {
+  const count = parts[0]?.circuits.length ?? 0;
+  const odd = parts.findIndex((part) => part.circuits.length !== count);
+  if (odd >= 0) {
+    const seen = parts[odd]?.circuits.length ?? 0;
+    return fail(
+      'circuit-mismatch',
+      { section: odd },
+      `the section has ${seen} circuits, the first one ${count}`,
+    );
   }
-  return parts;
+  const lengths = l.sections.map((s) => s.lengthKm);
+  const lengthKm = lengths.reduce((sum, length) => sum + length, 0);
+  const mean = weightedMeans(
+    parts,
+    lengths.map((length) => length / lengthKm),
+  );
+  const circuitParts = (c: number): SequenceConstants[] => parts.map((p) => p.circuits[c] ?? zeroConstants());
+  return succeed({
+    ...mean,
+    lengthKm,
+    equivalent: mean.circuits.map((_, c) => circuitPi(circuitParts(c), lengths)),
+    nominal: mean.circuits.map((values) => nominalPi(values, lengthKm)),
+  });
 }
 
 /**
@@ -148,27 +174,13 @@ function solveSections(l: LineInput, frequencyHz: number): SectionConstants[] | 
  * @returns per circuit Ω/km and µS/km, totals in Ω and µS; or the typed failure with section and position
  */
 export function solveLine(l: LineInput, frequencyHz: number = l.frequencyHz): Result<LineConstants> {
-  const fault = checkFrequency(frequencyHz) ?? checkFrequency(l.frequencyHz);
+  const fault = checkLine(l, frequencyHz);
   if (fault) return fault;
-  if (!Array.isArray(l.sections) || l.sections.length === 0)
-    return fail('empty-line', {}, 'the line has no section');
-  const parts = solveSections(l, frequencyHz);
-  if ('ok' in parts) return parts;
-  const lengths = l.sections.map((s) => s.lengthKm);
-  const lengthKm = lengths.reduce((sum, length) => sum + length, 0);
-  const mean = weightedMeans(
-    parts,
-    lengths.map((length) => length / lengthKm),
-  );
-  return succeed({
-    ...mean,
-    lengthKm,
-    equivalent: mean.circuits.map((_, c) =>
-      circuitPi(
-        parts.map((p) => p.circuits[c] ?? zeroConstants()),
-        lengths,
-      ),
-    ),
-    nominal: mean.circuits.map((values) => nominalPi(values, lengthKm)),
-  });
+  const parts: SectionConstants[] = [];
+  for (let i = 0; i < l.sections.length; i++) {
+    const result = solveAny(l.sections[i] as LineSection, frequencyHz, frequencyHz / l.frequencyHz);
+    if (!result.ok) return inSection(result, i);
+    parts.push(result.value);
+  }
+  return combineSections(l, parts);
 }

@@ -2,9 +2,7 @@
  * Two-ports of line sections, exact at their length. A two-port is kept as [A − 1, B; C, D − 1]: a short line's A is
  * so near to one that the difference, which makes the charging, would lose its digits.
  */
-
-/** Complex number as [real, imaginary]. */
-export type Complex = readonly [number, number];
+import { add, complexSqrt, divide, modulus, multiply, type Complex } from '../numerics/complex';
 
 /** A − 1, B in Ω, C in S, D − 1. */
 export interface TwoPort {
@@ -24,32 +22,9 @@ export interface Pi {
 /** Nothing in series: the cascade's neutral element. */
 export const THROUGH: TwoPort = { a: [0, 0], b: [0, 0], c: [0, 0], d: [0, 0] };
 
-function add(p: Complex, q: Complex): Complex {
-  return [p[0] + q[0], p[1] + q[1]];
-}
-
-function multiply(p: Complex, q: Complex): Complex {
-  return [p[0] * q[0] - p[1] * q[1], p[0] * q[1] + p[1] * q[0]];
-}
-
-function divide(p: Complex, q: Complex): Complex {
-  const size = q[0] * q[0] + q[1] * q[1];
-  return [(p[0] * q[0] + p[1] * q[1]) / size, (p[1] * q[0] - p[0] * q[1]) / size];
-}
-
-/** Principal square root. */
-export function complexSqrt(p: Complex): Complex {
-  const modulus = Math.hypot(p[0], p[1]);
-  const re = Math.sqrt(0.5 * (modulus + Math.abs(p[0])));
-  if (re === 0) return [0, 0];
-  const im = Math.abs(p[1]) / (2 * re);
-  const sign = p[1] < 0 ? -1 : 1;
-  return p[0] >= 0 ? [re, sign * im] : [im, sign * re];
-}
-
 /** sinh(θ)/θ as a function of θ², even in θ, by series near zero. */
 function sinhc(square: Complex): Complex {
-  if (Math.hypot(square[0], square[1]) < 0.5) {
+  if (modulus(square) < 0.5) {
     let term: Complex = [1, 0];
     let sum: Complex = [1, 0];
     for (let k = 1; k < 12; k++) {
@@ -91,5 +66,7 @@ export function cascade(first: TwoPort, next: TwoPort): TwoPort {
 
 /** The pi with the same behaviour at its ends: Z = B, legs (D − 1)/B and (A − 1)/B. */
 export function equivalentPi(t: TwoPort): Pi {
+  // No series impedance at all (a cable declared so): the legs only exist as their sum, shared out evenly.
+  if (modulus(t.b) === 0) return { z: t.b, yFrom: [t.c[0] / 2, t.c[1] / 2], yTo: [t.c[0] / 2, t.c[1] / 2] };
   return { z: t.b, yFrom: divide(t.d, t.b), yTo: divide(t.a, t.b) };
 }

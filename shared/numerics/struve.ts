@@ -134,13 +134,14 @@ function rayRule(angle: number): Float64Array {
   return rule;
 }
 
-const STRAIGHT = rayRule(0);
-const TURNED = rayRule(TURN);
+/** Rules along the positive axis and along the turned ray: [s re, s im, weight re, weight im] a node. */
+export const STRAIGHT_RULE = rayRule(0);
+export const TURNED_RULE = rayRule(TURN);
 
 /** (1/u)·Σ w·(√(1+(s/u)²) − s/u) for −45° ≤ arg u ≤ 90°. */
 function quadrature(re: number, im: number, out: Float64Array): void {
   // Above about 50° the branch point s = ju comes near the straight ray.
-  const rule = im > 1.2 * re ? TURNED : STRAIGHT;
+  const rule = im > 1.2 * re ? TURNED_RULE : STRAIGHT_RULE;
   const size = re * re + im * im;
   const vr = re / size;
   const vi = -im / size;
