@@ -1,91 +1,101 @@
-/** Days and times as the product shows them: 4 Mar 2027. */
-import { formatCount, NO_VALUE } from './numbers';
+/** Dates as people read them: 4 Mar 2027, and what is left of a window in working days. */
 
-const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'] as const;
+const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'];
 
-interface DayParts {
-  year: number;
-  month: number;
+interface Parts {
   day: number;
+  month: number;
+  year: number;
+  hour: string;
+  minute: string;
 }
 
-/** A calendar day has no zone: it is shown as it stands. */
-function partsOfDay(text: string): DayParts | null {
-  const m = /^(\d{4})-(\d{2})-(\d{2})$/.exec(text);
-  return m ? { year: Number(m[1]), month: Number(m[2]), day: Number(m[3]) } : null;
-}
-
-/** Intl's formatters are slow to make and fast to use. */
-const formatters = new Map<string, Intl.DateTimeFormat>();
-
-function formatterFor(timeZone: string): Intl.DateTimeFormat {
-  const known = formatters.get(timeZone);
-  if (known) return known;
-  const made = new Intl.DateTimeFormat('en-GB', {
+/** The clock of a place at an instant; of the reader's own place when no zone is named. */
+function partsOf(instant: string | Date, timeZone?: string): Parts {
+  const read: Record<string, string> = {};
+  const formatter = new Intl.DateTimeFormat('en-GB', {
     timeZone,
+    hourCycle: 'h23',
     year: 'numeric',
     month: 'numeric',
     day: 'numeric',
     hour: '2-digit',
     minute: '2-digit',
-    hourCycle: 'h23',
   });
-  formatters.set(timeZone, made);
-  return made;
-}
-
-function partsOfInstant(instant: Date, timeZone: string): (DayParts & { clock: string }) | null {
-  if (Number.isNaN(instant.getTime())) return null;
-  const found = new Map(
-    formatterFor(timeZone)
-      .formatToParts(instant)
-      .map((p) => [p.type, p.value]),
-  );
-  const number = (type: Intl.DateTimeFormatPartTypes) => Number(found.get(type));
-  const clock = `${found.get('hour') ?? ''}:${found.get('minute') ?? ''}`;
-  return { year: number('year'), month: number('month'), day: number('day'), clock };
-}
-
-const words = (p: DayParts) => `${p.day} ${MONTHS[p.month - 1] ?? ''} ${p.year}`;
-
-/**
- * A day: `4 Mar 2027`.
- * @param when a calendar day (`2027-03-04`), or an instant (RFC 3339 text or Date)
- * @param timeZone IANA zone in which an instant's day is meant
- * @returns the day, or a dash for a text that is none
- */
-export function formatDate(when: string | Date | null | undefined, timeZone = 'UTC'): string {
-  if (when === null || when === undefined) return NO_VALUE;
-  const day = typeof when === 'string' ? partsOfDay(when) : null;
-  const parts = day ?? partsOfInstant(new Date(when), timeZone);
-  return parts ? words(parts) : NO_VALUE;
+  for (const part of formatter.formatToParts(new Date(instant))) read[part.type] = part.value;
+  return {
+    day: Number(read['day']),
+    month: Number(read['month']),
+    year: Number(read['year']),
+    hour: read['hour'] ?? '',
+    minute: read['minute'] ?? '',
+  };
 }
 
 /**
- * An instant with its time: `4 Mar 2027, 14:05`.
- * @param when RFC 3339 text or Date
- * @param timeZone IANA zone
- * @returns day and time, or a dash for a text that is none
+ * Writes the day of an instant.
+ * @param instant RFC 3339 text or a Date
+ * @param timeZone IANA zone; the reader's own when absent
+ * @returns '4 Mar 2027'
+ * @throws RangeError for what is no instant, or an unknown zone
  */
-export function formatDateTime(when: string | Date | null | undefined, timeZone = 'UTC'): string {
-  if (when === null || when === undefined) return NO_VALUE;
-  const parts = partsOfInstant(new Date(when), timeZone);
-  return parts ? `${words(parts)}, ${parts.clock}` : NO_VALUE;
+export function formatDate(instant: string | Date, timeZone?: string): string {
+  const { day, month, year } = partsOf(instant, timeZone);
+  return `${day} ${MONTHS[month - 1] ?? ''} ${year}`;
 }
 
 /**
- * What is left of a window, in a sentence: `3 working days left`, `due today`, `2 working days over`.
- * @param left working days left, negative when overdue
+ * Writes the day of an instant without its year, for where the year is plain.
+ * @param instant RFC 3339 text or a Date
+ * @param timeZone IANA zone; the reader's own when absent
+ * @returns '4 Mar'
+ * @throws RangeError for what is no instant, or an unknown zone
  */
-export function workingDaysLeft(left: number): string {
+export function formatDay(instant: string | Date, timeZone?: string): string {
+  const { day, month } = partsOf(instant, timeZone);
+  return `${day} ${MONTHS[month - 1] ?? ''}`;
+}
+
+/**
+ * Writes the time of day of an instant.
+ * @param instant RFC 3339 text or a Date
+ * @param timeZone IANA zone; the reader's own when absent
+ * @returns '14:06'
+ * @throws RangeError for what is no instant, or an unknown zone
+ */
+export function formatTime(instant: string | Date, timeZone?: string): string {
+  const { hour, minute } = partsOf(instant, timeZone);
+  return `${hour}:${minute}`;
+}
+
+/**
+ * Writes day and time of an instant.
+ * @param instant RFC 3339 text or a Date
+ * @param timeZone IANA zone; the reader's own when absent
+ * @returns '4 Mar 2027, 14:06'
+ * @throws RangeError for what is no instant, or an unknown zone
+ */
+export function formatInstant(instant: string | Date, timeZone?: string): string {
+  return `${formatDate(instant, timeZone)}, ${formatTime(instant, timeZone)}`;
+}
+
+/**
+ * Says what is left of a window.
+ * @param left working days left; 0 on the due day, negative when overdue
+ * @returns '3 working days left', 'due today', '2 working days over'
+ */
+export function leftInWords(left: number): string {
   if (left === 0) return 'due today';
-  const count = Math.abs(left);
-  const days = `${formatCount(count)} working day${count === 1 ? '' : 's'}`;
-  return left > 0 ? `${days} left` : `${days} over`;
+  const days = Math.abs(left);
+  return `${days} working ${days === 1 ? 'day' : 'days'} ${left < 0 ? 'over' : 'left'}`;
 }
 
-/** The same in a table: `3 left`, `today`, `2 over`. */
-export function workingDaysShort(left: number): string {
+/**
+ * Says the same in a table's column.
+ * @param left working days left; 0 on the due day, negative when overdue
+ * @returns '3 left', 'today', '2 over'
+ */
+export function leftInTable(left: number): string {
   if (left === 0) return 'today';
-  return left > 0 ? `${formatCount(left)} left` : `${formatCount(-left)} over`;
+  return left < 0 ? `${-left} over` : `${left} left`;
 }

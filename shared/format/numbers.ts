@@ -1,94 +1,105 @@
-/** Numbers as the product shows them: true minus sign, thin space before the unit, narrow no-break space between thousands. */
+/**
+ * Numbers as people read them: significant digits, a true minus sign (U+2212), a narrow no-break space (U+202F)
+ * between thousands, a thin space (U+2009) before the unit.
+ */
 
-/** U+2212. */
-export const MINUS = '\u2212';
-/** U+2009, between a number and its unit. */
+/** Thin space, before a unit. */
 export const THIN_SPACE = '\u2009';
-/** U+202F, between thousands. */
-export const GROUP_SPACE = '\u202f';
 
-/** What is shown where there is no number. */
-export const NO_VALUE = '–';
-
-const SUPERSCRIPT: Readonly<Record<string, string>> = {
-  '-': '⁻',
-  '0': '⁰',
-  '1': '¹',
-  '2': '²',
-  '3': '³',
-  '4': '⁴',
-  '5': '⁵',
-  '6': '⁶',
-  '7': '⁷',
-  '8': '⁸',
-  '9': '⁹',
-};
-
-/** Digits of a decimal text, grouped: `-6412.5` → `−6 412.5`. The decimals are not grouped. */
-function grouped(text: string): string {
-  const [whole = '', decimals] = text.replace('-', '').split('.');
-  const groups = whole.replace(/\B(?=(\d{3})+$)/g, GROUP_SPACE);
-  const sign = text.startsWith('-') && /[1-9]/.test(text) ? MINUS : '';
-  return sign + groups + (decimals === undefined ? '' : `.${decimals}`);
-}
+const MINUS = '\u2212';
+const GROUP = '\u202f';
+const MOST_PLACES = 12;
 
 /**
- * A number with a given count of significant digits, trailing zeros kept so that columns line up.
- * Whole digits are never rounded away (`6412.3` with 3 digits is `6 412`). Very large and very small numbers are
- * written with a power of ten.
- * @param value number in any unit
- * @param digits significant digits, 4 by default
- * @returns `0.3670`, `−12.40`, `6 412`, `1.234 × 10⁻⁶`; a dash where there is no finite number
+ * Writes a figure with so many significant digits.
+ * @param value any number
+ * @param digits significant digits, 3 when absent
+ * @returns text without a unit; "none" for what is no finite number
+ * @example figure(0.38119) // '0.381'
  */
-export function formatNumber(value: number | null | undefined, digits = 4): string {
-  if (value === null || value === undefined || !Number.isFinite(value)) return NO_VALUE;
-  const size = Math.abs(value);
-  if (size === 0) return '0';
-  if (size < 1e-4 || size >= 1e9) return powerOfTen(value, digits);
+export function figure(value: number, digits = 3): string {
+  if (!Number.isFinite(value)) return 'none';
   const rounded = Number(value.toPrecision(digits));
-  const wholeDigits = Math.floor(Math.log10(Math.abs(rounded))) + 1;
-  return grouped(value.toFixed(Math.max(0, digits - wholeDigits)));
-}
-
-function powerOfTen(value: number, digits: number): string {
-  const [mantissa = '', exponent = '0'] = value.toExponential(digits - 1).split('e');
-  const raised = [...String(Number(exponent))].map((c) => SUPERSCRIPT[c] ?? c).join('');
-  return `${grouped(mantissa)}${GROUP_SPACE}×${GROUP_SPACE}10${raised}`;
-}
-
-/** A number with a given count of decimals, grouped: `1 234.50`. A dash where there is no finite number. */
-export function formatFixed(value: number | null | undefined, decimals: number): string {
-  if (value === null || value === undefined || !Number.isFinite(value)) return NO_VALUE;
-  return grouped(value.toFixed(decimals));
-}
-
-/** A whole number, grouped: `6 412`. A dash where there is no finite number. */
-export function formatCount(value: number | null | undefined): string {
-  return formatFixed(value, 0);
-}
-
-/** Digits as somebody wrote them, with the true minus sign and grouped thousands; nothing is rounded. */
-export function formatWritten(digits: string): string {
-  return /^-?\d+(\.\d+)?$/.test(digits) ? grouped(digits) : digits.replaceAll('-', MINUS);
-}
-
-/** A count with its noun: `1 line`, `6 412 rows`. */
-export function formatCounted(count: number, one: string, many = `${one}s`): string {
-  return `${formatCount(count)} ${count === 1 ? one : many}`;
+  const size = Math.abs(rounded);
+  const wild = size !== 0 && (size < 1e-5 || size >= 1e9);
+  return minus(wild ? rounded.toExponential(digits - 1) : grouped(rounded.toFixed(placesFor(size, digits))));
 }
 
 /**
- * A number with its unit, a thin space between: `0.3670 Ω/km`.
- * @param value number in `unit`
- * @param unit as people write it, or a unit of the filing format
- * @param digits significant digits
+ * Writes a number with so many decimal places.
+ * @param value any finite number
+ * @param places decimal places
+ * @returns text without a unit
+ * @example fixed(-6412.5, 1) // '−6 412.5'
  */
-export function formatQuantity(value: number | null | undefined, unit: string, digits = 4): string {
-  const number = formatNumber(value, digits);
-  return number === NO_VALUE || unit === '' ? number : `${number}${THIN_SPACE}${unitForPeople(unit)}`;
+export function fixed(value: number, places: number): string {
+  const text = value.toFixed(places);
+  return minus(grouped(Number(text) === 0 ? text.replace('-', '') : text));
 }
 
-/** A unit of the filing format as people write it: `ohm/km` → `Ω/km`, `uS/km` → `µS/km`. Others stay as they are. */
-export function unitForPeople(unit: string): string {
-  return unit.replace(/^ohm/, 'Ω').replace(/^u(?=[SF])/, 'µ');
+/**
+ * Writes a figure with its unit.
+ * @param value any finite number
+ * @param unit unit as printed, empty for a ratio
+ * @param digits significant digits, 3 when absent
+ * @returns figure, thin space, unit
+ * @example quantity(0.38119, 'Ω/km') // '0.381 Ω/km'
+ */
+export function quantity(value: number, unit: string, digits = 3): string {
+  return unit === '' ? figure(value, digits) : `${figure(value, digits)}${THIN_SPACE}${unit}`;
+}
+
+/**
+ * Writes a share as per cent, one decimal place below 100 %, none above.
+ * @param share 0.608 for 60.8 %
+ * @returns text with the sign of a loss only
+ */
+export function percent(share: number): string {
+  const value = share * 100;
+  return `${fixed(value, Math.abs(value) < 99.95 ? 1 : 0)}${THIN_SPACE}%`;
+}
+
+/**
+ * Writes a difference as per cent with its sign either way.
+ * @param share 0.608 for a surplus of 60.8 %
+ * @returns '+60.8 %', '−0.6 %', '0.0 %'
+ */
+export function signedPercent(share: number): string {
+  const text = percent(share);
+  return share > 0 && !text.startsWith('0.0') ? `+${text}` : text;
+}
+
+/**
+ * Writes the two ends of a range in as few digits as tell them apart, both with the same places.
+ * @param low lower end
+ * @param high upper end
+ * @param digits significant digits of the larger, 2 when absent
+ * @returns both texts
+ * @example rangeTexts(0.33, 0.4) // ['0.33', '0.40']
+ */
+export function rangeTexts(low: number, high: number, digits = 2): [string, string] {
+  const places = Math.max(placesNeeded(low, digits), placesNeeded(high, digits));
+  return [fixed(low, places), fixed(high, places)];
+}
+
+/** Places that show a number's significant digits, trailing zeros left off: 0.85 → 2, 1.2 → 1, 320 → 0. */
+function placesNeeded(value: number, digits: number): number {
+  const text = Number(value.toPrecision(Math.max(digits, 2))).toString();
+  const at = text.indexOf('.');
+  return at < 0 || text.includes('e') ? 0 : Math.min(text.length - at - 1, 4);
+}
+
+function placesFor(size: number, digits: number): number {
+  const exponent = size === 0 ? 0 : Math.floor(Math.log10(size));
+  return Math.min(MOST_PLACES, Math.max(0, digits - 1 - exponent));
+}
+
+function grouped(text: string): string {
+  const [whole = '', fraction] = text.split('.');
+  const parts = whole.replace(/\B(?=(\d{3})+(?!\d))/g, GROUP);
+  return fraction === undefined ? parts : `${parts}.${fraction}`;
+}
+
+function minus(text: string): string {
+  return text.replace('-', MINUS);
 }
