@@ -24,6 +24,7 @@ const isField = (node: unknown): boolean =>
 function placeInForm(pointer: string): string {
   return pointer
     .replace(/^(\/sections\/\d+\/perLength)\/(?=[rxb][01])/, '$1/0/')
+    .replace(/^\/declaredMutual\/0/, '/declaredMutual')
     .replace(/\/(value|unit)$/, '');
 }
 

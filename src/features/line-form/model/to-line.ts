@@ -60,7 +60,7 @@ function conductor(form: ConductorForm, pointer: string, g: Gathered): Json {
   const temperatureC = at('temperatureC', form.temperatureC, 'degC');
   if (form.source === 'library') return given({ library: form.library, temperatureC });
   return given({
-    name: form.name,
+    name: form.name.trim(),
     model: form.model,
     diameterMm: at('diameterMm', form.diameterMm, 'mm'),
     coreDiameterMm: at('coreDiameterMm', form.coreDiameterMm, 'mm'),
@@ -124,19 +124,19 @@ function section(form: SectionForm, pointer: string, g: Gathered): Json {
 function declared(form: DeclaredForm, pointer: string, g: Gathered): Json {
   const ratings = form.ratings.map((r, i) =>
     given({
-      season: r.season,
+      season: r.season.trim(),
       continuousA: numberOf(r.continuousA, 'A', `${pointer}/ratings/${i}/continuousA`, g),
       emergencyA: numberOf(r.emergencyA, 'A', `${pointer}/ratings/${i}/emergencyA`, g),
     }),
   );
   return given({
     circuit: form.circuit,
-    circuitId: form.circuitId,
+    circuitId: form.circuitId.trim(),
     ...values(SEQUENCE_KEYS, form, pointer, g),
     ratingA: numberOf(form.ratingA, 'A', `${pointer}/ratingA`, g),
     maxTemperatureC: numberOf(form.maxTemperatureC, 'degC', `${pointer}/maxTemperatureC`, g),
     ratings: ratings.length > 0 ? ratings : undefined,
-    basis: orNothing(given({ ...form.basis })),
+    basis: orNothing(given({ ...form.basis, engineer: form.basis.engineer.trim() })),
   });
 }
 
@@ -150,9 +150,9 @@ function mutual(form: LineForm, g: Gathered): Json[] | undefined {
 export function readForm(form: LineForm): FormReading {
   const g: Gathered = { asTyped: {}, faults: [] };
   const line = given({
-    name: form.name,
-    from: form.from,
-    to: form.to,
+    name: form.name.trim(),
+    from: form.from.trim(),
+    to: form.to.trim(),
     nominalVoltageKv: numberOf(form.nominalVoltageKv, 'kV', '/nominalVoltageKv', g),
     frequencyHz: form.frequencyHz === '' ? undefined : Number(form.frequencyHz),
     transposed: form.transposed ? undefined : false,

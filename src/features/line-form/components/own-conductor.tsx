@@ -1,0 +1,52 @@
+import type { FormPath } from '../model/form-types';
+import { DIAMETER_UNITS, GMR_UNITS, WIRE_RESISTANCE_UNITS } from '../model/unit-choices';
+import { FieldGrid } from './form-part';
+import { ChoiceField, TextField } from './text-fields';
+import { TypedField } from './typed-field';
+
+const MODELS = [
+  { value: 'handbook', label: 'Handbook: a.c. resistance and GMR' },
+  { value: 'tube', label: 'Tube: d.c. resistance and diameters' },
+];
+
+/** A conductor's own data: what the chosen model needs first, the rest optional. */
+export function OwnConductor({ path, model }: { path: FormPath; model: 'handbook' | 'tube' }) {
+  const tube = model === 'tube';
+  return (
+    <div className="border-l-2 border-rule pl-4">
+      <FieldGrid>
+        <TextField path={[...path, 'name']} label="Its name" optional />
+        <ChoiceField path={[...path, 'model']} label="Computed from" options={MODELS} />
+        <TypedField path={[...path, 'diameterMm']} label="Diameter" units={DIAMETER_UNITS} />
+        <TypedField
+          path={[...path, 'coreDiameterMm']}
+          label="Core diameter"
+          units={DIAMETER_UNITS}
+          optional
+          hint="the core that carries no current; 0 for a solid wire"
+        />
+        <TypedField path={[...path, 'gmrMm']} label="GMR" units={GMR_UNITS} optional={tube} />
+        <TypedField
+          path={[...path, 'acResistanceOhmPerKm']}
+          label="A.C. resistance"
+          units={WIRE_RESISTANCE_UNITS}
+          optional={tube}
+        />
+        <TypedField
+          path={[...path, 'dcResistance20OhmPerKm']}
+          label="D.C. resistance at 20 °C"
+          units={WIRE_RESISTANCE_UNITS}
+          optional={!tube}
+        />
+        <TypedField path={[...path, 'temperatureC']} label="Temperature" units="°C" optional={!tube} />
+        <TypedField
+          path={[...path, 'temperatureCoefficientPerK']}
+          label="Temperature coefficient"
+          units="1/K"
+          optional
+          hint="0.00403 if left empty"
+        />
+      </FieldGrid>
+    </div>
+  );
+}

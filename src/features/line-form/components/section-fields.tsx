@@ -1,0 +1,106 @@
+import { Button } from '../../../components/ui/button';
+import { SegmentChoice } from '../../../components/ui/segment';
+import { useLineFormView } from '../hooks/form-context';
+import { addSection, removeSection } from '../model/edit';
+import type { SectionForm } from '../model/form-types';
+import { SPAN_UNITS } from '../model/unit-choices';
+import { SequenceFields } from './declared-values';
+import { FieldGrid, FormPart } from './form-part';
+import { SectionConductors } from './section-conductors';
+import { SectionGeometry } from './section-geometry';
+import { ChoiceField } from './text-fields';
+import { TypedField } from './typed-field';
+
+const KINDS = [
+  { value: 'overhead', label: 'Overhead line' },
+  { value: 'cable', label: 'Cable' },
+];
+
+interface SectionsProps {
+  /** The section on the table, and in the drawing. */
+  shown: number;
+  onShow: (index: number) => void;
+}
+
+/** Goes from section to section, adds and removes; a line of one section shows only the way to a second. */
+function SectionChooser({ shown, onShow }: SectionsProps) {
+  const { form, change } = useLineFormView();
+  const count = form.sections.length;
+  const add = () => {
+    change(addSection);
+    onShow(count);
+  };
+  const remove = () => {
+    change((f) => removeSection(f, shown));
+    onShow(Math.max(0, shown - 1));
+  };
+  return (
+    <div className="mb-4 flex flex-wrap items-center gap-3">
+      {count > 1 && (
+        <SegmentChoice
+          label="Section"
+          value={String(shown)}
+          onChange={(value) => onShow(Number(value))}
+          options={form.sections.map((_, i) => ({ value: String(i), label: `Section ${i + 1}` }))}
+        />
+      )}
+      {count < 100 && (
+        <Button small onClick={add}>
+          Add a section
+        </Button>
+      )}
+      {count > 1 && (
+        <Button small onClick={remove}>
+          {`Remove section ${shown + 1}`}
+        </Button>
+      )}
+    </div>
+  );
+}
+
+function CableValues({ index, section }: { index: number; section: SectionForm }) {
+  return (
+    <FormPart
+      title="Cable, from its maker’s sheet"
+      note="Taken as you declare it; a whole-line unit is for this section."
+    >
+      {section.perLength.map((_, circuit) => (
+        <div key={circuit} className={circuit > 0 ? 'mt-5' : undefined}>
+          {section.perLength.length > 1 && <h3 className="mb-3">{`Circuit ${circuit + 1}`}</h3>}
+          <SequenceFields path={['sections', index, 'perLength', circuit]} />
+        </div>
+      ))}
+    </FormPart>
+  );
+}
+
+/** The stretch of line on the table: its length, its structure, its conductors. */
+export function SectionFields({ shown, onShow }: SectionsProps) {
+  const { form } = useLineFormView();
+  const section = form.sections[shown];
+  if (!section) return null;
+  const path = ['sections', shown] as const;
+  const several = form.sections.length > 1;
+  return (
+    <>
+      <FormPart
+        title={several ? `Section ${shown + 1} of ${form.sections.length}` : 'Section'}
+        note="A stretch with one structure and one set of conductors."
+      >
+        <SectionChooser shown={shown} onShow={onShow} />
+        <FieldGrid>
+          <TypedField path={[...path, 'lengthKm']} label="Length" units={SPAN_UNITS} />
+          <ChoiceField path={[...path, 'kind']} label="Kind" options={KINDS} />
+        </FieldGrid>
+      </FormPart>
+      {section.kind === 'cable' ? (
+        <CableValues index={shown} section={section} />
+      ) : (
+        <>
+          <SectionGeometry index={shown} section={section} />
+          <SectionConductors index={shown} section={section} />
+        </>
+      )}
+    </>
+  );
+}

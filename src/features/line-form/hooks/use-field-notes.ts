@@ -1,0 +1,78 @@
+import { useCallback, useMemo, useState } from 'react';
+import type { LineForm } from '../model/form-types';
+import { getAt } from '../model/edit';
+import { fieldLabel, fieldPointer } from '../model/pointers';
+import type { FieldNote } from './form-context';
+
+/** A fault or a finding at a place of the line. */
+export interface PlacedNote extends FieldNote {
+  pointer: string;
+}
+
+export interface NoteItem {
+  pointer: string;
+  label: string;
+  message: string;
+}
+
+function hasText(form: LineForm, pointer: string): boolean {
+  const node = getAt(form, pointer.split('/').slice(1));
+  if (typeof node === 'string') return node.trim() !== '';
+  return typeof node === 'object' && node !== null && 'text' in node && String(node.text).trim() !== '';
+}
+
+/**
+ * Brings faults to their fields and decides when to say them: a slip in what was typed once its field is
+ * left; something missing once its field was visited, or once the writer asks what is missing.
+ */
+export function useFieldNotes(
+  form: LineForm,
+  faults: readonly PlacedNote[],
+  findings: readonly PlacedNote[],
+) {
+  const [visited, setVisited] = useState<ReadonlySet<string>>(new Set());
+  const [focused, setFocused] = useState<string | null>(null);
+  const [showAll, setShowAll] = useState(false);
+
+  const byField = useMemo(() => {
+    const map = new Map<string, FieldNote>();
+    // Faults first: a finding at the same field waits until the field holds a value.
+    for (const { pointer, ...note } of [...faults, ...findings]) {
+      const field = fieldPointer(form, pointer);
+      if (!map.has(field)) map.set(field, note);
+    }
+    return map;
+  }, [form, faults, findings]);
+
+  const isShown = useCallback(
+    (pointer: string) => showAll || visited.has(pointer) || (focused !== pointer && hasText(form, pointer)),
+    [form, focused, showAll, visited],
+  );
+
+  const items = useMemo(
+    (): NoteItem[] =>
+      faults.map((fault) => {
+        const pointer = fieldPointer(form, fault.pointer);
+        return { pointer, label: fieldLabel(form, pointer), message: fault.message };
+      }),
+    [form, faults],
+  );
+
+  return {
+    noteAt: useCallback(
+      (pointer: string) => (isShown(pointer) ? (byField.get(pointer) ?? null) : null),
+      [byField, isShown],
+    ),
+    enter: useCallback((pointer: string) => setFocused(pointer), []),
+    leave: useCallback((pointer: string) => {
+      setFocused(null);
+      setVisited((before) => (before.has(pointer) ? before : new Set([...before, pointer])));
+    }, []),
+    /** Faults that are shown now; all of them once asked for. */
+    shown: items.filter((item) => isShown(item.pointer)),
+    /** All faults, shown or not. */
+    all: items,
+    showAll: useCallback(() => setShowAll(true), []),
+    asked: showAll,
+  };
+}

@@ -1,0 +1,43 @@
+import type { Queue } from '#shared/contracts/api.generated';
+import { SegmentLinks } from '../../../components/ui/segment';
+import { useDocumentTitle } from '../../../hooks/use-document-title';
+import type { ListControls } from '../../../hooks/use-list-view';
+import { writeListView } from '../../../lib/list-view';
+import { QUEUE_LIST, queueLead, whoseOf, withWhose, type QueueFilter, type Whose } from '../model/queue-list';
+
+const WORDS: Readonly<Record<Whose, string>> = {
+  mine: 'Mine',
+  everyone: 'Everyone’s',
+  nobody: 'Nobody’s yet',
+};
+
+interface QueueHeadProps {
+  overview: Queue;
+  controls: ListControls<QueueFilter>;
+}
+
+/** The heading, what the queue holds in words, whose it is, and the rule of due days. */
+export function QueueHead({ overview, controls: { view } }: QueueHeadProps) {
+  useDocumentTitle('Queue');
+  const { counts, items } = overview;
+  const current = whoseOf(view);
+  return (
+    <div className="queue-head">
+      <div>
+        <h1>Queue</h1>
+        <p className="lead">{queueLead(counts.everyone, items)}</p>
+        <div className="mt-4">
+          <SegmentLinks
+            label="Whose"
+            items={(['mine', 'everyone', 'nobody'] as const).map((whose) => ({
+              key: whose,
+              label: `${WORDS[whose]} ${counts[whose]}`,
+              to: `?${writeListView(QUEUE_LIST, withWhose(view, whose))}`,
+              current: current === whose,
+            }))}
+          />
+        </div>
+      </div>
+    </div>
+  );
+}
