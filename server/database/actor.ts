@@ -1,8 +1,19 @@
 import type { Role } from '../entities/people.entities';
 
+/** Somebody signed in, in the organisation that is active in the session. */
+export interface UserActor {
+  kind: 'user';
+  userId: string;
+  name: string;
+  orgId: string;
+  role: Role;
+  /** Organisations whose cases this reviewer must not see. */
+  barredOrgIds: readonly string[];
+}
+
 /** On whose behalf a transaction runs. Row security and the audit trail both take it from here. */
 export type Actor =
-  | { kind: 'user'; userId: string; name: string; orgId: string; role: Role }
+  | UserActor
   /** The product itself: jobs, sign-in before anybody is known, bootstrap. */
   | { kind: 'system'; name: string };
 

@@ -1,7 +1,9 @@
-import type { DataSource, EntityManager } from 'typeorm';
+import type { EntityManager } from 'typeorm';
+import type { Surroundings, Tools } from '../integrations/surroundings';
 import { appendToChain } from './audit/chain';
 import type { ChainedEvent } from './audit/chain';
-import { actorRole } from './actor';
+import { postgresCode } from '../errors/postgres-code';
+import { actorRole, system } from './actor';
 import type { Actor } from './actor';
 
 /** One unit of work: what it reads, writes, mails and records comes to pass together or not at all. */
@@ -14,13 +16,12 @@ export interface Transaction {
   events: Omit<ChainedEvent, 'seq' | 'prevHash'>[];
   /** Run once the commit has succeeded (waking a worker and the like; never a write). */
   afterCommit: (() => void)[];
+  /** The queue, the scanner, the checker and what else lies beyond the database. */
+  tools: Tools;
 }
 
-/** What a transaction needs from its surroundings. */
-export interface Surroundings {
-  dataSource: DataSource;
-  clock: { now(): Date };
-}
+/** Who acts: known beforehand, or found out inside the transaction (a session's person). */
+export type ActorSource = Actor | ((manager: EntityManager, now: Date) => Promise<Actor>);
 
 // Serialisation failure and deadlock: PostgreSQL asks for the whole transaction again.
 const RETRIED = new Set(['40001', '40P01']);
@@ -36,21 +37,29 @@ async function declareActor(manager: EntityManager, actor: Actor): Promise<void>
 
 /** Runs one look-up or write with the product's own sight (a reviewer's address, the next number), then the actor's again. */
 export async function asSystem<T>(tx: Transaction, work: (manager: EntityManager) => Promise<T>): Promise<T> {
-  await declareActor(tx.manager, { kind: 'system', name: 'system' });
+  await declareActor(tx.manager, system('system'));
   const result = await work(tx.manager);
   await declareActor(tx.manager, tx.actor);
   return result;
 }
 
+async function findActor(manager: EntityManager, source: ActorSource, now: Date): Promise<Actor> {
+  if (typeof source !== 'function') return source;
+  await declareActor(manager, system('session'));
+  return source(manager, now);
+}
+
 async function once<T>(
-  { dataSource, clock }: Surroundings,
-  actor: Actor,
+  { dataSource, tools }: Surroundings,
+  source: ActorSource,
   work: (tx: Transaction) => Promise<T>,
 ): Promise<T> {
   const afterCommit: (() => void)[] = [];
   const result = await dataSource.transaction(async (manager) => {
+    const now = tools.clock.now();
+    const actor = await findActor(manager, source, now);
     await declareActor(manager, actor);
-    const tx: Transaction = { manager, actor, now: clock.now(), events: [], afterCommit };
+    const tx: Transaction = { manager, actor, now, events: [], afterCommit, tools };
     const value = await work(tx);
     if (tx.events.length > 0) await asSystem(tx, () => appendToChain(manager, tx.events));
     return value;
@@ -60,14 +69,14 @@ async function once<T>(
 }
 
 function isRetried(error: unknown): boolean {
-  const code = (error as { driverError?: { code?: string } } | null)?.driverError?.code;
+  const code = postgresCode(error);
   return code !== undefined && RETRIED.has(code);
 }
 
 /** Runs `work` in one transaction under the actor's sight; deadlocks are tried again as a whole. */
 export async function inTransaction<T>(
   surroundings: Surroundings,
-  actor: Actor,
+  actor: ActorSource,
   work: (tx: Transaction) => Promise<T>,
 ): Promise<T> {
   for (let attempt = 1; ; attempt++) {

@@ -21,6 +21,8 @@ export class Application {
   @Column({ type: 'uuid', nullable: true }) @ForeignKey('Revision') acceptedRevisionId!: string | null;
   @Column({ type: 'uuid' }) @ForeignKey('User') createdBy!: string;
   @Column({ type: 'timestamptz', precision: 3, default: () => 'now()' }) createdAt!: Date;
+  /** When its first revision was filed: from then on the owner's people may read it. */
+  @Column({ type: 'timestamptz', precision: 3, nullable: true }) firstFiledAt!: Date | null;
   @Column({ type: 'timestamptz', precision: 3, default: () => 'now()' }) @Index() updatedAt!: Date;
   @Column({ type: 'int', default: 1 }) version!: number;
 }
@@ -56,19 +58,25 @@ export class Round {
   @Column({ type: 'int', default: 1 }) version!: number;
 }
 
+export interface TypedField {
+  text: string;
+  unit?: string;
+}
+
 /** A line as the applicant is writing it; may be incomplete. */
 @Entity({ name: 'draft_lines' })
 @Unique(['roundId', 'lineKey'])
+@Check('ck_draft_lines_line_key', `"line_key" ~ '^L[1-9][0-9]{0,3}$'`)
 export class DraftLine {
   @PrimaryGeneratedColumn('uuid') id!: string;
   @Column({ type: 'uuid' }) @ForeignKey('Organisation') @Index() orgId!: string;
   @Column({ type: 'uuid' }) @ForeignKey('Round') roundId!: string;
-  /** Stays with the line from revision to revision. */
-  @Column({ type: 'uuid' }) lineKey!: string;
+  /** L1, L2 …: stays with the line from revision to revision. */
+  @Column({ type: 'text' }) lineKey!: string;
   @Column({ type: 'int' }) ordinal!: number;
   @Column({ type: 'jsonb' }) body!: unknown;
   /** The text of each field as it was typed, by JSON Pointer. */
-  @Column({ type: 'jsonb', default: () => `'{}'` }) asTyped!: Record<string, string>;
+  @Column({ type: 'jsonb', default: () => `'{}'` }) asTyped!: Record<string, TypedField>;
   @Column({ type: 'timestamptz', precision: 3, default: () => 'now()' }) updatedAt!: Date;
   @Column({ type: 'uuid' }) @ForeignKey('User') updatedBy!: string;
   @Column({ type: 'int', default: 1 }) version!: number;

@@ -38,7 +38,7 @@ export class AttachmentLink {
   @Column({ type: 'uuid' }) @ForeignKey('Attachment') @Index() attachmentId!: string;
   @Column({ type: 'uuid' }) @ForeignKey('Application') @Index() applicationId!: string;
   @Column({ type: 'text' }) subject!: AttachmentSubject;
-  @Column({ type: 'uuid', nullable: true }) lineKey!: string | null;
+  @Column({ type: 'text', nullable: true }) lineKey!: string | null;
   @Column({ type: 'uuid', nullable: true }) @ForeignKey('Discrepancy') discrepancyId!: string | null;
   @Column({ type: 'timestamptz', precision: 3 }) linkedAt!: Date;
 }

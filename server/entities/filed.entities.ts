@@ -46,9 +46,10 @@ export class Revision {
 @Entity({ name: 'revision_lines' })
 @ForeignKey('LineVersion', ['orgId', 'lineHash'], ['orgId', 'hash'])
 @Unique(['revisionId', 'ordinal'])
+@Check('ck_revision_lines_line_key', `"line_key" ~ '^L[1-9][0-9]{0,3}$'`)
 export class RevisionLine {
   @PrimaryColumn({ type: 'uuid' }) @ForeignKey('Revision') revisionId!: string;
-  @PrimaryColumn({ type: 'uuid' }) lineKey!: string;
+  @PrimaryColumn({ type: 'text' }) lineKey!: string;
   @Column({ type: 'uuid' }) @ForeignKey('Organisation') @Index() orgId!: string;
   @Column({ type: 'int' }) ordinal!: number;
   @Column({ type: 'text' }) lineHash!: string;

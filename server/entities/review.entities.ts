@@ -26,7 +26,7 @@ export class Disposition {
   @PrimaryGeneratedColumn('uuid') id!: string;
   @Column({ type: 'uuid' }) @ForeignKey('Organisation') @Index() orgId!: string;
   @Column({ type: 'uuid' }) @ForeignKey('Revision') revisionId!: string;
-  @Column({ type: 'uuid' }) lineKey!: string;
+  @Column({ type: 'text' }) lineKey!: string;
   @Column({ type: 'text' }) fingerprint!: string;
   @Column({ type: 'text' }) kind!: DispositionKind;
   @Column({ type: 'text' }) reason!: string;
@@ -66,6 +66,7 @@ export class Countersign {
 @Entity({ name: 'discrepancies' })
 @Unique(['applicationId', 'number'])
 @Check('ck_discrepancies_state', `"state" IN ('open', 'answered', 'settled', 'waived')`)
+@Check('ck_discrepancies_answered_by', `"answered_by" IS NULL OR "answered_by" IN ('change', 'explanation')`)
 export class Discrepancy {
   @PrimaryGeneratedColumn('uuid') id!: string;
   @Column({ type: 'uuid' }) @ForeignKey('Organisation') @Index() orgId!: string;
@@ -74,11 +75,13 @@ export class Discrepancy {
   /** D-1, D-2 … within the application. */
   @Column({ type: 'int' }) number!: number;
   @Column({ type: 'text' }) state!: DiscrepancyState;
+  @Column({ type: 'text' }) title!: string;
   @Column({ type: 'text' }) questioned!: string;
-  @Column({ type: 'text' }) wouldSettle!: string;
-  @Column({ type: 'uuid', nullable: true }) lineKey!: string | null;
-  @Column({ type: 'int', nullable: true }) circuit!: number | null;
-  @Column({ type: 'text', nullable: true }) parameter!: string | null;
+  @Column({ type: 'text', nullable: true }) wouldSettle!: string | null;
+  @Column({ type: 'text', array: true, default: () => `'{}'` }) lineKeys!: string[];
+  /** How the applicant means to answer with the next revision. */
+  @Column({ type: 'text', nullable: true }) answeredBy!: 'change' | 'explanation' | null;
+  @Column({ type: 'text', nullable: true }) draftAnswer!: string | null;
   @Column({ type: 'uuid' }) @ForeignKey('Revision') raisedOnRevisionId!: string;
   @Column({ type: 'uuid' }) @ForeignKey('User') raisedBy!: string;
   @Column({ type: 'timestamptz', precision: 3 }) raisedAt!: Date;
@@ -90,7 +93,7 @@ export class DiscrepancyFinding {
   @PrimaryColumn({ type: 'uuid' }) @ForeignKey('Discrepancy') discrepancyId!: string;
   @PrimaryColumn({ type: 'uuid' }) @ForeignKey('Finding') findingId!: string;
   @Column({ type: 'uuid' }) @ForeignKey('Organisation') @Index() orgId!: string;
-  @Column({ type: 'uuid' }) lineKey!: string;
+  @Column({ type: 'text' }) lineKey!: string;
   @Column({ type: 'text' }) fingerprint!: string;
 }
 

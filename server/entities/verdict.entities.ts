@@ -33,6 +33,8 @@ export class CheckRun {
   /** The whole report as the checker gave it. */
   @Column({ type: 'jsonb', nullable: true }) report!: unknown;
   @Column({ type: 'text', nullable: true }) failure!: string | null;
+  /** Who asked for it; nobody for the one made at filing. */
+  @Column({ type: 'uuid', nullable: true }) @ForeignKey('User') requestedBy!: string | null;
   @Column({ type: 'timestamptz', precision: 3, default: () => 'now()' }) queuedAt!: Date;
   @Column({ type: 'timestamptz', precision: 3, nullable: true }) startedAt!: Date | null;
   @Column({ type: 'timestamptz', precision: 3, nullable: true }) finishedAt!: Date | null;
@@ -46,7 +48,7 @@ export class CheckRun {
 @Check('ck_run_values_tolerance', finite('tolerance'))
 export class RunValue {
   @PrimaryColumn({ type: 'uuid' }) @ForeignKey('CheckRun') runId!: string;
-  @PrimaryColumn({ type: 'uuid' }) lineKey!: string;
+  @PrimaryColumn({ type: 'text' }) lineKey!: string;
   @PrimaryColumn({ type: 'int' }) circuit!: number;
   @PrimaryColumn({ type: 'text' }) parameter!: string;
   @Column({ type: 'uuid' }) @ForeignKey('Organisation') @Index() orgId!: string;
@@ -69,7 +71,7 @@ export class Finding {
   @Column({ type: 'uuid' }) @ForeignKey('Organisation') @Index() orgId!: string;
   @Column({ type: 'uuid' }) @ForeignKey('CheckRun') runId!: string;
   @Column({ type: 'int' }) ordinal!: number;
-  @Column({ type: 'uuid' }) lineKey!: string;
+  @Column({ type: 'text' }) lineKey!: string;
   @Column({ type: 'int', nullable: true }) circuit!: number | null;
   @Column({ type: 'int', nullable: true }) section!: number | null;
   @Column({ type: 'int', nullable: true }) position!: number | null;

@@ -1,12 +1,12 @@
 import { Membership, Organisation, User } from '#server/entities/people.entities';
 import type { OrganisationKind, Role } from '#server/entities/people.entities';
-import type { Actor } from '#server/database/actor';
+import type { UserActor } from '#server/database/actor';
 import type { Transaction } from '#server/database/transaction';
 
 let counter = 0;
 const next = () => ++counter;
 
-export type UserActor = Extract<Actor, { kind: 'user' }>;
+export type { UserActor };
 
 export async function anOrganisation(
   tx: Transaction,
@@ -42,5 +42,5 @@ export async function aMembership(
 export async function aPerson(tx: Transaction, org: Organisation, role: Role): Promise<UserActor> {
   const user = await aUser(tx);
   await aMembership(tx, user, org, role);
-  return { kind: 'user', userId: user.id, name: user.displayName, orgId: org.id, role };
+  return { kind: 'user', userId: user.id, name: user.displayName, orgId: org.id, role, barredOrgIds: [] };
 }

@@ -3,7 +3,11 @@ import { inject } from 'vitest';
 import { makeDataSource } from '#server/database/data-source';
 import { roleUrl } from '#server/database/roles';
 import { inTransaction } from '#server/database/transaction';
-import type { Surroundings, Transaction } from '#server/database/transaction';
+import type { Transaction } from '#server/database/transaction';
+import type { Surroundings } from '#server/integrations/surroundings';
+import { makeJobQueue } from '#server/integrations/job-queue';
+import { standInVirusScan } from '#server/integrations/virus-scan';
+import { inlineChecker } from './inline-checker';
 import { system } from '#server/database/actor';
 import type { Actor } from '#server/database/actor';
 import { createDatabase, dropDatabase, randomDatabaseName } from './databases';
@@ -49,7 +53,17 @@ export async function makeTestDatabase(): Promise<TestDatabase> {
   const owner = makeDataSource(ownerUrl, 'owner');
   await Promise.all([web.initialize(), worker.initialize(), owner.initialize()]);
   const clock = new TestClock();
-  const surroundings: Surroundings = { dataSource: web, clock };
+  const surroundings: Surroundings = {
+    dataSource: web,
+    tools: {
+      clock,
+      jobs: makeJobQueue(),
+      virusScan: standInVirusScan,
+      checker: inlineChecker,
+      publicUrl: new URL('http://127.0.0.1:8080'),
+      demo: false,
+    },
+  };
   return {
     ownerUrl,
     secret: cluster.secret,

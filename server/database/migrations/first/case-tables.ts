@@ -14,6 +14,7 @@ export const CASE_TABLES: readonly string[] = [
     accepted_revision_id uuid,
     created_by uuid NOT NULL,
     created_at timestamptz(3) NOT NULL DEFAULT now(),
+    first_filed_at timestamptz(3),
     updated_at timestamptz(3) NOT NULL DEFAULT now(),
     version integer NOT NULL DEFAULT '1',
     CONSTRAINT ck_applications_capacity CHECK (capacity_mw IS NULL OR (capacity_mw >= 0 AND capacity_mw <= 1e6)),
@@ -54,7 +55,7 @@ export const CASE_TABLES: readonly string[] = [
     id uuid NOT NULL DEFAULT gen_random_uuid(),
     org_id uuid NOT NULL,
     round_id uuid NOT NULL,
-    line_key uuid NOT NULL,
+    line_key text NOT NULL,
     ordinal integer NOT NULL,
     body jsonb NOT NULL,
     as_typed jsonb NOT NULL DEFAULT '{}',
@@ -62,6 +63,7 @@ export const CASE_TABLES: readonly string[] = [
     updated_by uuid NOT NULL,
     version integer NOT NULL DEFAULT '1',
     CONSTRAINT uq_draft_lines_round_id_line_key UNIQUE (round_id, line_key),
+    CONSTRAINT ck_draft_lines_line_key CHECK (line_key ~ '^L[1-9][0-9]{0,3}$'),
     CONSTRAINT pk_draft_lines_id PRIMARY KEY (id)
   )
   `,

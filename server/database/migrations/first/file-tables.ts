@@ -33,7 +33,7 @@ export const FILE_TABLES: readonly string[] = [
     attachment_id uuid NOT NULL,
     application_id uuid NOT NULL,
     subject text NOT NULL,
-    line_key uuid,
+    line_key text,
     discrepancy_id uuid,
     linked_at timestamptz(3) NOT NULL,
     CONSTRAINT ck_attachment_links_discrepancy CHECK ((subject = 'discrepancy') = (discrepancy_id IS NOT NULL)),

@@ -35,11 +35,12 @@ export const FILED_TABLES: readonly string[] = [
   `
   CREATE TABLE revision_lines (
     revision_id uuid NOT NULL,
-    line_key uuid NOT NULL,
+    line_key text NOT NULL,
     org_id uuid NOT NULL,
     ordinal integer NOT NULL,
     line_hash text NOT NULL,
     CONSTRAINT uq_revision_lines_revision_id_ordinal UNIQUE (revision_id, ordinal),
+    CONSTRAINT ck_revision_lines_line_key CHECK (line_key ~ '^L[1-9][0-9]{0,3}$'),
     CONSTRAINT pk_revision_lines_revision_id_line_key PRIMARY KEY (revision_id, line_key)
   )
   `,

@@ -38,6 +38,7 @@ export const FOREIGN_KEYS: readonly string[] = [
   `ALTER TABLE check_runs ADD CONSTRAINT fk_check_runs_org_id FOREIGN KEY (org_id) REFERENCES organisations (id)`,
   `ALTER TABLE check_runs ADD CONSTRAINT fk_check_runs_revision_id FOREIGN KEY (revision_id) REFERENCES revisions (id)`,
   `ALTER TABLE check_runs ADD CONSTRAINT fk_check_runs_rule_set_id FOREIGN KEY (rule_set_id) REFERENCES rule_sets (id)`,
+  `ALTER TABLE check_runs ADD CONSTRAINT fk_check_runs_requested_by FOREIGN KEY (requested_by) REFERENCES users (id)`,
   `ALTER TABLE run_values ADD CONSTRAINT fk_run_values_run_id FOREIGN KEY (run_id) REFERENCES check_runs (id)`,
   `ALTER TABLE run_values ADD CONSTRAINT fk_run_values_org_id FOREIGN KEY (org_id) REFERENCES organisations (id)`,
   `ALTER TABLE findings ADD CONSTRAINT fk_findings_org_id FOREIGN KEY (org_id) REFERENCES organisations (id)`,

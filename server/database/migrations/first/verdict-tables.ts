@@ -13,6 +13,7 @@ export const VERDICT_TABLES: readonly string[] = [
     lines_done integer NOT NULL DEFAULT '0',
     report jsonb,
     failure text,
+    requested_by uuid,
     queued_at timestamptz(3) NOT NULL DEFAULT now(),
     started_at timestamptz(3),
     finished_at timestamptz(3),
@@ -26,7 +27,7 @@ export const VERDICT_TABLES: readonly string[] = [
   `
   CREATE TABLE run_values (
     run_id uuid NOT NULL,
-    line_key uuid NOT NULL,
+    line_key text NOT NULL,
     circuit integer NOT NULL,
     parameter text NOT NULL,
     org_id uuid NOT NULL,
@@ -50,7 +51,7 @@ export const VERDICT_TABLES: readonly string[] = [
     org_id uuid NOT NULL,
     run_id uuid NOT NULL,
     ordinal integer NOT NULL,
-    line_key uuid NOT NULL,
+    line_key text NOT NULL,
     circuit integer,
     section integer,
     position integer,

@@ -1,0 +1,6 @@
+/** Where the product's time comes from. */
+export interface Clock {
+  now(): Date;
+}
+
+export const systemClock: Clock = { now: () => new Date() };
