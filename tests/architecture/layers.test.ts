@@ -26,7 +26,7 @@ describe('layers', () => {
       .filter((f) => f.path.startsWith('shared/'))
       .flatMap((f) =>
         f.imports
-          .filter((i) => i.target === null && !allowed.has(i.specifier))
+          .filter((i) => i.target === null && !i.typeOnly && !allowed.has(i.specifier))
           .map((i) => `${f.path}:${i.line} ${i.specifier}`),
       );
     expect(faults).toEqual([]);
