@@ -4,6 +4,14 @@ import type { ConductorData } from './types';
 
 const bessel = createModifiedBessel();
 
+/** 1 + α(T − 20 °C). */
+function warming(c: ConductorData, temperatureC: number): number {
+  return (
+    1 +
+    (c.temperatureCoefficientPerK ?? ALUMINIUM_COEFFICIENT_PER_K) * (temperatureC - RESISTANCE_REFERENCE_C)
+  );
+}
+
 /**
  * D.c. resistance of a `tube` conductor at its temperature: R₂₀·(1 + α(T − 20 °C)).
  *
@@ -11,9 +19,7 @@ const bessel = createModifiedBessel();
  * @returns Ω/km
  */
 export function dcResistanceOhmPerKm(c: ConductorData): number {
-  const alpha = c.temperatureCoefficientPerK ?? ALUMINIUM_COEFFICIENT_PER_K;
-  const rise = (c.temperatureC ?? RESISTANCE_REFERENCE_C) - RESISTANCE_REFERENCE_C;
-  return (c.dcResistance20OhmPerKm ?? 0) * (1 + alpha * rise);
+  return (c.dcResistance20OhmPerKm ?? 0) * warming(c, c.temperatureC ?? RESISTANCE_REFERENCE_C);
 }
 
 /**
@@ -88,4 +94,27 @@ export function internalImpedance(c: ConductorData, omega: number, out: Float64A
     return;
   }
   tubeImpedance(dcResistanceOhmPerKm(c), c.diameterMm / 2000, (c.coreDiameterMm ?? 0) / 2000, omega, out);
+}
+
+/**
+ * A.c. resistance at another temperature. `tube`: skin effect at the d.c. resistance of that temperature; `handbook`:
+ * the tabled value carried over with the temperature coefficient (from 20 °C when its temperature is not given).
+ *
+ * @param c conductor, checked
+ * @param temperatureC wanted temperature, °C
+ * @param frequencyHz frequency, Hz
+ * @returns Ω/km
+ */
+export function conductorResistanceOhmPerKm(
+  c: ConductorData,
+  temperatureC: number,
+  frequencyHz: number,
+): number {
+  if (c.model === 'handbook') {
+    const tabled = warming(c, c.temperatureC ?? RESISTANCE_REFERENCE_C);
+    return ((c.acResistanceOhmPerKm ?? 0) * warming(c, temperatureC)) / tabled;
+  }
+  const out = new Float64Array(2);
+  internalImpedance({ ...c, temperatureC }, 2 * Math.PI * frequencyHz, out);
+  return out[0] as number;
 }

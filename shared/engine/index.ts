@@ -12,3 +12,17 @@ export { solveLine } from './line';
 export { sectionMatrices } from './matrices';
 export { sensitivities, uncertainty } from './uncertainty';
 export * from './sensitivity-types';
+export { derive, perUnit, type Derived } from './derived';
+export { handCheck, type HandCheck, type ShortcutCause, type ShortcutValue } from './hand-check';
+export { impliedGeometry, type ImpliedGeometry, type ImpliedGeometryInput } from './implied-geometry';
+export {
+  ampacity,
+  circuitAmpacity,
+  type Ampacity,
+  type AmpacityInput,
+  type CircuitAmpacity,
+} from './ampacity';
+export type { WeatherAssumptions } from './weather';
+export { phaseCascade, type PhaseCascade } from './phase-cascade';
+export { bundleOffsets } from './wires';
+export { conductorResistanceOhmPerKm, dcResistanceOhmPerKm } from './conductor';

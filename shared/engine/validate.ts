@@ -12,7 +12,7 @@ import type {
 type Position = PhasePosition | GroundWirePosition;
 
 /** Outer limits of what can be meant at all; the filing's schema is narrower. */
-const MAX_LENGTH_M = 1e4;
+const MAX_LENGTH_M = 1e5;
 const MAX_RESISTIVITY = 1e9;
 
 /** A number that is missing, not finite or outside [low, high] (low itself excluded when `open`). */
