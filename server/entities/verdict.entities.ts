@@ -89,6 +89,8 @@ export class Finding {
   /** Joins the findings that one matter explains. */
   @Column({ type: 'int', nullable: true }) groupNumber!: number | null;
   @Column({ type: 'jsonb', default: () => `'[]'` }) causes!: unknown[];
+  /** The parameter that it follows from; such a finding is not counted again. */
+  @Column({ type: 'text', nullable: true }) follows!: string | null;
   /** Equal where code, circuit and figures are equal: what a disposition carries over by. */
   @Column({ type: 'text' }) @Index() fingerprint!: string;
 }

@@ -67,6 +67,7 @@ export const VERDICT_TABLES: readonly string[] = [
     message text NOT NULL,
     group_number integer,
     causes jsonb NOT NULL DEFAULT '[]',
+    follows text,
     fingerprint text NOT NULL,
     CONSTRAINT uq_findings_run_id_ordinal UNIQUE (run_id, ordinal),
     CONSTRAINT ck_findings_tolerance CHECK (tolerance IS NULL OR (tolerance >= -1e300 AND tolerance <= 1e300)),
