@@ -21,6 +21,9 @@ function hasText(form: LineForm, pointer: string): boolean {
   return typeof node === 'object' && node !== null && 'text' in node && String(node.text).trim() !== '';
 }
 
+/** What the form says about its fields, and when. */
+export type FormNotes = ReturnType<typeof useFieldNotes>;
+
 /**
  * Brings faults to their fields and decides when to say them: a slip in what was typed once its field is
  * left; something missing once its field was visited, or once the writer asks what is missing.
@@ -49,14 +52,14 @@ export function useFieldNotes(
     [form, focused, showAll, visited],
   );
 
-  const items = useMemo(
-    (): NoteItem[] =>
-      faults.map((fault) => {
-        const pointer = fieldPointer(form, fault.pointer);
-        return { pointer, label: fieldLabel(form, pointer), message: fault.message };
-      }),
-    [form, faults],
-  );
+  const items = useMemo((): NoteItem[] => {
+    const first = new Map<string, NoteItem>();
+    for (const { pointer, message } of faults) {
+      const field = fieldPointer(form, pointer);
+      if (!first.has(field)) first.set(field, { pointer: field, label: fieldLabel(form, field), message });
+    }
+    return [...first.values()];
+  }, [form, faults]);
 
   return {
     noteAt: useCallback(

@@ -1,5 +1,5 @@
 import { useQueryClient } from '@tanstack/react-query';
-import { useCallback, useEffect, useRef, useState } from 'react';
+import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
 import type { DraftLine } from '#shared/contracts/api.generated';
 import { caseKey } from '../../../lib/queries/case-key';
 import { draftLineQuery, readDraftLine } from '../api/get-draft-line';
@@ -13,6 +13,7 @@ import { dropKept, keepKey, readKept, writeKept } from '../model/local-keep';
 import { opening } from '../model/opening';
 import { readForm } from '../model/to-line';
 import type { FormReading } from '../model/to-line';
+import type { PlacedNote } from './use-field-notes';
 
 export interface LineEditorInput {
   number: string;
@@ -25,6 +26,8 @@ export interface LineEditorInput {
 export interface LineEditor {
   form: LineForm;
   reading: FormReading;
+  /** Texts that are no numbers, at their places. */
+  textNotes: readonly PlacedNote[];
   set: (path: FormPath, value: unknown) => void;
   change: (change: (form: LineForm) => LineForm) => void;
   save: SaveState;
@@ -94,13 +97,18 @@ export function useLineEditor(input: LineEditorInput): LineEditor {
     return () => void saver.flush();
   }, [saver, start]);
 
+  const reading = useMemo(() => readForm(form), [form]);
   const replace = (next: LineForm) => {
     current.current = next;
     setForm(next);
   };
   return {
     form,
-    reading: readForm(form),
+    reading,
+    textNotes: useMemo(
+      () => reading.faults.map(({ pointer, message }) => ({ pointer, message, grade: 'must-answer' })),
+      [reading],
+    ),
     change,
     set: useCallback((path: FormPath, value: unknown) => change((f) => setAt(f, path, value)), [change]),
     save,

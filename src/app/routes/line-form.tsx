@@ -1,0 +1,128 @@
+import { useSuspenseQuery } from '@tanstack/react-query';
+import type { QueryClient } from '@tanstack/react-query';
+import { useEffect, useMemo, useRef } from 'react';
+import { useLocation, useNavigate, useParams } from 'react-router-dom';
+import { PageHead } from '../../components/ui/page-head';
+import { draftLineQuery } from '../../features/line-form/api/get-draft-line';
+import { LineForm } from '../../features/line-form/components/line-form';
+import { LineTitleBlock } from '../../features/line-form/components/line-title-block';
+import { PutNotice } from '../../features/line-form/components/put-notice';
+import { SaveWords } from '../../features/line-form/components/save-words';
+import { useFieldNotes } from '../../features/line-form/hooks/use-field-notes';
+import { useFormSettings } from '../../features/line-form/hooks/use-form-settings';
+import { useLineEditor } from '../../features/line-form/hooks/use-line-editor';
+import type { LineEditorInput } from '../../features/line-form/hooks/use-line-editor';
+import { usePut } from '../../features/line-form/hooks/use-put';
+import type { Correction } from '../../features/line-form/model/put-values';
+import { writtenDigits } from '../../features/line-form/model/written-digits';
+import { FindingCount } from '../../features/live-check/components/finding-count';
+import { LiveCheckPanel } from '../../features/live-check/components/live-check';
+import { useLiveCheck } from '../../features/live-check/hooks/use-live-check';
+import { checkBasis } from '../../features/live-check/model/basis';
+import { badPositions, blockersOf, drawingNotes } from '../../features/live-check/model/placed-notes';
+import { useLeaveGuard } from '../../hooks/use-leave-guard';
+import { useSession } from '../../lib/api/session';
+import { applicationQuery, useApplication } from '../../lib/queries/get-application';
+import { draftQuery, useDraft } from '../../lib/queries/get-draft';
+import { rulesQuery, useRules } from '../../lib/queries/get-rules';
+import { conductorsQuery, useConductors } from '../../lib/queries/list-conductors';
+
+type Params = Readonly<Record<string, string | undefined>>;
+
+export function prefetch(client: QueryClient, { number = '', lineKey = '' }: Params) {
+  return Promise.all([
+    client.prefetchQuery(applicationQuery(number)),
+    client.prefetchQuery(draftQuery(number)),
+    client.prefetchQuery(draftLineQuery(number, lineKey)),
+    client.prefetchQuery(rulesQuery()),
+    client.prefetchQuery(conductorsQuery()),
+  ]);
+}
+
+/** A correction that another page sends along, to be put in at once. */
+interface PutState {
+  put?: { correction: Correction; circuit: number };
+}
+
+function usePutFromElsewhere(put: ReturnType<typeof usePut>['put']): void {
+  const { state, pathname } = useLocation() as { state: PutState | null; pathname: string };
+  const navigate = useNavigate();
+  const done = useRef(false);
+  useEffect(() => {
+    if (done.current || !state?.put) return;
+    done.current = true;
+    put(state.put.correction, state.put.circuit);
+    navigate(pathname, { replace: true, state: null });
+  });
+}
+
+/** The check of what stands in the form, by the rules and conductors in force. */
+function useCheckOf(editor: ReturnType<typeof useLineEditor>) {
+  const rules = useRules();
+  const conductors = useConductors();
+  const basis = useMemo(() => checkBasis(rules, conductors), [rules, conductors]);
+  const written = useMemo(() => writtenDigits(editor.form), [editor.form]);
+  return useLiveCheck(editor.reading.line, written, basis);
+}
+
+function LinePage({ input }: { input: LineEditorInput }) {
+  const { number, lineKey } = input;
+  const application = useApplication(number);
+  const draft = useDraft(number);
+  const editor = useLineEditor(input);
+  const check = useCheckOf(editor);
+  const { outcome } = check;
+  const blockers = useMemo(() => blockersOf(outcome), [outcome]);
+  const findings = useMemo(() => drawingNotes(outcome), [outcome]);
+  const notes = useFieldNotes(editor.form, [...editor.textNotes, ...blockers], findings);
+  const settings = useFormSettings(editor.form);
+  const { put, values, keep, undo } = usePut(editor);
+  usePutFromElsewhere(put);
+  useLeaveGuard(editor.save.kind === 'failed' || editor.save.kind === 'conflict');
+  const isNew = !draft.lines.some((l) => l.lineKey === lineKey);
+  return (
+    <>
+      <PageHead
+        title={editor.form.name.trim() || 'New line'}
+        crumbs={[{ label: number, to: `/applications/${number}` }, { label: lineKey }]}
+        lead={
+          <>
+            Enter what you declare and how the line hangs. The drawing and the check follow each keystroke.{' '}
+            <SaveWords state={editor.save} />
+          </>
+        }
+        block={
+          <LineTitleBlock
+            application={application}
+            lineKey={lineKey}
+            count={draft.lines.length + (isNew ? 1 : 0)}
+            form={editor.form}
+          />
+        }
+      />
+      {values && <PutNotice values={values} onKeep={keep} onUndo={undo} />}
+      <LineForm
+        editor={editor}
+        notes={notes}
+        view={settings.view}
+        backTo={`/applications/${number}`}
+        clearanceM={settings.clearanceM}
+        badPositions={(section) => badPositions(outcome, section)}
+      >
+        <LiveCheckPanel check={check} onPut={put} />
+      </LineForm>
+      <FindingCount check={check} />
+    </>
+  );
+}
+
+/** The form of one line of the draft. */
+export function Component() {
+  const { number = '', lineKey = '' } = useParams();
+  const session = useSession();
+  const saved = useSuspenseQuery(draftLineQuery(number, lineKey)).data;
+  if (!session) return null;
+  return (
+    <LinePage key={`${number}/${lineKey}`} input={{ number, lineKey, userId: session.user.id, saved }} />
+  );
+}

@@ -1,0 +1,122 @@
+import { useMemo, useState } from 'react';
+import type { ReactNode } from 'react';
+import { flushSync } from 'react-dom';
+import { Notice } from '../../../components/feedback/notice';
+import { Button, ButtonLink } from '../../../components/ui/button';
+import { formatInstant } from '#shared/format/dates';
+import { LineFormContext } from '../hooks/form-context';
+import type { LineFormView } from '../hooks/form-context';
+import type { LineEditor } from '../hooks/use-line-editor';
+import { ConflictNotice } from './conflict-notice';
+import { DeclaredValues } from './declared-values';
+import { FormFaults } from './form-faults';
+import { LineDrawing } from './line-drawing';
+import { LineIdentity } from './line-identity';
+import { SectionFields } from './section-fields';
+import type { FormNotes } from '../hooks/use-field-notes';
+
+interface LineFormProps {
+  editor: LineEditor;
+  notes: FormNotes;
+  view: Omit<LineFormView, 'form' | 'set' | 'change' | 'noteAt' | 'enter' | 'leave'>;
+  /** Where “Back to the application” leads. */
+  backTo: string;
+  clearanceM: number | null;
+  badPositions: (section: number) => ReadonlySet<number>;
+  /** The live check, under the drawing. */
+  children: ReactNode;
+}
+
+const sectionOf = (pointer: string): number | null => {
+  const found = /^\/sections\/(\d+)/.exec(pointer);
+  return found ? Number(found[1]) : null;
+};
+
+/** Form, drawing and live check of a line: one state, seen three ways. */
+export function LineForm({ editor, notes, view, backTo, clearanceM, badPositions, children }: LineFormProps) {
+  const [shown, setShown] = useState(0);
+  const section = Math.min(shown, editor.form.sections.length - 1);
+  const context = useMemo(
+    (): LineFormView => ({
+      ...view,
+      form: editor.form,
+      set: editor.set,
+      change: editor.change,
+      noteAt: notes.noteAt,
+      enter: notes.enter,
+      leave: notes.leave,
+    }),
+    [view, editor.form, editor.set, editor.change, notes.noteAt, notes.enter, notes.leave],
+  );
+  const goTo = (pointer: string) => {
+    const index = sectionOf(pointer);
+    // At once, so that the field is there when the summary's link looks for it.
+    if (index !== null && index !== section) flushSync(() => setShown(index));
+  };
+  const saveLine = async () => {
+    notes.showAll();
+    await editor.flush();
+  };
+  return (
+    <LineFormContext value={context}>
+      <div className="form-columns">
+        <form
+          noValidate
+          className="min-w-0"
+          onSubmit={(event) => {
+            event.preventDefault();
+            void saveLine();
+          }}
+        >
+          {editor.save.kind === 'conflict' && (
+            <ConflictNotice
+              theirs={editor.theirs}
+              onKeepMine={editor.keepMine}
+              onTakeTheirs={editor.takeTheirs}
+            />
+          )}
+          {editor.restoredFrom && editor.save.kind !== 'conflict' && (
+            <Notice className="mb-6" announce>
+              {`What you typed until ${formatInstant(editor.restoredFrom)} had not reached us; it stands here again.`}
+            </Notice>
+          )}
+          <FormFaults items={notes.shown} asked={notes.asked} onGo={goTo} />
+          <div className="sheet sheet-main">
+            <LineIdentity />
+            <DeclaredValues />
+            <SectionFields shown={section} onShow={setShown} />
+            <FormFoot missing={notes.all.length - notes.shown.length} backTo={backTo} onAsk={notes.showAll} />
+          </div>
+        </form>
+        <div className="stays-in-view grid min-w-0 gap-6">
+          <LineDrawing shown={section} clearanceM={clearanceM} bad={badPositions(section)} />
+          {children}
+        </div>
+      </div>
+    </LineFormContext>
+  );
+}
+
+interface FormFootProps {
+  missing: number;
+  backTo: string;
+  onAsk: () => void;
+}
+
+function FormFoot({ missing, backTo, onAsk }: FormFootProps) {
+  return (
+    <div className="sheet-foot !justify-start items-center bg-paper">
+      <Button type="submit" kind="primary">
+        Save line
+      </Button>
+      <ButtonLink to={backTo}>Back to the application</ButtonLink>
+      {missing > 0 ? (
+        <Button kind="plain" onClick={onAsk}>
+          {missing === 1 ? 'One field is still needed to file' : `${missing} fields are still needed to file`}
+        </Button>
+      ) : (
+        <span className="text-ink-soft">A line with an open error can be saved, not filed.</span>
+      )}
+    </div>
+  );
+}

@@ -1,0 +1,36 @@
+import { useState } from 'react';
+import { getAt, setAt } from '../model/edit';
+import type { LineForm } from '../model/form-types';
+import { fieldId } from '../model/pointers';
+import { putCorrection } from '../model/put-values';
+import type { Correction, PutValue } from '../model/put-values';
+import type { LineEditor } from './use-line-editor';
+
+interface Standing {
+  values: PutValue[];
+  before: LineForm;
+}
+
+/** Corrections that the check offers: put into the form, then kept or taken back by the applicant. */
+export function usePut(editor: Pick<LineEditor, 'form' | 'change'>) {
+  const [standing, setStanding] = useState<Standing | null>(null);
+  const put = (correction: Correction, circuit: number | undefined) => {
+    const { form, values } = putCorrection(editor.form, correction, circuit ?? 1);
+    const [first] = values;
+    if (!first) return;
+    setStanding({ values, before: editor.form });
+    editor.change(() => form);
+    document.getElementById(fieldId(first.pointer))?.focus();
+  };
+  const undo = () => {
+    if (!standing) return;
+    editor.change((form) =>
+      standing.values.reduce((next, { pointer }) => {
+        const path = pointer.split('/').slice(1);
+        return setAt(next, path, getAt(standing.before, path));
+      }, form),
+    );
+    setStanding(null);
+  };
+  return { put, undo, keep: () => setStanding(null), values: standing?.values ?? null };
+}

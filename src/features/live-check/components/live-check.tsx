@@ -1,0 +1,133 @@
+import type { CircuitReport, LineReport } from '#shared/checks/types';
+import { BalanceTable } from '../../../components/charts/balance-table';
+import type { BalanceEntry, RowFinding } from '../../../components/charts/balance-entry';
+import { CauseLine, LooseFinding } from '../../../components/charts/cause-line';
+import { Notice } from '../../../components/feedback/notice';
+import { SkeletonLines } from '../../../components/feedback/skeleton';
+import { GradeTally } from '../../../components/ui/grade-counts';
+import { Sheet } from '../../../components/ui/sheet';
+import { rowOf } from '../../../lib/balance-entries';
+import type { LiveCheck } from '../hooks/use-live-check';
+import { countFindings, entriesOf, sharesCause, sortFindings } from '../model/report-view';
+import { PutButton } from './put-button';
+import type { OnPut } from './put-button';
+
+interface PartProps {
+  report: LineReport;
+  onPut: OnPut;
+}
+
+function rowFindings(circuit: CircuitReport, { report, onPut }: PartProps): Map<string, RowFinding[]> {
+  const rows = new Map<string, RowFinding[]>();
+  sortFindings(circuit).inRows.forEach((finding, i) => {
+    const row = rowOf(finding.parameter) ?? '';
+    const shared = sharesCause(finding, report);
+    const own = finding.causes.map((cause) => cause.sentence);
+    rows.set(row, [
+      ...(rows.get(row) ?? []),
+      {
+        key: `${finding.code}-${i}`,
+        grade: finding.grade,
+        says: shared ? `${finding.message} Same cause.` : finding.message,
+        causes: own,
+        acts: <PutButton finding={finding} onPut={onPut} />,
+      },
+    ]);
+  });
+  return rows;
+}
+
+function CircuitBalance({ circuit, ...part }: PartProps & { circuit: CircuitReport }) {
+  const findings = rowFindings(circuit, part);
+  const entries = entriesOf(circuit).map((entry): BalanceEntry => ({
+    ...entry,
+    findings: findings.get(entry.key) ?? [],
+  }));
+  const several = part.report.circuits.length > 1;
+  const classKv = part.report.bandClassKv;
+  return (
+    <>
+      {several && <h3 className="border-t border-rule px-6 py-2">{`Circuit ${circuit.circuit}`}</h3>}
+      <BalanceTable
+        label={several ? `Balance of circuit ${circuit.circuit}` : 'Balance'}
+        scaleLabel={classKv === null ? 'No band for this voltage' : `Typical, ${classKv} kV`}
+        entries={entries}
+        live
+      />
+      <LooseFindings findings={sortFindings(circuit).loose} {...part} />
+    </>
+  );
+}
+
+function LooseFindings({ findings, report, onPut }: PartProps & { findings: CircuitReport['findings'] }) {
+  return findings.map((finding, i) => (
+    <LooseFinding
+      key={`${finding.code}-${i}`}
+      grade={finding.grade}
+      says={sharesCause(finding, report) ? `${finding.message} Same cause.` : finding.message}
+      acts={<PutButton finding={finding} onPut={onPut} />}
+    >
+      {finding.causes.map((cause, c) => (
+        <CauseLine key={c} grade={finding.grade}>
+          {cause.sentence}
+        </CauseLine>
+      ))}
+    </LooseFinding>
+  ));
+}
+
+function Waiting({ count }: { count: number }) {
+  return (
+    <p className="px-6 pb-6 text-control text-ink-soft">
+      {count === 1
+        ? 'The check begins once one more field holds a value it can use.'
+        : `The check begins once ${count} more fields hold values it can use.`}
+    </p>
+  );
+}
+
+interface LiveCheckPanelProps {
+  check: LiveCheck;
+  onPut: OnPut;
+}
+
+/** The check beside the form: the same rules as the server's, and a preview of it only. */
+export function LiveCheckPanel({ check, onPut }: LiveCheckPanelProps) {
+  const { outcome, failed } = check;
+  const report = outcome?.kind === 'report' ? outcome.report : null;
+  return (
+    <Sheet
+      id="live-check"
+      title="Live check"
+      aside="A preview by the rules in force; the server’s check after filing counts."
+    >
+      <div aria-busy={check.pending || undefined}>
+        {failed && (
+          <Notice grade="explain" className="mx-6 mb-6">
+            The live check could not run in this browser. Filing is not affected: the server checks every
+            line.
+          </Notice>
+        )}
+        {!outcome && !failed && (
+          <div className="px-6 pb-6">
+            <SkeletonLines lines={5} label="The check is starting" />
+          </div>
+        )}
+        {outcome?.kind === 'faults' && <Waiting count={outcome.faults.length} />}
+        {report && (
+          <>
+            <GradeTally counts={countFindings(report)} />
+            {report.circuits.map((circuit) => (
+              <CircuitBalance key={circuit.circuit} circuit={circuit} report={report} onPut={onPut} />
+            ))}
+            <LooseFindings
+              findings={report.findings.filter((f) => !f.follows)}
+              report={report}
+              onPut={onPut}
+            />
+          </>
+        )}
+      </div>
+    </Sheet>
+  );
+}
