@@ -6,7 +6,7 @@ import { requestLog } from '../middleware/request-log';
 import { noStore, securityHeaders } from '../middleware/security-headers';
 import { cookieName, sessionMiddleware } from '../middleware/session';
 import { ROUTES } from '../routes/route-table';
-import type { Context } from './context';
+import type { Context } from '../integrations/context';
 import { expressPath } from './path-parameters';
 import { openApiDocument } from './open-api';
 import { registerRoute } from './register-route';

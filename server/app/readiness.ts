@@ -1,6 +1,6 @@
 import { NEWEST_MIGRATION } from '../database/migrations';
 import { Problem } from '../errors/problem';
-import type { Context } from './context';
+import type { Context } from '../integrations/context';
 
 const PATIENCE_MS = 1000;
 const KEEP_MS = 1000;

@@ -10,8 +10,8 @@ import { inTransaction } from '../database/transaction';
 import type { ActorSource, Transaction } from '../database/transaction';
 import { forbidden, invalidContent, Problem } from '../errors/problem';
 import { refuseCrossSite, requireToken } from '../middleware/cross-site';
-import { SessionDoor } from '../middleware/session-door';
-import type { SessionState } from '../middleware/session-door';
+import type { SessionDoor, SessionState } from '../integrations/session-door';
+import { HttpSessionDoor } from '../middleware/http-session-door';
 import { takeUpload } from '../middleware/upload';
 import { findActor } from '../services/session/find-actor';
 import { checkParameters, expressPath } from './path-parameters';
@@ -19,7 +19,7 @@ import { readContent } from './request-content';
 import type { Content } from './request-content';
 import { Answer } from './route';
 import type { Call, Route, UploadedFile } from './route';
-import type { Context } from './context';
+import type { Context } from '../integrations/context';
 import { sendAnswer } from './send-answer';
 
 type AnyCall = Call<never>;
@@ -114,7 +114,7 @@ function makeCall(
     ...uploaded,
     params: checkParameters(request.params),
     context,
-    session: new SessionDoor(request, () => tx.now),
+    session: new HttpSessionDoor(request, () => tx.now),
     address: request.ip ?? '',
     ...(person ? { actor: person, ability: abilityFor(route, person) } : {}),
   };
@@ -128,7 +128,7 @@ function respond(route: Route, context: Context): RequestHandler {
     if (route.bareHandler) {
       return sendAnswer(route, context, response, await route.bareHandler(context, request, response));
     }
-    const door = new SessionDoor(request, () => surroundings.tools.clock.now());
+    const door = new HttpSessionDoor(request, () => surroundings.tools.clock.now());
     const state = admit(route, request, door, config.publicUrl);
     const content = readContent(route, request);
     const key = retryKey(route, request);
@@ -145,7 +145,12 @@ function respond(route: Route, context: Context): RequestHandler {
 /** The upload is taken only from somebody who may come in: strangers are turned away before their bytes are read. */
 function guardUpload(route: Route, { surroundings, config }: Context): RequestHandler {
   return (request, _response, next) => {
-    admit(route, request, new SessionDoor(request, () => surroundings.tools.clock.now()), config.publicUrl);
+    admit(
+      route,
+      request,
+      new HttpSessionDoor(request, () => surroundings.tools.clock.now()),
+      config.publicUrl,
+    );
     next();
   };
 }

@@ -6,8 +6,9 @@ import type { SchemaPath } from '../../shared/contracts/validators-by-name';
 import type { Action, AppAbility, Subject } from '../../shared/policies/subjects';
 import type { UserActor } from '../database/actor';
 import type { Transaction } from '../database/transaction';
-import type { SessionDoor } from '../middleware/session-door';
-import type { Context } from './context';
+import type { SessionDoor } from '../integrations/session-door';
+import type { Upload } from '../middleware/upload';
+import type { Context } from '../integrations/context';
 
 /** Who may come in at all; what exactly they may do it to is asked of the loaded object by the service. */
 export type Access = 'anyone' | 'half-signed-in' | 'signed-in' | { can: Action; on: Subject };
@@ -22,12 +23,6 @@ type SchemaName<Folder extends string> = SchemaPath extends infer P
 export type Answers = Readonly<
   Partial<Record<200 | 201 | 202, SchemaName<'responses'> | 'bytes' | 'openapi'>>
 >;
-
-export interface Upload {
-  maxBytes: number;
-  /** Text fields that may come with the field `file`. */
-  fields: readonly string[];
-}
 
 export interface UploadedFile {
   name: string;

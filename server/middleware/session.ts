@@ -1,8 +1,8 @@
 import connectPgSimple from 'connect-pg-simple';
 import type { RequestHandler } from 'express';
 import session from 'express-session';
-import { Passport } from 'passport';
-import type { Context } from '../app/context';
+import type { Context } from '../integrations/context';
+import { passport } from './passport';
 
 declare module 'express-session' {
   interface SessionData {
@@ -27,9 +27,6 @@ export const cookieName = (secure: boolean) => (secure ? '__Host-cp' : 'cp');
 export function sessionMiddleware({ config, pool }: Context): RequestHandler[] {
   const Store = connectPgSimple(session);
   const store = new Store({ pool, tableName: 'sessions', pruneSessionInterval: false });
-  const passport = new Passport();
-  passport.serializeUser((user, done) => done(null, user.id));
-  passport.deserializeUser((id: string, done) => done(null, { id }));
   return [
     session({
       store,

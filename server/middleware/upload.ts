@@ -1,6 +1,11 @@
 import type { RequestHandler } from 'express';
 import multer from 'multer';
-import type { Upload } from '../app/route';
+
+export interface Upload {
+  maxBytes: number;
+  /** Text fields that may come with the field `file`. */
+  fields: readonly string[];
+}
 
 /** Takes one file into memory, within limits that are checked while it comes in. */
 export function takeUpload({ maxBytes, fields }: Upload): RequestHandler {

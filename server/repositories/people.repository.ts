@@ -1,5 +1,5 @@
 import type { EntityManager } from 'typeorm';
-import { Membership, Organisation, ReviewerBar, User } from '../entities/people.entities';
+import { Membership, Organisation, ReviewerBar, SecondFactor, User } from '../entities/people.entities';
 import type { OrganisationKind, Role } from '../entities/people.entities';
 
 /** One lookup key for an address, however it is typed. */
@@ -58,3 +58,8 @@ export async function barsOf(manager: EntityManager, userIds: readonly string[])
 }
 
 export const findGridOwner = (manager: EntityManager) => manager.findOneBy(Organisation, { kind: 'owner' });
+
+export async function hasSecondFactor(manager: EntityManager, userId: string): Promise<boolean> {
+  const factor = await manager.findOneBy(SecondFactor, { userId });
+  return factor !== null && factor.confirmedAt !== null;
+}

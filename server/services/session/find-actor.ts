@@ -1,7 +1,7 @@
 import type { EntityManager } from 'typeorm';
 import type { UserActor } from '../../database/actor';
 import { Problem } from '../../errors/problem';
-import type { SessionState } from '../../middleware/session-door';
+import type { SessionState } from '../../integrations/session-door';
 import { barsOf, findUser, membershipsOf } from '../../repositories/people.repository';
 
 /** Who the session stands for, with the rights of this moment: a role taken away counts from the next request on. */

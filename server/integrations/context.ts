@@ -1,6 +1,6 @@
 import type { Pool } from 'pg';
 import type { Config } from '../config/config';
-import type { Surroundings } from '../integrations/surroundings';
+import type { Surroundings } from './surroundings';
 import type { Logger } from '../logging/logger';
 
 /** What the assembled server knows of the world it runs in. */

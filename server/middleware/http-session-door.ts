@@ -1,18 +1,7 @@
 import { randomBytes } from 'node:crypto';
 import type { Request } from 'express';
-
-/** What a session remembers. The rights are looked up again at each request. */
-export interface SessionState {
-  userId: string;
-  orgId: string;
-  /** The password was right, but a second step is still to come. */
-  stage: 'half' | 'full';
-  /** Milliseconds; the absolute limit counts from it. */
-  signedInAt: number;
-  csrfToken: string;
-  /** Sent along with the address of a new second factor, until its first code is given. */
-  idleMinutes: number;
-}
+import { authenticate } from './passport';
+import type { PasswordCheck, SessionDoor, SessionState } from '../integrations/session-door';
 
 declare module 'express-session' {
   interface SessionData {
@@ -24,17 +13,26 @@ const HOUR_MS = 3_600_000;
 export const ABSOLUTE_LIMIT_MS = 8 * HOUR_MS;
 
 /** The session of one request: read it, begin a new one at every change of rights, end it. */
-export class SessionDoor {
+export class HttpSessionDoor implements SessionDoor {
   constructor(
     private readonly request: Request,
     private readonly now: () => Date,
   ) {}
+
+  get id(): string {
+    return this.request.sessionID;
+  }
 
   /** What the session remembers; nothing after eight hours, whatever its use. */
   get state(): SessionState | null {
     const state = this.request.session.state;
     if (!state || this.request.session.passport?.user !== state.userId) return null;
     return this.now().getTime() - state.signedInAt < ABSOLUTE_LIMIT_MS ? state : null;
+  }
+
+  /** Runs the sign-in strategy over the request's body. */
+  authenticate(check: PasswordCheck): Promise<{ id: string } | null> {
+    return authenticate(this.request, check);
   }
 
   /** A new session under a new id; the old id is dead from here on. */
