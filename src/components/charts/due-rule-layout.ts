@@ -31,6 +31,8 @@ export interface RuleLayout<G> {
   standing: readonly Standing<G>[];
   /** Days whose stack is cut: how many more are due there. */
   more: readonly { x: number; count: number }[];
+  /** Items due after the last day shown. */
+  later: number;
 }
 
 const MARGIN = 26;
@@ -38,7 +40,7 @@ const LEAST_DAY = 25;
 const WIDEST_DAY = 32.4;
 const LEVELS = 3;
 
-/** The last shown day that is not after the due day; before the first and after the last are pinned. */
+/** The last shown day that is not after the due day; what was due before the first stands on the first. */
 function indexOfDay(days: readonly RuleDay[], due: string): number {
   let index = 0;
   days.forEach((day, i) => {
@@ -59,8 +61,9 @@ export function layOutRule<G>(
   const shown = allDays.slice(0, held);
   const perDay = Math.min(WIDEST_DAY, room / Math.max(held - 1, 1));
   const x = (index: number) => MARGIN + index * perDay;
+  const last = shown.at(-1)?.date ?? today;
   const byDay = new Map<number, DueItem<G>[]>();
-  for (const item of items) {
+  for (const item of items.filter(({ due }) => due <= last)) {
     const index = indexOfDay(shown, item.due);
     byDay.set(index, [...(byDay.get(index) ?? []), item]);
   }
@@ -79,5 +82,6 @@ export function layOutRule<G>(
     todayX: todayIndex < 0 ? null : x(todayIndex),
     standing,
     more,
+    later: items.filter(({ due }) => due > last).length,
   };
 }

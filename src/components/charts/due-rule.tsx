@@ -81,6 +81,11 @@ export function DueRule({ days, today, items, label }: DueRuleProps) {
             <GradeMark grade={grade} />
           </g>
         ))}
+        {layout.later > 0 && (
+          <text x={layout.end} y={26} textAnchor="end">
+            {`${layout.later} later`}
+          </text>
+        )}
         {layout.more.map(({ x, count }) => (
           <text key={x} x={x} y={BASE - 37} textAnchor="middle" className="font-semibold">
             {`+${count}`}

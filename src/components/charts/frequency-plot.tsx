@@ -1,6 +1,7 @@
 import { scaleLog } from 'd3-scale';
 import { line } from 'd3-shape';
 import { useWidth } from '../../hooks/use-width';
+import { textWidth } from './text-width';
 import { frequencyText, logDomain, logTicks, minorTicks } from './log-ticks';
 
 interface Marked {
@@ -94,6 +95,7 @@ function AtRated({
   const yd = declared ? axes.y(declared.value) : null;
   const yr = recomputed ? axes.y(recomputed.value) : null;
   const near = yd !== null && yr !== null && Math.abs(yd - yr) < NEAR_PX;
+  const leftwards = near && declared && x - 9 - textWidth(declared.text, 11) > axes.left;
   return (
     <>
       <path d={`M${x} ${TOP}V${BOTTOM}`} strokeDasharray="3 3" className="stroke-ink-soft" />
@@ -112,9 +114,9 @@ function AtRated({
         <>
           <path d={`M${x - 5} ${yd - 9}H${x + 5}L${x} ${yd}Z`} className="fill-copper" />
           <text
-            x={near ? x - 9 : x + 11}
+            x={leftwards ? x - 9 : x + 11}
             y={near ? yd - 8 : yd - 1}
-            textAnchor={near ? 'end' : 'start'}
+            textAnchor={leftwards ? 'end' : 'start'}
             className="halo !fill-copper font-semibold"
           >
             {declared.text}

@@ -32,6 +32,7 @@ export function minorTicks(low: number, high: number): number[] {
 }
 
 const NARROWEST = 4;
+const AIR = 1.6;
 
 /**
  * The range of a logarithmic axis that holds all values with some air. A curve that hardly moves still
@@ -40,8 +41,8 @@ const NARROWEST = 4;
 export function logDomain(values: readonly number[]): readonly [number, number] {
   const positive = values.filter((v) => Number.isFinite(v) && v > 0);
   if (positive.length === 0) return [0.1, 10];
-  const low = Math.min(...positive) / 1.15;
-  const high = Math.max(...positive) * 1.15;
+  const low = Math.min(...positive) / AIR;
+  const high = Math.max(...positive) * AIR;
   if (high / low >= NARROWEST) return [low, high];
   const middle = Math.sqrt(low * high);
   return [middle / Math.sqrt(NARROWEST), middle * Math.sqrt(NARROWEST)];

@@ -1,4 +1,4 @@
-import { Fragment, type ReactNode } from 'react';
+import { Fragment, type CSSProperties, type ReactNode } from 'react';
 import { classNames } from './class-names';
 import { Disclosure } from './disclosure';
 
@@ -33,7 +33,7 @@ function Cell({ cell }: { cell: TitleBlockCell }) {
   );
   return (
     <div
-      style={{ gridColumn: `span ${cell.span}` }}
+      style={{ '--span': cell.span } as CSSProperties}
       className={classNames(
         cell.fold ? `fold-${cell.fold}` : 'folds',
         cell.meter !== undefined && 'meter-cell',

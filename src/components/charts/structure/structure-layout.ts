@@ -131,16 +131,17 @@ function takenBy(marks: readonly Mark[], radius: number): Box[] {
   });
 }
 
-/** The bundles that differ, each by the position that shows it best: the rightmost. At most two. */
-function bundlesToMagnify(marks: readonly Mark[]): Mark[] {
-  const phases = marks.filter(
-    ({ position: p }) => p.kind === 'phase' && p.bundleCount > 1 && p.bundleSpacingM > 0,
-  );
-  const byKind = new Map<string, Mark>();
-  for (const mark of phases) {
-    const key = `${mark.position.bundleCount}:${mark.position.bundleSpacingM}`;
-    const held = byKind.get(key);
-    if (!held || mark.x > held.x) byKind.set(key, mark);
+/** Positions by the bundle that hangs there, rightmost first; two kinds of bundle at most. */
+function bundlesToMagnify(marks: readonly Mark[]): Mark[][] {
+  const byKind = new Map<string, Mark[]>();
+  for (const mark of marks) {
+    const { kind, bundleCount, bundleSpacingM } = mark.position;
+    if (kind !== 'phase' || bundleCount < 2 || !(bundleSpacingM > 0)) continue;
+    const key = `${bundleCount}:${bundleSpacingM}`;
+    byKind.set(
+      key,
+      [...(byKind.get(key) ?? []), mark].sort((a, b) => b.x - a.x),
+    );
   }
   return [...byKind.values()].slice(0, 2);
 }
@@ -152,13 +153,29 @@ function leadLine(mark: Mark, place: LensPlace, from: number, radius: number): L
   return [mark.x + ux * from, mark.y + uy * from, place.x - ux * radius, place.y - uy * radius];
 }
 
-/** Among the wires if there is room, else beside them, else apart, below the drawing. */
-function lensPlace(mark: Mark, frame: Frame, sides: Sides, taken: readonly Box[]): LensPlace | null {
+interface LensSite {
+  mark: Mark;
+  place: LensPlace;
+}
+
+/** Among the wires if there is room, else beside them at whichever position is nearest, else null. */
+function lensSite(
+  marks: readonly Mark[],
+  frame: Frame,
+  sides: Sides,
+  taken: readonly Box[],
+): LensSite | null {
   const among = { left: sides.left - sides.discRadius, right: sides.right + sides.discRadius };
   const beside = { left: 4, right: frame.width - 4 };
-  return (
-    placeLens(mark, LENS_RADIUS, frame, among, taken) ?? placeLens(mark, LENS_RADIUS, frame, beside, taken)
-  );
+  for (const reach of [among, beside]) {
+    const sites = marks.flatMap((mark) => {
+      const place = placeLens(mark, LENS_RADIUS, frame, reach, taken);
+      return place ? [{ mark, place, distance: Math.hypot(place.x - mark.x, place.y - mark.y) }] : [];
+    });
+    const nearest = sites.sort((a, b) => Math.round(a.distance - b.distance))[0];
+    if (nearest) return nearest;
+  }
+  return null;
 }
 
 function lensesOf(
@@ -170,16 +187,18 @@ function lensesOf(
   const occupied = [...taken];
   const lenses: Lens[] = [];
   let apart = 0;
-  for (const mark of bundlesToMagnify(marks)) {
-    const place = lensPlace(mark, frame, sides, occupied);
-    const where = place ?? {
+  for (const alike of bundlesToMagnify(marks)) {
+    const site = lensSite(alike, frame, sides, occupied);
+    const mark = site?.mark ?? alike[0];
+    if (!mark) continue;
+    const place = site?.place ?? {
       x: LENS_RADIUS + 8 + apart * (2 * LENS_RADIUS + 16),
       y: frame.height + LENS_RADIUS + 4,
     };
-    if (!place) apart += 1;
-    occupied.push({ ...where, width: 2 * LENS_RADIUS, height: 2 * LENS_RADIUS });
-    const lead = place ? leadLine(mark, place, sides.discRadius + 1, LENS_RADIUS) : null;
-    lenses.push({ place: where, radius: LENS_RADIUS, position: mark.position, lead });
+    if (!site) apart += 1;
+    occupied.push({ ...place, width: 2 * LENS_RADIUS, height: 2 * LENS_RADIUS });
+    const lead = site ? leadLine(mark, place, sides.discRadius + 1, LENS_RADIUS) : null;
+    lenses.push({ place, radius: LENS_RADIUS, position: mark.position, lead });
   }
   return { lenses, below: apart > 0 ? 2 * LENS_RADIUS + 16 : 0 };
 }
@@ -221,11 +240,7 @@ export function layOutStructure(all: readonly DrawnPosition[], options: Structur
   const taken = takenBy(marks, radius);
   const dimensions = clearLabels(raw, taken);
   const centre: Box = { x: frame.centreX, y: frame.groundY / 2, width: 4, height: frame.groundY };
-  const { lenses, below } = lensesOf(marks, frame, sides, [
-    ...taken,
-    centre,
-    ...dimensions.map((d) => d.box),
-  ]);
+  const { lenses, below } = lensesOf(marks, frame, sides, [...taken, centre, ...dimensionBoxes(dimensions)]);
   const broken = clearanceM !== null && marks.some((mark) => isTooLow(mark.position, clearanceM));
   const ys = dimensions.filter((d) => d.along === 'y').map((d) => d.at);
   return {
