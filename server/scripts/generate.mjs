@@ -3,19 +3,33 @@ import { readFileSync, writeFileSync } from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
 import { fileURLToPath, pathToFileURL } from 'node:url';
 import { buildValidators } from './build-validators.mjs';
+import { csvSchemaText } from './generate-csv-schema.mjs';
 import { factorsText } from './generate-factors.mjs';
 import { typesFrom } from './generate-types.mjs';
 import { readSchemas } from './schema-files.mjs';
 
 const ROOT = resolve(dirname(fileURLToPath(import.meta.url)), '../..');
 
+const CSV_SCHEMA = 'schemas/files/lines-csv.schema.json';
+
 /** Every committed generated file: path → text as it should be. */
 export async function generatedTexts() {
   const prettier = await import('prettier');
-  const options = { parser: 'typescript', ...(await prettier.resolveConfig(join(ROOT, 'package.json'))) };
-  const texts = { ...typesFrom(readSchemas(ROOT)), 'shared/units/factors.generated.ts': await factorsText() };
+  const config = await prettier.resolveConfig(join(ROOT, 'package.json'));
+  const csvSchema = await csvSchemaText();
+  // The schema made here is one of those that types are made from.
+  const others = readSchemas(ROOT).filter((s) => s.path !== 'files/lines-csv');
+  const schemas = [...others, { path: 'files/lines-csv', schema: JSON.parse(csvSchema) }];
+  const texts = {
+    [CSV_SCHEMA]: csvSchema,
+    ...typesFrom(schemas),
+    'shared/units/factors.generated.ts': await factorsText(),
+  };
   const out = {};
-  for (const [file, text] of Object.entries(texts)) out[file] = await prettier.format(text, options);
+  for (const [file, text] of Object.entries(texts)) {
+    const parser = file.endsWith('.json') ? 'json' : 'typescript';
+    out[file] = await prettier.format(text, { ...config, parser });
+  }
   return out;
 }
 

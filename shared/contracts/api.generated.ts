@@ -2018,3 +2018,329 @@ export interface Window {
   /** working days left, negative when overdue (working days) */
   left: number;
 }
+
+/** One row of the lines’ CSV file, by column. A row is a section; the rows of one name stand together; declared values stand on the first of them. Cells are texts: numbers are read by the rules of the filing format. */
+export interface LinesCsvRow {
+  /** Name of the line, the same on all its rows. Text. On the line’s first row. */
+  name: string;
+  /** Where the line begins. Text. On the line’s first row. */
+  from: string;
+  /** Where the line ends. Text. On the line’s first row. */
+  to: string;
+  /** Nominal phase-to-phase voltage, kV. Number, with the file’s decimal sign. On the line’s first row. */
+  nominal_voltage_kv: string;
+  /** Rated frequency, 50 or 60, Hz. Number, with the file’s decimal sign. On the line’s first row. */
+  frequency_hz: string;
+  /** True or false; true when empty. true or false. On the line’s first row. */
+  transposed?: string;
+  /** Number of the section within the line, 1 to k; may be empty when there is one. Number, with the file’s decimal sign. */
+  section?: string;
+  /** Overhead or cable; overhead when empty. One of a list. */
+  kind?: string;
+  /** Length of the section, km. Number, with the file’s decimal sign. */
+  length_km: string;
+  /** Resistivity of the earth, ohm metre; the owner’s when empty. Number, with the file’s decimal sign. */
+  earth_resistivity_ohm_m?: string;
+  /** Continuous or segmented; continuous when empty. One of a list. */
+  ground_wire_bonding?: string;
+  /** Phase conductor: name in the library, or its name when its data are given. Text. */
+  conductor?: string;
+  /** Phase conductor: model: handbook or tube; found from the data when empty. One of a list. */
+  conductor_model?: string;
+  /** Phase conductor: outer diameter, mm. Number, with the file’s decimal sign. */
+  conductor_diameter_mm?: string;
+  /** Phase conductor: diameter of the core that carries no current, mm. Number, with the file’s decimal sign. */
+  conductor_core_diameter_mm?: string;
+  /** Phase conductor: geometric mean radius, mm. Number, with the file’s decimal sign. */
+  conductor_gmr_mm?: string;
+  /** Phase conductor: a.c. resistance at its temperature, ohm/km. Number, with the file’s decimal sign. */
+  conductor_ac_resistance_ohm_per_km?: string;
+  /** Phase conductor: d.c. resistance at 20 °C, ohm/km. Number, with the file’s decimal sign. */
+  conductor_dc_resistance_20_ohm_per_km?: string;
+  /** Phase conductor: temperature, °C. Number, with the file’s decimal sign. */
+  conductor_temperature_c?: string;
+  /** Phase conductor: temperature coefficient at 20 °C, 1/K. Number, with the file’s decimal sign. */
+  conductor_temperature_coefficient_per_k?: string;
+  /** Ground wire: name in the library, or its name when its data are given. Text. */
+  ground_conductor?: string;
+  /** Ground wire: model: handbook or tube; found from the data when empty. One of a list. */
+  ground_conductor_model?: string;
+  /** Ground wire: outer diameter, mm. Number, with the file’s decimal sign. */
+  ground_conductor_diameter_mm?: string;
+  /** Ground wire: diameter of the core that carries no current, mm. Number, with the file’s decimal sign. */
+  ground_conductor_core_diameter_mm?: string;
+  /** Ground wire: geometric mean radius, mm. Number, with the file’s decimal sign. */
+  ground_conductor_gmr_mm?: string;
+  /** Ground wire: a.c. resistance at its temperature, ohm/km. Number, with the file’s decimal sign. */
+  ground_conductor_ac_resistance_ohm_per_km?: string;
+  /** Ground wire: d.c. resistance at 20 °C, ohm/km. Number, with the file’s decimal sign. */
+  ground_conductor_dc_resistance_20_ohm_per_km?: string;
+  /** Ground wire: temperature, °C. Number, with the file’s decimal sign. */
+  ground_conductor_temperature_c?: string;
+  /** Ground wire: temperature coefficient at 20 °C, 1/K. Number, with the file’s decimal sign. */
+  ground_conductor_temperature_coefficient_per_k?: string;
+  /** Subconductors of each phase, 1 to 8; 1 when empty. Number, with the file’s decimal sign. */
+  bundle_count?: string;
+  /** Side of the bundle’s polygon, m. Number, with the file’s decimal sign. */
+  bundle_spacing_m?: string;
+  /** Sag of the phases at mid-span where a phase has none of its own, m. Number, with the file’s decimal sign. */
+  sag_m?: string;
+  /** Sag of the ground wires at mid-span where a wire has none of its own, m. Number, with the file’s decimal sign. */
+  gw_sag_m?: string;
+  /** Circuit 1, phase a: offset from the centre line, m. Number, with the file’s decimal sign. */
+  a_x_m?: string;
+  /** Circuit 1, phase a: height of the attachment above ground, m. Number, with the file’s decimal sign. */
+  a_height_m?: string;
+  /** Circuit 1, phase a: sag at mid-span, m. Number, with the file’s decimal sign. */
+  a_sag_m?: string;
+  /** Circuit 1, phase b: offset from the centre line, m. Number, with the file’s decimal sign. */
+  b_x_m?: string;
+  /** Circuit 1, phase b: height of the attachment above ground, m. Number, with the file’s decimal sign. */
+  b_height_m?: string;
+  /** Circuit 1, phase b: sag at mid-span, m. Number, with the file’s decimal sign. */
+  b_sag_m?: string;
+  /** Circuit 1, phase c: offset from the centre line, m. Number, with the file’s decimal sign. */
+  c_x_m?: string;
+  /** Circuit 1, phase c: height of the attachment above ground, m. Number, with the file’s decimal sign. */
+  c_height_m?: string;
+  /** Circuit 1, phase c: sag at mid-span, m. Number, with the file’s decimal sign. */
+  c_sag_m?: string;
+  /** Circuit 2, phase a: offset from the centre line, m. Number, with the file’s decimal sign. */
+  c2_a_x_m?: string;
+  /** Circuit 2, phase a: height of the attachment above ground, m. Number, with the file’s decimal sign. */
+  c2_a_height_m?: string;
+  /** Circuit 2, phase a: sag at mid-span, m. Number, with the file’s decimal sign. */
+  c2_a_sag_m?: string;
+  /** Circuit 2, phase b: offset from the centre line, m. Number, with the file’s decimal sign. */
+  c2_b_x_m?: string;
+  /** Circuit 2, phase b: height of the attachment above ground, m. Number, with the file’s decimal sign. */
+  c2_b_height_m?: string;
+  /** Circuit 2, phase b: sag at mid-span, m. Number, with the file’s decimal sign. */
+  c2_b_sag_m?: string;
+  /** Circuit 2, phase c: offset from the centre line, m. Number, with the file’s decimal sign. */
+  c2_c_x_m?: string;
+  /** Circuit 2, phase c: height of the attachment above ground, m. Number, with the file’s decimal sign. */
+  c2_c_height_m?: string;
+  /** Circuit 2, phase c: sag at mid-span, m. Number, with the file’s decimal sign. */
+  c2_c_sag_m?: string;
+  /** Ground wire 1: offset from the centre line, m. Number, with the file’s decimal sign. */
+  gw1_x_m?: string;
+  /** Ground wire 1: height of the attachment above ground, m. Number, with the file’s decimal sign. */
+  gw1_height_m?: string;
+  /** Ground wire 1: sag at mid-span, m. Number, with the file’s decimal sign. */
+  gw1_sag_m?: string;
+  /** Ground wire 2: offset from the centre line, m. Number, with the file’s decimal sign. */
+  gw2_x_m?: string;
+  /** Ground wire 2: height of the attachment above ground, m. Number, with the file’s decimal sign. */
+  gw2_height_m?: string;
+  /** Ground wire 2: sag at mid-span, m. Number, with the file’s decimal sign. */
+  gw2_sag_m?: string;
+  /** Ground wire 3: offset from the centre line, m. Number, with the file’s decimal sign. */
+  gw3_x_m?: string;
+  /** Ground wire 3: height of the attachment above ground, m. Number, with the file’s decimal sign. */
+  gw3_height_m?: string;
+  /** Ground wire 3: sag at mid-span, m. Number, with the file’s decimal sign. */
+  gw3_sag_m?: string;
+  /** Ground wire 4: offset from the centre line, m. Number, with the file’s decimal sign. */
+  gw4_x_m?: string;
+  /** Ground wire 4: height of the attachment above ground, m. Number, with the file’s decimal sign. */
+  gw4_height_m?: string;
+  /** Ground wire 4: sag at mid-span, m. Number, with the file’s decimal sign. */
+  gw4_sag_m?: string;
+  /** Circuit 1: declared r1, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  r1?: string;
+  /** Circuit 1: declared x1, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  x1?: string;
+  /** Circuit 1: declared b1, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  b1?: string;
+  /** Circuit 1: declared r0, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  r0?: string;
+  /** Circuit 1: declared x0, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  x0?: string;
+  /** Circuit 1: declared b0, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  b0?: string;
+  /** Circuit 1: unit of r1 where it is another one. One of a list. On the line’s first row. */
+  r1_unit?: string;
+  /** Circuit 1: unit of x1 where it is another one. One of a list. On the line’s first row. */
+  x1_unit?: string;
+  /** Circuit 1: unit of b1 where it is another one. One of a list. On the line’s first row. */
+  b1_unit?: string;
+  /** Circuit 1: unit of r0 where it is another one. One of a list. On the line’s first row. */
+  r0_unit?: string;
+  /** Circuit 1: unit of x0 where it is another one. One of a list. On the line’s first row. */
+  x0_unit?: string;
+  /** Circuit 1: unit of b0 where it is another one. One of a list. On the line’s first row. */
+  b0_unit?: string;
+  /** Circuit 1: the applicant’s own name of it. Text. On the line’s first row. */
+  circuit_id?: string;
+  /** Circuit 1: continuous rating at its maximum temperature, A. Number, with the file’s decimal sign. On the line’s first row. */
+  rating_a?: string;
+  /** Circuit 1: conductor temperature that the rating is for, °C. Number, with the file’s decimal sign. On the line’s first row. */
+  max_temperature_c?: string;
+  /** Circuit 1: season of its rating 1. Text. On the line’s first row. */
+  rating1_season?: string;
+  /** Circuit 1: continuous rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  rating1_continuous_a?: string;
+  /** Circuit 1: short-time rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  rating1_emergency_a?: string;
+  /** Circuit 1: season of its rating 2. Text. On the line’s first row. */
+  rating2_season?: string;
+  /** Circuit 1: continuous rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  rating2_continuous_a?: string;
+  /** Circuit 1: short-time rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  rating2_emergency_a?: string;
+  /** Circuit 1: season of its rating 3. Text. On the line’s first row. */
+  rating3_season?: string;
+  /** Circuit 1: continuous rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  rating3_continuous_a?: string;
+  /** Circuit 1: short-time rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  rating3_emergency_a?: string;
+  /** Circuit 1: season of its rating 4. Text. On the line’s first row. */
+  rating4_season?: string;
+  /** Circuit 1: continuous rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  rating4_continuous_a?: string;
+  /** Circuit 1: short-time rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  rating4_emergency_a?: string;
+  /** Circuit 1: where the values come from. One of a list. On the line’s first row. */
+  basis_kind?: string;
+  /** Circuit 1: state of the line that they describe. One of a list. On the line’s first row. */
+  basis_status?: string;
+  /** Circuit 1: who answers for the values. Text. On the line’s first row. */
+  basis_engineer?: string;
+  /** Circuit 1: day of the calculation or measurement, YYYY-MM-DD. Text. On the line’s first row. */
+  basis_date?: string;
+  /** Circuit 2: declared r1, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_r1?: string;
+  /** Circuit 2: declared x1, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_x1?: string;
+  /** Circuit 2: declared b1, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_b1?: string;
+  /** Circuit 2: declared r0, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_r0?: string;
+  /** Circuit 2: declared x0, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_x0?: string;
+  /** Circuit 2: declared b0, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_b0?: string;
+  /** Circuit 2: unit of r1 where it is another one. One of a list. On the line’s first row. */
+  c2_r1_unit?: string;
+  /** Circuit 2: unit of x1 where it is another one. One of a list. On the line’s first row. */
+  c2_x1_unit?: string;
+  /** Circuit 2: unit of b1 where it is another one. One of a list. On the line’s first row. */
+  c2_b1_unit?: string;
+  /** Circuit 2: unit of r0 where it is another one. One of a list. On the line’s first row. */
+  c2_r0_unit?: string;
+  /** Circuit 2: unit of x0 where it is another one. One of a list. On the line’s first row. */
+  c2_x0_unit?: string;
+  /** Circuit 2: unit of b0 where it is another one. One of a list. On the line’s first row. */
+  c2_b0_unit?: string;
+  /** Circuit 2: the applicant’s own name of it. Text. On the line’s first row. */
+  c2_circuit_id?: string;
+  /** Circuit 2: continuous rating at its maximum temperature, A. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_rating_a?: string;
+  /** Circuit 2: conductor temperature that the rating is for, °C. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_max_temperature_c?: string;
+  /** Circuit 2: season of its rating 1. Text. On the line’s first row. */
+  c2_rating1_season?: string;
+  /** Circuit 2: continuous rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_rating1_continuous_a?: string;
+  /** Circuit 2: short-time rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_rating1_emergency_a?: string;
+  /** Circuit 2: season of its rating 2. Text. On the line’s first row. */
+  c2_rating2_season?: string;
+  /** Circuit 2: continuous rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_rating2_continuous_a?: string;
+  /** Circuit 2: short-time rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_rating2_emergency_a?: string;
+  /** Circuit 2: season of its rating 3. Text. On the line’s first row. */
+  c2_rating3_season?: string;
+  /** Circuit 2: continuous rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_rating3_continuous_a?: string;
+  /** Circuit 2: short-time rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_rating3_emergency_a?: string;
+  /** Circuit 2: season of its rating 4. Text. On the line’s first row. */
+  c2_rating4_season?: string;
+  /** Circuit 2: continuous rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_rating4_continuous_a?: string;
+  /** Circuit 2: short-time rating in that season, A. Number, with the file’s decimal sign. On the line’s first row. */
+  c2_rating4_emergency_a?: string;
+  /** Circuit 2: where the values come from. One of a list. On the line’s first row. */
+  c2_basis_kind?: string;
+  /** Circuit 2: state of the line that they describe. One of a list. On the line’s first row. */
+  c2_basis_status?: string;
+  /** Circuit 2: who answers for the values. Text. On the line’s first row. */
+  c2_basis_engineer?: string;
+  /** Circuit 2: day of the calculation or measurement, YYYY-MM-DD. Text. On the line’s first row. */
+  c2_basis_date?: string;
+  /** Declared coupling of the two circuits, r0m, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  r0m?: string;
+  /** Declared coupling of the two circuits, x0m, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  x0m?: string;
+  /** Declared coupling of the two circuits, b0m, in its unit. Number, with the file’s decimal sign. On the line’s first row. */
+  b0m?: string;
+  /** Unit of r0m where it is another one. One of a list. On the line’s first row. */
+  r0m_unit?: string;
+  /** Unit of x0m where it is another one. One of a list. On the line’s first row. */
+  x0m_unit?: string;
+  /** Unit of b0m where it is another one. One of a list. On the line’s first row. */
+  b0m_unit?: string;
+  /** Unit of the resistances and reactances. One of a list. */
+  impedance_unit?: string;
+  /** Unit of the susceptances. One of a list. */
+  susceptance_unit?: string;
+  /** Power base of pu and % values, MVA; the owner’s when empty. Number, with the file’s decimal sign. */
+  base_mva?: string;
+  /** Voltage base of pu and % values, kV; the nominal voltage when empty. Number, with the file’s decimal sign. */
+  base_kv?: string;
+  /** Unit of a cable’s resistances and reactances where it is another one. One of a list. */
+  cable_impedance_unit?: string;
+  /** Unit of a cable’s susceptances where it is another one. One of a list. */
+  cable_susceptance_unit?: string;
+  /** Cable section, circuit 1: r1 from the maker’s sheet, in its unit. Number, with the file’s decimal sign. */
+  cable_r1?: string;
+  /** Cable section, circuit 1: x1 from the maker’s sheet, in its unit. Number, with the file’s decimal sign. */
+  cable_x1?: string;
+  /** Cable section, circuit 1: b1 from the maker’s sheet, in its unit. Number, with the file’s decimal sign. */
+  cable_b1?: string;
+  /** Cable section, circuit 1: r0 from the maker’s sheet, in its unit. Number, with the file’s decimal sign. */
+  cable_r0?: string;
+  /** Cable section, circuit 1: x0 from the maker’s sheet, in its unit. Number, with the file’s decimal sign. */
+  cable_x0?: string;
+  /** Cable section, circuit 1: b0 from the maker’s sheet, in its unit. Number, with the file’s decimal sign. */
+  cable_b0?: string;
+  /** Cable section, circuit 1: unit of r1 where it is another one. One of a list. */
+  cable_r1_unit?: string;
+  /** Cable section, circuit 1: unit of x1 where it is another one. One of a list. */
+  cable_x1_unit?: string;
+  /** Cable section, circuit 1: unit of b1 where it is another one. One of a list. */
+  cable_b1_unit?: string;
+  /** Cable section, circuit 1: unit of r0 where it is another one. One of a list. */
+  cable_r0_unit?: string;
+  /** Cable section, circuit 1: unit of x0 where it is another one. One of a list. */
+  cable_x0_unit?: string;
+  /** Cable section, circuit 1: unit of b0 where it is another one. One of a list. */
+  cable_b0_unit?: string;
+  /** Cable section, circuit 2: r1 from the maker’s sheet, in its unit. Number, with the file’s decimal sign. */
+  c2_cable_r1?: string;
+  /** Cable section, circuit 2: x1 from the maker’s sheet, in its unit. Number, with the file’s decimal sign. */
+  c2_cable_x1?: string;
+  /** Cable section, circuit 2: b1 from the maker’s sheet, in its unit. Number, with the file’s decimal sign. */
+  c2_cable_b1?: string;
+  /** Cable section, circuit 2: r0 from the maker’s sheet, in its unit. Number, with the file’s decimal sign. */
+  c2_cable_r0?: string;
+  /** Cable section, circuit 2: x0 from the maker’s sheet, in its unit. Number, with the file’s decimal sign. */
+  c2_cable_x0?: string;
+  /** Cable section, circuit 2: b0 from the maker’s sheet, in its unit. Number, with the file’s decimal sign. */
+  c2_cable_b0?: string;
+  /** Cable section, circuit 2: unit of r1 where it is another one. One of a list. */
+  c2_cable_r1_unit?: string;
+  /** Cable section, circuit 2: unit of x1 where it is another one. One of a list. */
+  c2_cable_x1_unit?: string;
+  /** Cable section, circuit 2: unit of b1 where it is another one. One of a list. */
+  c2_cable_b1_unit?: string;
+  /** Cable section, circuit 2: unit of r0 where it is another one. One of a list. */
+  c2_cable_r0_unit?: string;
+  /** Cable section, circuit 2: unit of x0 where it is another one. One of a list. */
+  c2_cable_x0_unit?: string;
+  /** Cable section, circuit 2: unit of b0 where it is another one. One of a list. */
+  c2_cable_b0_unit?: string;
+}

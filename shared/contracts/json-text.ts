@@ -8,13 +8,14 @@ import type { PointerFault } from './faults';
 import { FORBIDDEN_KEY, forbiddenKey, MAX_DEPTH, notFinite, tooDeep } from './plain-data';
 
 /** What came of a JSON text. */
-export type JsonText =
-  | {
-      ok: true;
-      value: unknown;
-      /** pointer → digits, where they are not the number's shortest form */ written: Record<string, string>;
-    }
-  | { ok: false; faults: PointerFault[] };
+export interface JsonText {
+  /** The value; undefined where the text could not be read to its end. */
+  value: unknown;
+  /** Pointer → digits, where they are not the number's shortest form. */
+  written: Record<string, string>;
+  /** None when the text is without fault. Numbers that cannot be held stand as null or 0 in the value. */
+  faults: PointerFault[];
+}
 
 /** Thrown inside this file only: the text cannot be read past this place. */
 class Stop {
@@ -235,19 +236,19 @@ class Reader {
 /**
  * Reads a JSON text.
  * @param text the text, without a byte order mark
- * @returns the value with the digits as written; or every fault that reading could reach
+ * @returns the value with the digits as written, and every fault that reading could reach
  */
 export function readJsonText(text: string): JsonText {
   const reader = new Reader(text);
+  const { faults, written } = reader;
   try {
-    const value = reader.whole();
-    if (reader.faults.length === 0) return { ok: true, value, written: reader.written };
+    return { value: reader.whole(), written, faults };
   } catch (e) {
     if (!(e instanceof Stop)) throw e;
     const message = `Not valid JSON at ${reader.place(e.at)}: ${e.message}`;
     // The nesting fault has said it already, with its pointer.
-    if (!reader.faults.some((f) => f.pointer === reader.pointer()))
-      reader.faults.push({ pointer: reader.pointer(), value: null, expected: 'JSON', message });
+    if (!faults.some((f) => f.pointer === reader.pointer()))
+      faults.push({ pointer: reader.pointer(), value: null, expected: 'JSON', message });
+    return { value: undefined, written, faults };
   }
-  return { ok: false, faults: reader.faults };
 }

@@ -43,37 +43,41 @@ export function tooDeep(pointer: string): PointerFault {
   };
 }
 
+/** What data are in themselves, whatever their schema. */
+export interface PlainData {
+  faults: PointerFault[];
+  /** False where they are too deep or too many to be looked into further. */
+  readable: boolean;
+}
+
 /**
- * Faults of data in themselves, whatever their schema.
+ * Looks at data before a schema does.
  * @param data anything that came from outside as JSON
- * @param pointer JSON Pointer of `data` in the whole
+ * @returns faults of numbers and keys, and whether a schema may look at the data
  */
-export function plainDataFaults(data: unknown, pointer = ''): PointerFault[] {
-  const faults: PointerFault[] = [];
+export function plainData(data: unknown): PlainData {
+  const out: PlainData = { faults: [], readable: true };
   let seen = 0;
   const visit = (value: unknown, at: string, depth: number): void => {
     seen += 1;
     if (seen > LIMITS.values) return;
-    if (typeof value === 'number' && !Number.isFinite(value)) faults.push(notFinite(at, String(value)));
+    if (typeof value === 'number' && !Number.isFinite(value)) out.faults.push(notFinite(at, String(value)));
     if (typeof value !== 'object' || value === null) return;
     if (depth >= MAX_DEPTH) {
-      faults.push(tooDeep(at));
+      out.faults.push(tooDeep(at));
+      out.readable = false;
       return;
     }
     if (Array.isArray(value)) value.forEach((v, i) => visit(v, `${at}/${i}`, depth + 1));
     else
       for (const key of Object.keys(value)) {
-        if (key === FORBIDDEN_KEY) faults.push(forbiddenKey(`${at}/${key}`));
+        if (key === FORBIDDEN_KEY) out.faults.push(forbiddenKey(`${at}/${key}`));
         else visit((value as Record<string, unknown>)[key], `${at}/${pointerToken(key)}`, depth + 1);
       }
   };
-  visit(data, pointer, 0);
-  if (seen > LIMITS.values)
-    faults.push({
-      pointer,
-      value: null,
-      expected: `at most ${LIMITS.values} values`,
-      message: 'There is more here than one line can hold.',
-    });
-  return faults;
+  visit(data, '', 0);
+  if (seen <= LIMITS.values) return out;
+  const message = 'There is more here than one line can hold.';
+  out.faults.push({ pointer: '', value: null, expected: `at most ${LIMITS.values} values`, message });
+  return { ...out, readable: false };
 }

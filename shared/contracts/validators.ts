@@ -1,8 +1,9 @@
 /** The filing's schemas as functions, the same in browser, server and command line. */
 import * as compiled from './filing-validators.generated.js';
 import type { Validator } from './filing-validators.generated.js';
+import { inOrder } from './faults';
 import type { PointerFault } from './faults';
-import { plainDataFaults } from './plain-data';
+import { plainData } from './plain-data';
 import { schemaFaults } from './schema-faults';
 
 /**
@@ -12,10 +13,10 @@ import { schemaFaults } from './schema-faults';
  * @returns the faults, none when the data hold
  */
 export function faultsBy(validate: Validator, data: unknown): PointerFault[] {
-  const plain = plainDataFaults(data);
-  // Data that are not even plain are not looked into further: a schema has nothing to add.
-  if (plain.length > 0) return plain;
-  return validate(data) ? [] : schemaFaults(validate.errors ?? [], data);
+  const plain = plainData(data);
+  if (!plain.readable) return plain.faults;
+  const bySchema = validate(data) ? [] : schemaFaults(validate.errors ?? [], data);
+  return inOrder([...plain.faults, ...bySchema]);
 }
 
 /** The filing's own schema as Ajv's function. Whole filings are read line by line: see shared/filing/read-filing. */

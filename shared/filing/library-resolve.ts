@@ -53,19 +53,29 @@ function incomplete(row: LibraryConductor, pointer: string): PointerFault {
   };
 }
 
+/**
+ * The fault of a conductor that names the library wrongly.
+ * @param c a conductor that holds by schema
+ * @param pointer JSON Pointer of the conductor
+ * @returns nothing when its data are given, or the library has them
+ */
+export function libraryFaults(c: Conductor, pointer: string, library: ConductorLibrary): PointerFault[] {
+  if (c.library === undefined) return [];
+  const row = indexOf(library).get(c.library.normalize('NFC'));
+  const at = `${pointer}/library`;
+  if (!row) return [unknown(c.library, at, library)];
+  return isChoosable(row) ? [] : [incomplete(row, at)];
+}
+
 /** Looks up one conductor; faults and notices go to `out`. */
 function resolve(c: Conductor, pointer: string, library: ConductorLibrary, out: Resolved): Conductor {
-  if (c.library === undefined) return c;
-  const row = indexOf(library).get(c.library.normalize('NFC'));
+  const row = c.library === undefined ? undefined : indexOf(library).get(c.library.normalize('NFC'));
   const data = row && handbookData(row, c.temperatureC ?? 20);
-  if (data) {
-    const message = `The data of ${row.name} at ${data.temperatureC}\u2009°C are copied from library ${library.version}.`;
-    out.notices.push({ code: 'library-copied', pointer, message });
-    return data;
-  }
-  const at = `${pointer}/library`;
-  out.faults.push(row ? incomplete(row, at) : unknown(c.library, at, library));
-  return c;
+  out.faults.push(...libraryFaults(c, pointer, library));
+  if (!data) return c;
+  const message = `The data of ${row.name} at ${data.temperatureC}\u2009°C are copied from library ${library.version}.`;
+  out.notices.push({ code: 'library-copied', pointer, message });
+  return data;
 }
 
 /**

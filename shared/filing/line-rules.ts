@@ -108,6 +108,15 @@ function mutualCircuits(line: FilingLine, ofLine: readonly number[]): PointerFau
 }
 
 /**
+ * Faults of a section in itself beyond its schema.
+ * @param s a section whose conductors and positions hold by schema
+ * @param at JSON Pointer of the section
+ */
+export function sectionRuleFaults(s: Section, at: string): PointerFault[] {
+  return [...positionConductors(s, at), ...phases(s, at), ...cableEntries(s, at)];
+}
+
+/**
  * Faults of a line beyond its schema.
  * @param line a line that holds by schema
  * @returns faults with pointers from the line
@@ -116,12 +125,7 @@ export function lineRuleFaults(line: FilingLine): PointerFault[] {
   const ofLine = circuitsOfLine(line);
   const ofSections = line.sections.flatMap((s, i) => {
     const at = `/sections/${i}`;
-    return [
-      ...positionConductors(s, at),
-      ...phases(s, at),
-      ...sectionCircuits(s, at, ofLine),
-      ...cableEntries(s, at),
-    ];
+    return [...sectionRuleFaults(s, at), ...sectionCircuits(s, at, ofLine)];
   });
   return [...ofSections, ...declaredCircuits(line, ofLine), ...mutualCircuits(line, ofLine)];
 }

@@ -9,6 +9,7 @@ import { withDefaults } from './defaults';
 import { resolveLibrary } from './library-resolve';
 import { lineRuleFaults } from './line-rules';
 import { normaliseLine } from './normalise-line';
+import { partialRuleFaults } from './partial-rules';
 import type { NormalisedFiling, NormalisedLine, Notice, OwnerDefaults, WrittenDigits } from './types';
 
 /** What a filing is read with. */
@@ -56,7 +57,8 @@ export function readLine(json: unknown, context: ReadLineContext): ReadLine {
     faults: inOrder(moved(faults, pointer)),
   });
   const bySchema = lineFaults(json);
-  if (bySchema.length > 0) return failed(bySchema);
+  if (bySchema.length > 0)
+    return failed([...bySchema, ...partialRuleFaults(json, bySchema, context.library)]);
   const given = json as FilingLine;
   const resolved = resolveLibrary(given, context.library);
   const byRules = [...resolved.faults, ...lineRuleFaults(given)];
