@@ -1,3 +1,4 @@
+import type { LibraryConductor } from '../library/types';
 import type { FindingParameter, LineParameter, MutualParameter } from './parameters';
 
 /** The four families of findings. */
@@ -209,4 +210,6 @@ export interface CheckOptions {
   matrices?: boolean;
   /** Causes are left out when false; true when absent. */
   causes?: boolean;
+  /** Conductors that may have been taken for the filed one; the starting library when absent. */
+  library?: readonly LibraryConductor[];
 }

@@ -1,0 +1,136 @@
+import { figure, withUnit } from '../../words';
+import type { PhasePosition } from '../../../engine/index';
+import type { Outcome } from '../bench';
+import { fitOne, gridOf } from './fit-one';
+import type { Variant, VariantContext } from './variant';
+import { ENGINE_MODEL, changePhases, overheadSections, sectionPointer } from './variant';
+
+/** Sides of bundles that are built, m. */
+const BUILT_SIDES_M = [0.2, 0.25, 0.3, 0.3048, 0.35, 0.375, 0.4, 0.45, 0.4572, 0.5, 0.55, 0.6] as const;
+
+/** Ways in which a side is mistaken for another length: half, diagonal, inches. */
+const SIDE_FACTORS = [0.5, 2, Math.SQRT2, Math.SQRT1_2, 0.0254] as const;
+
+const MOST = 8;
+
+/** Another number of subconductors, or another side of the bundle, in every section. */
+export function bundleSlips(context: VariantContext): Variant[] {
+  const filed = filedBundle(context);
+  if (filed === null) return [];
+  return filed.bundleCount === 1
+    ? bundleForSingle(context, filed)
+    : [...countSlips(context, filed), ...sideSlips(context, filed)];
+}
+
+interface Filed {
+  position: PhasePosition;
+  where: string;
+  bundleCount: number;
+  sideM: number;
+}
+
+function filedBundle(context: VariantContext): Filed | null {
+  for (const { section, index } of overheadSections(context)) {
+    const at = section.positions.findIndex(({ kind }) => kind === 'phase');
+    const position = section.positions[at];
+    if (position?.kind !== 'phase') continue;
+    const where = `${sectionPointer(context, index)}/positions/${at}`;
+    return { position, where, bundleCount: position.bundleCount, sideM: position.bundleSpacingM };
+  }
+  return null;
+}
+
+function solve(context: VariantContext, bundleCount: number, bundleSpacingM: number): Outcome | null {
+  return context.bench.changed(changePhases((position) => ({ ...position, bundleCount, bundleSpacingM })));
+}
+
+const COMMON = { in: 'geometry', model: ENGINE_MODEL } as const;
+
+function countSlips(context: VariantContext, filed: Filed): Variant[] {
+  const counts = Array.from({ length: MOST }, (_, index) => index + 1).filter((n) => n !== filed.bundleCount);
+  return counts.flatMap((bundleCount): Variant[] => {
+    const side = bundleCount === 1 ? 0 : filed.sideM;
+    const outcome = solve(context, bundleCount, side);
+    if (outcome === null) return [];
+    const likely = bundleCount <= 4 ? -Math.log(3) : -Math.log(3) - 1.5;
+    const words = `each phase has ${bundleCount} subconductor${bundleCount === 1 ? '' : 's'}, not ${filed.bundleCount}`;
+    return [
+      {
+        ...COMMON,
+        code: 'bundle-count',
+        outcome,
+        prior: -0.7 + likely,
+        freedom: 0,
+        where: filed.where,
+        corrected: { bundleCount },
+        words,
+      },
+    ];
+  });
+}
+
+function bundleForSingle(context: VariantContext, filed: Filed): Variant[] {
+  return [2, 3, 4].flatMap((bundleCount) =>
+    BUILT_SIDES_M.flatMap((side): Variant[] => {
+      const outcome = solve(context, bundleCount, side);
+      if (outcome === null) return [];
+      const words = `each phase has ${bundleCount} subconductors ${withUnit(side, 'm', 4)} apart, not one`;
+      return [
+        {
+          ...COMMON,
+          code: 'bundle-count',
+          outcome,
+          prior: -1 - Math.log(3 * BUILT_SIDES_M.length),
+          freedom: 0,
+          where: filed.where,
+          corrected: { bundleCount, bundleSpacingM: side },
+          words,
+        },
+      ];
+    }),
+  );
+}
+
+function sideSlips(context: VariantContext, filed: Filed): Variant[] {
+  const make = (side: number, freedom: number, prior: number): Variant[] => {
+    const outcome = solve(context, filed.bundleCount, side);
+    if (outcome === null) return [];
+    const words = `the bundle’s side is ${withUnit(side, 'm', 4)}, not ${withUnit(filed.sideM, 'm', 4)}`;
+    return [
+      {
+        ...COMMON,
+        code: 'bundle-spacing',
+        outcome,
+        prior,
+        freedom,
+        where: filed.where,
+        corrected: { bundleSpacingM: Number(side.toPrecision(6)) },
+        words,
+      },
+    ];
+  };
+  const known = [...BUILT_SIDES_M, ...SIDE_FACTORS.map((factor) => factor * filed.sideM)];
+  const others = known.filter((side) => Math.abs(side / filed.sideM - 1) > 0.01 && side > 0.02 && side < 5);
+  return [
+    ...others.flatMap((side) => make(side, 0, -1 - Math.log(others.length))),
+    ...fittedSides(context, filed).flatMap((side) => make(side, 1, -2.5)),
+  ];
+}
+
+/** The side that the declared X1 itself would need. */
+function fittedSides(context: VariantContext, filed: Filed): number[] {
+  const circuit = context.declared.findIndex((declared) => declared?.x1 !== undefined);
+  const wanted = context.declared[circuit]?.x1;
+  if (wanted === undefined || wanted <= 0) return [];
+  const roots = fitOne(
+    (side) => {
+      const value = solve(context, filed.bundleCount, side)?.circuits[circuit]?.x1;
+      return value === undefined ? null : value / wanted - 1;
+    },
+    gridOf(0.05, 3, 5, true),
+    6,
+  );
+  return roots.filter(
+    (side) => Math.abs(side / filed.sideM - 1) > 0.01 && figure(side) !== figure(filed.sideM),
+  );
+}

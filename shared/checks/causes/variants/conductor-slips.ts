@@ -1,0 +1,146 @@
+import type { ConductorData } from '../../../engine/index';
+import type { SectionChange } from '../bench';
+import type { DeclaredParameter } from '../problem';
+import { isResistance, isShunt } from '../problem';
+import { gmrOf } from './gmr-of';
+import type { Variant, VariantContext } from './variant';
+import { ENGINE_MODEL, SHORTCUT_MODEL, changeConductors, changePhases } from './variant';
+
+interface Recipe {
+  code: Variant['code'];
+  change: SectionChange;
+  reach?: Variant['reach'];
+  prior: number;
+  model: number;
+  words: string;
+}
+
+const isReactance = (parameter: DeclaredParameter): boolean =>
+  !isShunt(parameter) && !isResistance(parameter);
+
+const withGmr = (gmr: (conductor: ConductorData) => number): SectionChange =>
+  // A tube's reactance comes from its own shape: only as a handbook conductor can it be given another GMR.
+  changeConductors((conductor) => ({
+    ...conductor,
+    model: 'handbook',
+    gmrMm: gmr(conductor),
+    acResistanceOhmPerKm: conductor.acResistanceOhmPerKm ?? conductor.dcResistance20OhmPerKm ?? 0.1,
+  }));
+
+const RECIPES: readonly Recipe[] = [
+  {
+    code: 'radius-for-gmr',
+    change: withGmr((conductor) => conductor.diameterMm / 2),
+    reach: isReactance,
+    prior: -0.5,
+    model: ENGINE_MODEL,
+    words: 'the radius was used in place of the GMR',
+  },
+  {
+    code: 'diameter-for-radius',
+    change: changeConductors((conductor) => ({ ...conductor, diameterMm: 2 * conductor.diameterMm })),
+    reach: isShunt,
+    prior: -0.7,
+    model: ENGINE_MODEL,
+    words: 'the diameter was used in place of the radius',
+  },
+  {
+    code: 'gmr-for-radius',
+    change: changeConductors((conductor) => ({
+      ...conductor,
+      diameterMm: 2 * gmrOf(conductor),
+      coreDiameterMm: 0,
+    })),
+    reach: isShunt,
+    prior: -0.7,
+    model: ENGINE_MODEL,
+    words: 'the GMR was used in place of the radius in the capacitance',
+  },
+  {
+    code: 'single-conductor',
+    change: changePhases((position) =>
+      position.bundleCount === 1 ? null : { ...position, bundleCount: 1, bundleSpacingM: 0 },
+    ),
+    prior: -0.3,
+    model: ENGINE_MODEL,
+    words: 'one conductor was taken for the whole bundle',
+  },
+];
+
+/** Diameter used as radius throughout: the GMR that was worked out from it is doubled too, three ways. */
+const DOUBLED_GMR: readonly ((conductor: ConductorData) => number)[] = [
+  (conductor) => 2 * gmrOf(conductor),
+  (conductor) => 0.7788 * conductor.diameterMm,
+  (conductor) => conductor.diameterMm,
+];
+
+const doubled: readonly Recipe[] = DOUBLED_GMR.map((gmr) => ({
+  code: 'diameter-for-radius' as const,
+  change: (section, index) => {
+    const other = withGmr(gmr)(section, index);
+    return other === null
+      ? null
+      : changeConductors((conductor) => ({ ...conductor, diameterMm: 2 * conductor.diameterMm }))(
+          other,
+          index,
+        );
+  },
+  reach: (parameter: DeclaredParameter) => !isResistance(parameter),
+  prior: -1.7,
+  model: ENGINE_MODEL,
+  words: 'the diameter was used in place of the radius, in the GMR too',
+}));
+
+/** Slips with radius, diameter, GMR and the number of subconductors. */
+export function conductorSlips({ bench }: VariantContext): Variant[] {
+  return [...RECIPES, ...doubled].flatMap(({ change, ...rest }) => {
+    const outcome = bench.changed(change);
+    return outcome === null ? [] : [{ ...rest, in: 'declared' as const, outcome, freedom: 0 }];
+  });
+}
+
+/** Resistance slips: d.c. for a.c., 20 °C for the operating temperature. */
+export function resistanceSlips({ bench }: VariantContext): Variant[] {
+  const recipes: { code: Variant['code']; of: (conductor: ConductorData) => number | null; words: string }[] =
+    [
+      { code: 'dc-resistance', of: dcAtTemperature, words: 'it is the d.c. resistance' },
+      { code: 'resistance-at-20c', of: acAt20, words: 'it is the resistance at 20\u2009°C' },
+      {
+        code: 'resistance-at-20c',
+        of: (conductor) => conductor.dcResistance20OhmPerKm ?? null,
+        words: 'it is the d.c. resistance at 20\u2009°C',
+      },
+    ];
+  return recipes.flatMap(({ code, of, words }): Variant[] => {
+    const outcome = bench.changed(
+      changeConductors((conductor) => {
+        const resistance = of(conductor);
+        if (resistance === null) return null;
+        // Only resistance is read from this variant, so a tube may become a handbook conductor of the same size.
+        return { ...conductor, model: 'handbook', gmrMm: gmrOf(conductor), acResistanceOhmPerKm: resistance };
+      }),
+    );
+    if (outcome === null) return [];
+    const model = code === 'dc-resistance' ? SHORTCUT_MODEL : ENGINE_MODEL;
+    return [{ code, in: 'declared', outcome, reach: isResistance, prior: -0.6, model, freedom: 0, words }];
+  });
+}
+
+function dcAtTemperature(conductor: ConductorData): number | null {
+  const { dcResistance20OhmPerKm: dc, temperatureC } = conductor;
+  return dc === undefined || temperatureC === undefined
+    ? null
+    : dc * temperatureFactor(conductor, temperatureC);
+}
+
+function acAt20(conductor: ConductorData): number | null {
+  const { acResistanceOhmPerKm: ac, temperatureC, model } = conductor;
+  if (model === 'tube') return conductor.dcResistance20OhmPerKm ?? null;
+  return ac === undefined || temperatureC === undefined
+    ? null
+    : ac / temperatureFactor(conductor, temperatureC);
+}
+
+function temperatureFactor(conductor: ConductorData, temperatureC: number): number {
+  return 1 + (conductor.temperatureCoefficientPerK ?? 0.00403) * (temperatureC - 20);
+}
