@@ -1,3 +1,4 @@
+import type { Fault } from '#shared/contracts/api.generated';
 import { problemName, type Problem, type ProblemName } from '#shared/contracts/errors';
 
 /** A request that the server refused, with its own words for why. Recognise kinds by `type`, never by text. */
@@ -5,6 +6,8 @@ export class ApiProblem extends Error {
   readonly type: string;
   readonly status: number;
   readonly title: string;
+  /** Faults of fields, of a problem that has them. */
+  readonly faults: readonly Fault[];
   /** The problem's short name, or undefined for one that our contract does not list. */
   readonly problem: ProblemName | undefined;
   /** Everything the server sent: faults of fields, what changed meanwhile. */
@@ -16,6 +19,7 @@ export class ApiProblem extends Error {
     this.type = body.type;
     this.status = body.status;
     this.title = body.title;
+    this.faults = body.errors ?? [];
     this.problem = problemName(body.type);
     this.body = body;
   }

@@ -1,51 +1,49 @@
 import { queryOptions, useMutation, useQueryClient, useSuspenseQuery } from '@tanstack/react-query';
-import { ApiProblem } from './problem';
+import type {
+  Membership,
+  NextStep,
+  Session as SessionAnswer,
+  TotpEnrolment,
+} from '#shared/contracts/api.generated';
 import { signedInAgain } from './session-loss';
 import { keepCsrfToken, send } from './transport';
 
-export type Role = 'applicant' | 'reviewer' | 'administrator';
+export type Role = Membership['role'];
 
-export interface Membership {
-  organisationId: string;
-  organisationName: string;
+/** Somebody signed in, for an organisation and in a role. */
+export interface Session extends SessionAnswer {
+  user: NonNullable<SessionAnswer['user']>;
   role: Role;
+  organisation: NonNullable<SessionAnswer['organisation']>;
 }
 
-/** Who is signed in, for which organisation and in which role. */
-export interface Session {
-  user: { id: string; name: string; email: string };
-  role: Role;
-  organisation: { id: string; name: string };
-  memberships: Membership[];
-  csrfToken: string;
-  demo?: boolean;
-}
-
-/** What the first step of the sign-in leads to. */
-export type SignInStep = { next: 'in'; session: Session } | { next: 'totp' };
+/** What a step of the sign-in leads to. */
+export type SignInStep = { next: 'in'; session: Session } | NextStep;
 
 const URL = '/api/session';
 
-async function readSession(response: Response): Promise<Session | null> {
-  const body = (await response.json()) as Omit<Session, 'user'> & { user: Session['user'] | null };
-  keepCsrfToken(body.csrfToken);
-  return body.user ? { ...body, user: body.user } : null;
+function signedIn(answer: SessionAnswer): Session | null {
+  const { user, role, organisation } = answer;
+  return user && role && organisation ? { ...answer, user, role, organisation } : null;
+}
+
+async function readSession(response: Response): Promise<SessionAnswer> {
+  const answer = (await response.json()) as SessionAnswer;
+  keepCsrfToken(answer.csrfToken ?? undefined);
+  return answer;
 }
 
 async function getSession(signal?: AbortSignal): Promise<Session | null> {
-  try {
-    return await readSession(await send({ method: 'GET', url: URL, signal, expectsSession: false }));
-  } catch (error) {
-    if (error instanceof ApiProblem && error.status === 401) return null;
-    throw error;
-  }
+  const response = await send({ method: 'GET', url: URL, signal, expectsSession: false });
+  return signedIn(await readSession(response));
 }
 
 async function post(path: string, body: unknown): Promise<SignInStep> {
   const response = await send({ method: 'POST', url: URL + path, body, expectsSession: false });
-  if (response.status === 202) return { next: 'totp' };
-  const session = await readSession(response);
-  if (!session) throw new Error('The sign-in was answered without a session.');
+  if (response.status === 202) return (await response.json()) as NextStep;
+  const session = signedIn(await readSession(response));
+  if (!session)
+    throw new Error('Your account belongs to no organisation. Ask an administrator to add you to one.');
   return { next: 'in', session };
 }
 
@@ -78,6 +76,17 @@ export function useSignIn() {
   });
 }
 
+/** Asks for the secret that an authenticator is set up with, where the role requires a second step. */
+export function useEnrolTotp() {
+  return useMutation({
+    mutationFn: async () => {
+      const url = `${URL}/totp-enrolment`;
+      const response = await send({ method: 'POST', url, expectsSession: false });
+      return (await response.json()) as TotpEnrolment;
+    },
+  });
+}
+
 export function useSignOut() {
   const client = useQueryClient();
   return useMutation({
@@ -95,7 +104,11 @@ export function useSwitchOrganisation() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: async (organisationId: string) =>
-      readSession(await send({ method: 'PUT', url: `${URL}/organisation`, body: { organisationId } })),
+      signedIn(
+        await readSession(
+          await send({ method: 'PUT', url: `${URL}/organisation`, body: { organisationId } }),
+        ),
+      ),
     onSuccess: (session) => {
       client.clear();
       client.setQueryData(sessionQuery().queryKey, session);
