@@ -36,6 +36,7 @@ export function securityHeaders(secure: boolean): RequestHandler {
       },
     },
     strictTransportSecurity: secure ? { maxAge: 31_536_000, includeSubDomains: true } : false,
+    xFrameOptions: { action: 'deny' },
     referrerPolicy: { policy: 'same-origin' },
     crossOriginEmbedderPolicy: false,
   });

@@ -1,0 +1,32 @@
+import { createHmac } from 'node:crypto';
+import type { Config } from '../config/config';
+import { migrate } from '../database/migrate';
+import { makeDataSource } from '../database/data-source';
+import { seedBaseline } from '../database/seeds/baseline';
+import { User } from '../entities/people.entities';
+
+/** The owner's calendar until an administrator sets another. */
+const FIRST_TIME_ZONE = 'UTC';
+
+export interface Prepared {
+  /** Whether there is anybody at all. */
+  empty: boolean;
+}
+
+/** Migrates and lays what every installation begins with: rules, conductors, a calendar. */
+export async function prepareDatabase({ databaseUrl, sessionSecret }: Config, now: Date): Promise<Prepared> {
+  await migrate(databaseUrl, sessionSecret);
+  const owner = makeDataSource(databaseUrl, 'owner');
+  await owner.initialize();
+  try {
+    await owner.transaction((manager) => seedBaseline(manager, { now, timeZone: FIRST_TIME_ZONE }));
+    return { empty: !(await owner.manager.exists(User)) };
+  } finally {
+    await owner.destroy();
+  }
+}
+
+/** The word that opens the first-run set-up: the same on every node, known to who sees the server's output. */
+export function setUpTokenOf(secret: string): string {
+  return createHmac('sha256', secret).update('first-run set-up').digest('base64url');
+}
