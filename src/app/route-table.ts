@@ -17,7 +17,27 @@ export interface RouteModule {
 }
 
 /** Pages that need nobody signed in. */
-export const OPEN_ROUTES: readonly RouteEntry[] = [];
+export const OPEN_ROUTES: readonly RouteEntry[] = [
+  { path: '/sign-in', lazy: () => import('./routes/sign-in') },
+  { path: '/set-up', lazy: () => import('./routes/set-up') },
+  { path: '/ask-for-account', lazy: () => import('./routes/ask-for-account') },
+  { path: '/new-password', lazy: () => import('./routes/new-password') },
+];
 
 /** Pages inside the frame with the bar on top. */
-export const ROUTES: readonly RouteEntry[] = [];
+export const ROUTES: readonly RouteEntry[] = [
+  { path: '/applications', lazy: () => import('./routes/applications') },
+  { path: '/applications/new', roles: ['applicant'], lazy: () => import('./routes/new-application') },
+  { path: '/applications/:number', lazy: () => import('./routes/application') },
+  { path: '/applications/:number/edit', roles: ['applicant'], lazy: () => import('./routes/edit-application') },
+  {
+    path: '/applications/:number/lines/:lineKey',
+    roles: ['applicant'],
+    lazy: () => import('./routes/line-form'),
+  },
+  {
+    path: '/applications/:number/revisions/:letter/lines/:lineKey',
+    lazy: () => import('./routes/filed-line'),
+  },
+  { path: '/mail-room', lazy: () => import('./routes/mail-room') },
+];

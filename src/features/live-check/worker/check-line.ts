@@ -1,4 +1,4 @@
-import { checkLine } from '#shared/checks/check-filing';
+import { checkLine } from '#shared/checks/check-line';
 import { readLine } from '#shared/filing/read-filing';
 import type { CheckBasis, CheckOutcome, CheckQuestion } from './messages';
 
@@ -8,5 +8,5 @@ export function checkDraftLine(question: CheckQuestion, { rules, library }: Chec
   const { line, written } = question;
   const read = readLine(line, { library, owner, written });
   if (!read.ok) return { kind: 'faults', faults: read.faults };
-  return { kind: 'report', report: checkLine(read.line, rules) };
+  return { kind: 'report', report: checkLine(read.line, rules, { library: library.conductors }) };
 }
