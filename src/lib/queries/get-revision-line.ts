@@ -3,11 +3,15 @@ import type { RevisionLine } from '#shared/contracts/api.generated';
 import { call } from '../api/call';
 import { caseKey } from './case-key';
 
+const WHILE_CHECKING_MS = 1_500;
+
 export const revisionLineQuery = (number: string, letter: string, lineKey: string) =>
   queryOptions({
     queryKey: [...caseKey(number), 'revision', letter, 'line', lineKey],
     queryFn: ({ signal }): Promise<RevisionLine> =>
       call('getRevisionLine', { params: { applicationId: number, letter, lineKey }, signal }),
+    refetchInterval: ({ state: { data } }) =>
+      data?.run?.state === 'queued' || data?.run?.state === 'running' ? WHILE_CHECKING_MS : false,
   });
 
 /** A line of a revision as filed, with its values weighed and its findings. */

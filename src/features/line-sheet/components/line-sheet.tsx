@@ -1,0 +1,113 @@
+import { useId, useMemo } from 'react';
+import { useSearchParams } from 'react-router-dom';
+import type { RevisionLine } from '#shared/contracts/api.generated';
+import { Notice } from '../../../components/feedback/notice';
+import { SegmentChoice } from '../../../components/ui/segment';
+import { rowOf } from '../../../lib/balance-entries';
+import { useRevisionLine } from '../../../lib/queries/get-revision-line';
+import { arrangeFindings } from '../model/arrange-findings';
+import { readFiledLine } from '../model/filed-line';
+import { BalanceSection, type FindingActions } from './balance-section';
+import { CouplingSection } from './coupling-section';
+import { GeometrySection } from './geometry-section';
+import { LineHead } from './line-head';
+import { WholeLineSection } from './whole-line-section';
+
+interface LineSheetProps {
+  applicationNumber: string;
+  letter: string;
+  lineKey: string;
+  /** What can be done with each finding; none without it. */
+  findingActions?: FindingActions;
+}
+
+/** The sheet of a filed line: its values weighed, what does not balance and why, the geometry behind them. */
+export function LineSheet({ applicationNumber, letter, lineKey, findingActions }: LineSheetProps) {
+  const line = useRevisionLine(applicationNumber, letter, lineKey);
+  const filed = useMemo(() => readFiledLine(line.line), [line.line]);
+  const titleId = useId();
+  const circuits = filed.normalised.circuits.map((c) => c.circuit);
+  const [circuit, setCircuit] = useCircuit(circuits);
+  const arranged = arrangeFindings(line.findings, circuit, rowOf);
+  return (
+    <article className="sheet sheet-main" aria-labelledby={titleId}>
+      <LineHead line={line} filed={filed} titleId={titleId} jumps={jumpsOf(line)} />
+      <RunState line={line} />
+      {circuits.length > 1 && (
+        <div className="border-b border-rule px-4 py-3 field:px-6">
+          <SegmentChoice
+            label="Circuit"
+            value={String(circuit)}
+            onChange={(value) => setCircuit(Number(value))}
+            options={circuits.map((c) => ({
+              value: String(c),
+              label: circuitLabel(filed.filed.declared, c),
+            }))}
+          />
+        </div>
+      )}
+      <BalanceSection line={line} circuit={circuit} findingActions={findingActions} />
+      <CouplingSection
+        line={line}
+        filed={filed}
+        findings={arranged.coupling}
+        findingActions={findingActions}
+      />
+      <GeometrySection
+        line={line}
+        filed={filed}
+        findings={arranged.drawing}
+        findingActions={findingActions}
+      />
+      <WholeLineSection line={line} circuit={circuit} />
+    </article>
+  );
+}
+
+function jumpsOf(line: RevisionLine): { id: string; label: string }[] {
+  return [
+    { id: 'balance', label: 'Balance' },
+    ...(line.mutual.length > 0 ? [{ id: 'coupling', label: 'Coupling' }] : []),
+    { id: 'geometry', label: 'Geometry' },
+    { id: 'whole-line', label: 'Whole line' },
+  ];
+}
+
+function circuitLabel(declared: readonly { circuit: number; circuitId?: string }[], circuit: number): string {
+  const name = declared.find((d) => d.circuit === circuit)?.circuitId;
+  return name ? `Circuit ${circuit}, ${name}` : `Circuit ${circuit}`;
+}
+
+/** Which circuit is shown stands in the address, so that a link leads to what is meant. */
+function useCircuit(circuits: readonly number[]): [number, (circuit: number) => void] {
+  const [params, setParams] = useSearchParams();
+  const asked = Number(params.get('circuit'));
+  const circuit = circuits.includes(asked) ? asked : (circuits[0] ?? 1);
+  const choose = (next: number) =>
+    setParams(
+      (before) => {
+        const after = new URLSearchParams(before);
+        after.set('circuit', String(next));
+        return after;
+      },
+      { replace: true, preventScrollReset: true },
+    );
+  return [circuit, choose];
+}
+
+/** Says when the values are still on their way, or when the check could not be made. */
+function RunState({ line: { run } }: { line: RevisionLine }) {
+  if (run === null || run.state === 'done') return null;
+  if (run.state === 'failed') {
+    return (
+      <Notice grade="must-answer" title="The check of this revision failed." className="m-4">
+        {run.failure}
+      </Notice>
+    );
+  }
+  return (
+    <Notice title="The check is still running." className="m-4">
+      {`${run.linesChecked} of ${run.lineCount} lines are checked; the page follows by itself.`}
+    </Notice>
+  );
+}

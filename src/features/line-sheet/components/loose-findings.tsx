@@ -1,0 +1,35 @@
+import type { Finding } from '#shared/contracts/api.generated';
+import { CauseLine, LooseFinding } from '../../../components/charts/cause-line';
+import { causeLines, dispositionWords, splitMessage } from '../model/finding-words';
+import type { FindingActions } from './balance-section';
+
+/** Findings that stand in no row: of the drawing, of a section, of the whole line. */
+export function LooseFindings({
+  findings,
+  actions,
+}: {
+  findings: readonly Finding[];
+  actions?: FindingActions;
+}) {
+  return findings.map((finding) => {
+    const { says, detail } = splitMessage(finding.message);
+    const done = dispositionWords(finding);
+    const grade = finding.stands ? finding.grade : 'settled';
+    return (
+      <LooseFinding
+        key={finding.fingerprint}
+        grade={finding.grade}
+        settled={!finding.stands}
+        says={says}
+        acts={actions?.(finding)}
+      >
+        {detail && <p className="text-ink-soft">{detail}</p>}
+        {[...causeLines(finding), ...(done ? [done] : [])].map((line) => (
+          <CauseLine key={line} grade={grade}>
+            {line}
+          </CauseLine>
+        ))}
+      </LooseFinding>
+    );
+  });
+}
