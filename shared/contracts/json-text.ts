@@ -27,6 +27,11 @@ class Stop {
 
 const NUMBER = /-?(?:0|[1-9]\d*)(?:\.\d+)?(?:[eE][+-]?\d+)?/y;
 const WORD = /[+-]?[\w.#]+/y;
+const LITERALS = new Map<string, boolean | null>([
+  ['true', true],
+  ['false', false],
+  ['null', null],
+]);
 const ESCAPES: Readonly<Record<string, string>> = {
   '"': '"',
   '\\': '\\',
@@ -199,7 +204,7 @@ class Reader {
       this.at += number.length;
       return this.number(number);
     }
-    const literal = { true: true, false: false, null: null }[word];
+    const literal = LITERALS.get(word);
     if (literal === undefined && !/^[+-]?(nan|inf(inity)?)$/i.test(word))
       throw new Stop(this.instead('a value', word || undefined), this.at);
     this.at += word.length;

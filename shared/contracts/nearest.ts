@@ -33,9 +33,16 @@ function folded(text: string): string {
     .replace(/[^\p{L}\p{N}]+/gu, '');
 }
 
+const words = (text: string) =>
+  text
+    .toLowerCase()
+    .split(/[^\p{L}\p{N}/]+/u)
+    .filter(Boolean);
+
 /**
  * The names nearest to what was written, best first, at most `count`.
- * A name counts as near when a third of its letters or fewer differ, or when one holds the other.
+ * A name counts as near when a third of its letters or fewer differ, or when one holds the other,
+ * or all words of the other.
  * @returns names out of `names`, possibly none
  */
 export function nearestNames(written: string, names: readonly string[], count = 3): string[] {
@@ -43,11 +50,15 @@ export function nearestNames(written: string, names: readonly string[], count = 
   if (written.length > 80) return [];
   const wanted = folded(written);
   if (wanted === '') return [];
+  const wantedWords = words(written);
   const scored = names.map((name) => {
     const own = folded(name);
     const longer = Math.max(own.length, wanted.length);
     const limit = longer < 3 ? 0 : Math.max(1, Math.floor(longer / 3));
-    const holds = wanted.length >= 3 && (own.includes(wanted) || (own.length >= 3 && wanted.includes(own)));
+    const ownWords = words(name);
+    const allWords = wantedWords.length > 1 && wantedWords.every((w) => ownWords.includes(w));
+    const holds =
+      allWords || (wanted.length >= 3 && (own.includes(wanted) || (own.length >= 3 && wanted.includes(own))));
     const distance = editDistance(wanted, own, limit);
     return { name, score: distance <= limit ? distance : holds ? limit : Infinity };
   });
