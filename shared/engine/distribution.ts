@@ -21,7 +21,8 @@ export class Distribution {
   charge = new Float64Array(0);
 
   /** Fills all columns from a workspace that `solvePhases` left behind. */
-  fill(w: Workspace, seriesWires: number): void {
+  fill(w: Workspace): void {
+    const { seriesWires } = w;
     this.columns = w.phases;
     const size = w.wires * this.columns;
     if (this.currentR.length < size) {
@@ -73,8 +74,10 @@ export class Distribution {
       const pi = zi[row + k] as number;
       const size = -1 / (pr * pr + pi * pi);
       const at = k * columns;
-      currentR.fill(0, at, at + columns);
-      currentI.fill(0, at, at + columns);
+      for (let c = 0; c < columns; c++) {
+        currentR[at + c] = 0;
+        currentI[at + c] = 0;
+      }
       for (let j = 0; j < k; j++) {
         const ar = zr[row + j] as number;
         const ai = zi[row + j] as number;
@@ -100,7 +103,7 @@ export class Distribution {
       const row = rowStart(k);
       const inverse = -1 / (w.p[row + k] as number);
       const at = k * columns;
-      charge.fill(0, at, at + columns);
+      for (let c = 0; c < columns; c++) charge[at + c] = 0;
       for (let j = 0; j < k; j++) {
         const f = (w.p[row + j] as number) * inverse;
         const from = j * columns;

@@ -9,12 +9,13 @@ const scratch = new Float64Array(2);
  *
  * @param h height sum × √(ωμ₀/ρ), positive
  * @param x horizontal distance × √(ωμ₀/ρ), either sign
+ * @param logD natural logarithm of √(h² + x²)
  * @param out receives [∂h re, ∂h im, ∂x re, ∂x im] in these scaled coordinates
  */
-export function earthGradient(h: number, x: number, out: Float64Array): void {
+export function earthGradient(h: number, x: number, logD: number, out: Float64Array): void {
   const d2 = h * h + x * x;
   if (d2 > CARSON_LIMIT * CARSON_LIMIT) closedForm(h, x, d2, out);
-  else carsonSeries(h, x, d2, out);
+  else carsonSeries(h, x, logD, out);
 }
 
 /** F′ at both arguments: ∂h = √j·(F′₊ + F′₋), ∂x = j√j·(F′₊ − F′₋), and the image's own part. */
@@ -32,9 +33,9 @@ function closedForm(h: number, x: number, d2: number, out: Float64Array): void {
   out[3] = c * (pr - qr - pi + qi);
 }
 
-function carsonSeries(h: number, x: number, d2: number, out: Float64Array): void {
+function carsonSeries(h: number, x: number, logD: number, out: Float64Array): void {
   const theta = x === 0 ? 0 : Math.atan2(x, h);
-  const log = 0.5 * Math.log(d2) - Math.LN2;
+  const log = logD - Math.LN2;
   let hr = 0;
   let hi = 0;
   let xr = 0;
@@ -75,7 +76,7 @@ function carsonSeries(h: number, x: number, d2: number, out: Float64Array): void
     oddS = evenC * x + evenS * h;
     evenC = oddC * h - oddS * x;
     evenS = oddC * x + oddS * h;
-    if ((Math.abs(oddC) + Math.abs(oddS)) * Math.abs(b) < 1e-14) break;
+    if ((Math.abs(oddC) + Math.abs(oddS)) * Math.abs(b) < 1e-12) break;
   }
   out[0] = 2 * hr;
   out[1] = 2 * hi;

@@ -10,13 +10,16 @@ import { MU_0 } from './constants';
  * wave along the line is also taken as quasi-TEM, which wants heights far below a quarter wavelength (1 MHz: 75 m).
  */
 
-/** Half the border below which Carson's real series is used: it shares all logarithms between u₊ and u₋. */
-export const CARSON_LIMIT = 2;
+/**
+ * |u| up to which Carson's real series is used: it shares all logarithms between u₊ and u₋ and costs half of two
+ * complex series. Beyond it, cancellation would eat the digits (see `struve.ts`).
+ */
+export const CARSON_LIMIT = 8;
 
 const scratch = new Float64Array(2);
 
 /** Coefficients of Carson's series: A_k of u^(2k+1), B_k of u^(2k), and ψ_k beside ln(u/2). */
-export const TERMS = 16;
+export const TERMS = 40;
 export const ODD = new Float64Array(TERMS);
 export const EVEN = new Float64Array(TERMS);
 export const PSI = new Float64Array(TERMS);

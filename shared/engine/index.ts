@@ -26,3 +26,4 @@ export type { WeatherAssumptions } from './weather';
 export { phaseCascade, type PhaseCascade } from './phase-cascade';
 export { bundleOffsets } from './wires';
 export { conductorResistanceOhmPerKm, dcResistanceOhmPerKm } from './conductor';
+export { logarithmicGrid, sweep, withSkinEffect, type SweepCircuit, type SweepTable } from './sweep';

@@ -1,7 +1,6 @@
 import { fail, inSection, succeed } from './failures';
 import { solveSection } from './section';
 import { cascade, equivalentPi, THROUGH, uniformTwoPort } from './two-port';
-import type { Complex } from '../numerics/complex';
 import type { TwoPort } from './two-port';
 import {
   SEQUENCE_KEYS,
@@ -56,57 +55,73 @@ function solveAny(s: LineSection, frequencyHz: number, ratio: number): Result<Se
   return s.kind === 'cable' ? solveCable(s, ratio) : solveSection(s, frequencyHz);
 }
 
-/** Adds a section's values to the sums, weighted by its length. */
-function accumulate(sum: SequenceConstants, values: SequenceConstants, weight: number): void {
-  for (const key of SEQUENCE_KEYS) sum[key] += values[key] * weight;
-}
-
 function zeroConstants(): SequenceConstants {
   return { r1: 0, x1: 0, b1: 0, r0: 0, x0: 0, b0: 0 };
 }
 
-/** Length-weighted means; a cable has no coupling between its circuits that anybody declared, it counts as zero. */
-function weightedMeans(parts: readonly SectionConstants[], weights: readonly number[]): SectionConstants {
-  const count = parts[0]?.circuits.length ?? 0;
-  const circuits = Array.from({ length: count }, zeroConstants);
+/** Adds a section's values, weighted by its share of the length, to those of the line. */
+function accumulate(sum: SequenceConstants, values: SequenceConstants, weight: number): void {
+  sum.r1 += values.r1 * weight;
+  sum.x1 += values.x1 * weight;
+  sum.b1 += values.b1 * weight;
+  sum.r0 += values.r0 * weight;
+  sum.x0 += values.x0 * weight;
+  sum.b0 += values.b0 * weight;
+}
+
+function emptyMutuals(count: number): Mutual[] {
   const mutual: Mutual[] = [];
   for (let a = 1; a <= count; a++) {
     for (let b = a + 1; b <= count; b++) mutual.push({ circuits: [a, b], r0m: 0, x0m: 0, b0m: 0 });
   }
-  parts.forEach((part, s) => {
-    const weight = weights[s] ?? 0;
-    part.circuits.forEach((values, c) => accumulate(circuits[c] ?? zeroConstants(), values, weight));
-    part.mutual.forEach((values, m) => {
-      const sum = mutual[m];
-      if (!sum) return;
+  return mutual;
+}
+
+/** Length-weighted means; a cable has no coupling between its circuits that anybody declared, it counts as zero. */
+function weightedMeans(l: LineInput, parts: readonly SectionConstants[], lengthKm: number): SectionConstants {
+  const count = parts[0]?.circuits.length ?? 0;
+  const circuits: SequenceConstants[] = [];
+  for (let c = 0; c < count; c++) circuits.push(zeroConstants());
+  const mutual = emptyMutuals(count);
+  for (let s = 0; s < parts.length; s++) {
+    const part = parts[s] as SectionConstants;
+    const weight = parts.length === 1 ? 1 : (l.sections[s] as LineSection).lengthKm / lengthKm;
+    for (let c = 0; c < count; c++) {
+      accumulate(circuits[c] as SequenceConstants, part.circuits[c] as SequenceConstants, weight);
+    }
+    for (let m = 0; m < part.mutual.length; m++) {
+      const sum = mutual[m] as Mutual;
+      const values = part.mutual[m] as Mutual;
       sum.r0m += values.r0m * weight;
       sum.x0m += values.x0m * weight;
       sum.b0m += values.b0m * weight;
-    });
-  });
+    }
+  }
   return { circuits, mutual };
 }
 
-/** Equivalent pi of one sequence: [r, x, b] in Ω and µS, b of both legs together. */
-function sequencePi(
-  parts: readonly SequenceConstants[],
-  lengths: readonly number[],
-  keys: readonly ['r1' | 'r0', 'x1' | 'x0', 'b1' | 'b0'],
-): [number, number, number] {
-  let port: TwoPort = THROUGH;
-  parts.forEach((v, s) => {
-    const length = lengths[s] ?? 0;
-    const z: Complex = [v[keys[0]] * length, v[keys[1]] * length];
-    port = cascade(port, uniformTwoPort(z, [0, v[keys[2]] * length * 1e-6]));
-  });
-  const pi = equivalentPi(port);
-  return [pi.z[0], pi.z[1], (pi.yFrom[1] + pi.yTo[1]) * 1e6];
-}
-
-function circuitPi(parts: readonly SequenceConstants[], lengths: readonly number[]): PiTotals {
-  const [r, x, b] = sequencePi(parts, lengths, ['r1', 'x1', 'b1']);
-  const [r0, x0, b0] = sequencePi(parts, lengths, ['r0', 'x0', 'b0']);
-  return { r, x, b, r0, x0, b0 };
+/** Equivalent pi of one circuit, both sequences cascaded over the sections; b of both legs together. */
+function circuitPi(l: LineInput, parts: readonly SectionConstants[], circuit: number): PiTotals {
+  let one: TwoPort = THROUGH;
+  let zero: TwoPort = THROUGH;
+  for (let s = 0; s < parts.length; s++) {
+    const v = (parts[s] as SectionConstants).circuits[circuit] as SequenceConstants;
+    const length = (l.sections[s] as LineSection).lengthKm;
+    const portOne = uniformTwoPort([v.r1 * length, v.x1 * length], [0, v.b1 * length * 1e-6]);
+    const portZero = uniformTwoPort([v.r0 * length, v.x0 * length], [0, v.b0 * length * 1e-6]);
+    one = s === 0 ? portOne : cascade(one, portOne);
+    zero = s === 0 ? portZero : cascade(zero, portZero);
+  }
+  const pi = equivalentPi(one);
+  const pi0 = equivalentPi(zero);
+  return {
+    r: pi.z[0],
+    x: pi.z[1],
+    b: (pi.yFrom[1] + pi.yTo[1]) * 1e6,
+    r0: pi0.z[0],
+    x0: pi0.z[1],
+    b0: (pi0.yFrom[1] + pi0.yTo[1]) * 1e6,
+  };
 }
 
 /** Plain sums of length × per-length value. */
@@ -142,7 +157,7 @@ export function checkLine(l: LineInput, frequencyHz: number): Failure | null {
  */
 export function combineSections(l: LineInput, parts: readonly SectionConstants[]): Result<LineConstants> {
   const count = parts[0]?.circuits.length ?? 0;
-  const odd = parts.findIndex((part) => part.circuits.length !== count);
+  const odd = parts.length === 1 ? -1 : parts.findIndex((part) => part.circuits.length !== count);
   if (odd >= 0) {
     const seen = parts[odd]?.circuits.length ?? 0;
     return fail(
@@ -151,19 +166,16 @@ export function combineSections(l: LineInput, parts: readonly SectionConstants[]
       `the section has ${seen} circuits, the first one ${count}`,
     );
   }
-  const lengths = l.sections.map((s) => s.lengthKm);
-  const lengthKm = lengths.reduce((sum, length) => sum + length, 0);
-  const mean = weightedMeans(
-    parts,
-    lengths.map((length) => length / lengthKm),
-  );
-  const circuitParts = (c: number): SequenceConstants[] => parts.map((p) => p.circuits[c] ?? zeroConstants());
-  return succeed({
-    ...mean,
-    lengthKm,
-    equivalent: mean.circuits.map((_, c) => circuitPi(circuitParts(c), lengths)),
-    nominal: mean.circuits.map((values) => nominalPi(values, lengthKm)),
-  });
+  let lengthKm = 0;
+  for (const s of l.sections) lengthKm += s.lengthKm;
+  const mean = weightedMeans(l, parts, lengthKm);
+  const equivalent: PiTotals[] = [];
+  const nominal: PiTotals[] = [];
+  for (let c = 0; c < count; c++) {
+    equivalent.push(circuitPi(l, parts, c));
+    nominal.push(nominalPi(mean.circuits[c] as SequenceConstants, lengthKm));
+  }
+  return succeed({ ...mean, lengthKm, equivalent, nominal });
 }
 
 /**

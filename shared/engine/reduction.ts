@@ -1,6 +1,6 @@
-import { eliminateComplex, eliminateReal, rowStart } from '../numerics/packed';
+import { eliminateComplex, eliminateReal, invertReal, rowStart } from '../numerics/packed';
 import { fail } from './failures';
-import type { Failure, OverheadSection } from './types';
+import type { Failure } from './types';
 import type { Workspace } from './workspace';
 
 /** Condition estimates above this leave too few digits to be answered for. */
@@ -35,25 +35,29 @@ function joinBundles(a: Float64Array, leader: Int32Array, phases: number, n: num
 }
 
 /**
- * Joins the bundles and takes the ground wires out: eliminated at zero voltage when continuous, left out of Z when
- * segmented (they carry no current then) but always at ground potential in P. Afterwards the leading rows of the
- * workspace's triangles hold phase impedance (Ω/km) and phase potential coefficients.
+ * Joins the bundles in Z and takes the ground wires out at zero voltage (segmented ones, which carry no current, are
+ * not in it). Afterwards the leading rows of the triangle hold the phase impedance, Ω/km.
  *
- * @returns a failure when a matrix is singular or nearly so, or null
+ * @returns a failure when the matrix is singular or nearly so, or null
  */
-export function reduce(w: Workspace, bonding: OverheadSection['groundWireBonding']): Failure | null {
-  const n = w.wires;
-  const nz = bonding === 'segmented' ? n - w.groundWires : n;
-  if (n > w.phases) {
-    joinBundles(w.zr, w.leader, w.phases, nz);
-    joinBundles(w.zi, w.leader, w.phases, nz);
-    joinBundles(w.p, w.leader, w.phases, n);
-  }
-  const series = eliminateComplex(w.zr, w.zi, nz, w.phases);
-  if (!(series < WORST_CONDITION)) return illConditioned('series impedance', series);
-  const shunt = eliminateReal(w.p, n, w.phases);
-  if (!(shunt < WORST_CONDITION)) return illConditioned('potential coefficients', shunt);
-  return null;
+export function reduceSeries(w: Workspace): Failure | null {
+  const n = w.seriesWires;
+  joinBundles(w.zr, w.leader, w.phases, n);
+  joinBundles(w.zi, w.leader, w.phases, n);
+  const condition = eliminateComplex(w.zr, w.zi, n, w.phases);
+  return condition < WORST_CONDITION ? null : illConditioned('series impedance', condition);
+}
+
+/**
+ * Joins the bundles in P, takes the ground wires out (at ground potential, segmented or not) and inverts what is left.
+ * Afterwards the leading rows of the triangle hold the phase capacitance in units of 2πε₀.
+ *
+ * @returns a failure when the matrix is singular or nearly so, or null
+ */
+export function reduceShunt(w: Workspace): Failure | null {
+  joinBundles(w.p, w.leader, w.phases, w.wires);
+  const condition = Math.max(eliminateReal(w.p, w.wires, w.phases), invertReal(w.p, w.phases));
+  return condition < WORST_CONDITION ? null : illConditioned('potential coefficients', condition);
 }
 
 /** The failure that says that a matrix cannot be solved with any digits left. */

@@ -1,112 +1,86 @@
+import type { Complex } from '../numerics/complex';
 import { conductorSlopes, sameConductor } from './conductor-slopes';
 import { SAG_SHARE } from './constants';
 import { readSequence, solvePhases, susceptanceFactor } from './section';
 import type { UncertainInput } from './sensitivity-types';
 import { Slopes } from './slopes';
-import type { Complex } from '../numerics/complex';
 import type { ConductorData, Failure, OverheadSection, SectionConstants } from './types';
-import type { Workspace } from './workspace';
 
 const slopes = new Slopes();
 
-/** One input of a section and its slope vector (r, x, b a quantity, see `Slopes`). */
-export interface SlopeRow {
-  input: UncertainInput;
-  unit: 'm' | 'K' | 'relative';
-  position?: number;
-  conductor?: ConductorData;
-  values: Float64Array;
-}
+/**
+ * Takes one input's slopes: the vector (r, x, b a quantity, see `Slopes`) stands at `values[start …]`, times `factor`,
+ * and is only lent. `position` is −1 for inputs that belong to the whole section.
+ */
+export type SlopeVisitor = (
+  input: UncertainInput,
+  values: Float64Array,
+  start: number,
+  factor: number,
+  position: number,
+  conductor: ConductorData | null,
+) => void;
 
-/** A solved section with the slopes of all its inputs. */
-export interface SolvedSlopes {
-  constants: SectionConstants;
-  rows: SlopeRow[];
-}
+/** Slope vectors of one conductor's data, grown as needed and used again. */
+let weight = new Float64Array(0);
+let row = new Float64Array(0);
 
-/** Conductors of a section, phase conductors apart from ground wires, each with its wires. */
-interface ConductorGroup {
-  conductor: ConductorData;
-  ground: boolean;
-  position: number;
-  /** Sum of the self weights over the group's wires. */
-  weight: Float64Array;
-}
-
-/** Sums the self weights of wires that share a conductor. */
-function groupConductors(s: OverheadSection, w: Workspace): ConductorGroup[] {
-  const groups: ConductorGroup[] = [];
-  const length = slopes.length;
-  for (let i = 0; i < w.wires; i++) {
-    const index = w.position[i] as number;
-    const position = s.positions[index];
-    if (!position) continue;
-    const ground = position.kind === 'ground-wire';
-    let group = groups.find((g) => g.ground === ground && sameConductor(g.conductor, position.conductor));
-    if (!group) {
-      group = { conductor: position.conductor, ground, position: index, weight: new Float64Array(length) };
-      groups.push(group);
-    }
-    for (let q = 0; q < length; q++) {
-      group.weight[q] = (group.weight[q] as number) + (slopes.self[i * length + q] as number);
-    }
-  }
-  return groups;
-}
-
-/** Slope vector of an input that moves Z_ii by `dz` (Ω/km) and P_ii by `dp` on all wires of a group. */
-function selfRow(weight: Float64Array, dz: Complex, dp: number, shunt: number): Float64Array {
-  const values = new Float64Array(weight.length);
-  for (let q = 0; q < weight.length; q += 3) {
+/** Slope vector of an input that moves Z_ii by `dz` (Ω/km) and P_ii by `dp` on all wires that share a conductor. */
+function fillRow(length: number, dz: Complex, dp: number): void {
+  for (let q = 0; q < length; q += 3) {
     const wr = weight[q] as number;
     const wi = weight[q + 1] as number;
-    values[q] = wr * dz[0] - wi * dz[1];
-    values[q + 1] = wr * dz[1] + wi * dz[0];
-    values[q + 2] = shunt * (weight[q + 2] as number) * dp;
+    row[q] = wr * dz[0] - wi * dz[1];
+    row[q + 1] = wr * dz[1] + wi * dz[0];
+    row[q + 2] = (weight[q + 2] as number) * dp;
   }
-  return values;
 }
 
-function scaled(values: Float64Array, factor: number): Float64Array {
-  return values.map((v) => v * factor);
+/** Inputs of one conductor. A ground wire's resistance has an uncertainty of its own, which covers temperature. */
+function visitConductor(
+  c: ConductorData,
+  ground: boolean,
+  position: number,
+  omega: number,
+  length: number,
+  visit: SlopeVisitor,
+): void {
+  const slope = conductorSlopes(c, omega);
+  // P_ii = ln(2h/r) falls by one a unit of ln r, so B grows.
+  fillRow(length, slope.byLogDiameter, susceptanceFactor(omega));
+  visit('diameter', row, 0, 1, position, c);
+  if (c.model === 'handbook') {
+    fillRow(length, slope.byLogGmr, 0);
+    visit('gmr', row, 0, 1, position, c);
+  }
+  fillRow(length, slope.byLogResistance, 0);
+  if (ground) visit('ground-wire-resistance', row, 0, 1, position, c);
+  else {
+    visit('ac-resistance', row, 0, 1, position, c);
+    visit('temperature', row, 0, slope.logResistancePerK, position, c);
+  }
 }
 
-/** Rows of one conductor's data. A ground wire's resistance has an uncertainty of its own that covers temperature. */
-function conductorRows(group: ConductorGroup, omega: number): SlopeRow[] {
-  const { conductor, position, weight } = group;
-  const shunt = -susceptanceFactor(omega);
-  const slope = conductorSlopes(conductor, omega);
-  const resistance = selfRow(weight, slope.byLogResistance, 0, shunt);
-  const about = { position, conductor };
-  // P_ii = ln(2h/r): minus one per unit of ln r.
-  const rows: SlopeRow[] = [
-    {
-      ...about,
-      input: 'diameter',
-      unit: 'relative',
-      values: selfRow(weight, slope.byLogDiameter, -1, shunt),
-    },
-  ];
-  if (conductor.model === 'handbook') {
-    rows.push({
-      ...about,
-      input: 'gmr',
-      unit: 'relative',
-      values: selfRow(weight, slope.byLogGmr, 0, shunt),
-    });
+/** Whether an earlier position of the same kind has the same conductor. */
+function seenBefore(s: OverheadSection, index: number): boolean {
+  const p = s.positions[index];
+  for (let i = 0; i < index; i++) {
+    const q = s.positions[i];
+    if (p && q && q.kind === p.kind && sameConductor(q.conductor, p.conductor)) return true;
   }
-  if (group.ground) {
-    rows.push({ ...about, input: 'ground-wire-resistance', unit: 'relative', values: resistance });
-  } else {
-    rows.push({ ...about, input: 'ac-resistance', unit: 'relative', values: resistance });
-    rows.push({
-      ...about,
-      input: 'temperature',
-      unit: 'K',
-      values: scaled(resistance, slope.logResistancePerK),
-    });
+  return false;
+}
+
+/** Sums the self weights of all positions that share the conductor of the one at `index`. */
+function gatherWeights(s: OverheadSection, index: number, length: number): void {
+  const p = s.positions[index];
+  weight.fill(0);
+  for (let i = index; i < s.positions.length; i++) {
+    const q = s.positions[i];
+    if (!p || !q || q.kind !== p.kind || !sameConductor(q.conductor, p.conductor)) continue;
+    for (let e = 0; e < length; e++)
+      weight[e] = (weight[e] as number) + (slopes.self[i * length + e] as number);
   }
-  return rows;
 }
 
 /**
@@ -115,25 +89,34 @@ function conductorRows(group: ConductorGroup, omega: number): SlopeRow[] {
  *
  * @param s the section
  * @param frequencyHz 0.1 Hz to 1 MHz
- * @returns constants and rows, or the typed failure
+ * @param visit called once an input
+ * @returns the constants, or the typed failure (nothing is visited then)
  */
-export function solveSlopes(s: OverheadSection, frequencyHz: number): SolvedSlopes | Failure {
+export function visitSlopes(
+  s: OverheadSection,
+  frequencyHz: number,
+  visit: SlopeVisitor,
+): SectionConstants | Failure {
   const w = solvePhases(s, frequencyHz);
   if ('ok' in w) return w;
   const omega = 2 * Math.PI * frequencyHz;
   const constants = readSequence(w, frequencyHz);
   slopes.fill(s, w, frequencyHz);
   const length = slopes.length;
-  const height = slopes.height.slice(0, length);
-  const rows: SlopeRow[] = [
-    { input: 'height', unit: 'm', values: height },
-    { input: 'sag', unit: 'm', values: scaled(height, -SAG_SHARE) },
-    { input: 'earth-resistivity', unit: 'relative', values: slopes.logResistivity.slice(0, length) },
-  ];
-  s.positions.forEach((_, position) => {
-    const values = slopes.offset.slice(position * length, (position + 1) * length);
-    rows.push({ input: 'offset', unit: 'm', position, values });
-  });
-  for (const group of groupConductors(s, w)) rows.push(...conductorRows(group, omega));
-  return { constants, rows };
+  visit('height', slopes.height, 0, 1, -1, null);
+  visit('sag', slopes.height, 0, -SAG_SHARE, -1, null);
+  visit('earth-resistivity', slopes.logResistivity, 0, 1, -1, null);
+  if (weight.length < length) {
+    weight = new Float64Array(length);
+    row = new Float64Array(length);
+  }
+  for (let i = 0; i < s.positions.length; i++) {
+    const p = s.positions[i];
+    if (!p) continue;
+    visit('offset', slopes.offset, i * length, 1, i, null);
+    if (seenBefore(s, i)) continue;
+    gatherWeights(s, i, length);
+    visitConductor(p.conductor, p.kind === 'ground-wire', i, omega, length, visit);
+  }
+  return constants;
 }

@@ -1,8 +1,8 @@
-import { invertReal, rowStart } from '../numerics/packed';
+import { rowStart } from '../numerics/packed';
 import { EPSILON_0 } from './constants';
 import { succeed } from './failures';
-import { fillPrimitive } from './primitive';
-import { illConditioned, reduce } from './reduction';
+import { fillGeometry, fillSeries } from './primitive';
+import { reduceSeries, reduceShunt } from './reduction';
 import type { Failure, Mutual, OverheadSection, Result, SectionConstants, SequenceConstants } from './types';
 import { checkFrequency, checkSection } from './validate';
 import { placeWires } from './wires';
@@ -10,6 +10,11 @@ import { Workspace } from './workspace';
 
 /** The one workspace of this thread. */
 const workspace = new Workspace();
+
+/** The workspace that all solves of this thread share; whoever fills it reads it before the next solve. */
+export function sharedWorkspace(): Workspace {
+  return workspace;
+}
 
 /** µS/km of a capacitance matrix element in units of 2πε₀ at angular frequency ω. */
 export function susceptanceFactor(omega: number): number {
@@ -25,14 +30,13 @@ export function susceptanceFactor(omega: number): number {
 export function solvePhases(s: OverheadSection, frequencyHz: number): Workspace | Failure {
   const fault = checkFrequency(frequencyHz) ?? checkSection(s);
   if (fault) return fault;
+  const w = workspace;
   const omega = 2 * Math.PI * frequencyHz;
-  placeWires(s, omega, workspace);
-  const failure =
-    fillPrimitive(workspace, omega, s.earthResistivityOhmM) ?? reduce(workspace, s.groundWireBonding);
+  placeWires(s, omega, w);
+  const failure = fillGeometry(w) ?? reduceShunt(w);
   if (failure) return failure;
-  const condition = invertReal(workspace.p, workspace.phases);
-  if (!Number.isFinite(condition)) return illConditioned('potential coefficients', condition);
-  return workspace;
+  fillSeries(w, omega, s.earthResistivityOhmM);
+  return reduceSeries(w) ?? w;
 }
 
 /** Sum of a circuit's three diagonal elements. */
@@ -62,22 +66,27 @@ function blockSum(a: Float64Array, high: number, low: number): number {
   return sum;
 }
 
-/** Positive and zero sequence of one circuit from its 3 × 3 block: mean self −/+ mean mutual. */
-function circuitConstants(w: Workspace, first: number, siemens: number): SequenceConstants {
+/**
+ * Positive and zero sequence of one circuit from its 3 × 3 block: mean self −/+ mean mutual.
+ *
+ * @param w solved workspace
+ * @param first row of the circuit's phase a
+ * @param siemens µS/km a unit of capacitance, see `susceptanceFactor`
+ * @param out receives the six values
+ */
+export function sequenceOf(w: Workspace, first: number, siemens: number, out: SequenceConstants): void {
   const dr = diagonalSum(w.zr, first);
   const di = diagonalSum(w.zi, first);
   const db = diagonalSum(w.p, first);
   const or = offDiagonalSum(w.zr, first);
   const oi = offDiagonalSum(w.zi, first);
   const ob = offDiagonalSum(w.p, first);
-  return {
-    r1: (dr - or) / 3,
-    x1: (di - oi) / 3,
-    b1: (siemens * (db - ob)) / 3,
-    r0: (dr + 2 * or) / 3,
-    x0: (di + 2 * oi) / 3,
-    b0: (siemens * (db + 2 * ob)) / 3,
-  };
+  out.r1 = (dr - or) / 3;
+  out.x1 = (di - oi) / 3;
+  out.b1 = (siemens * (db - ob)) / 3;
+  out.r0 = (dr + 2 * or) / 3;
+  out.x0 = (di + 2 * oi) / 3;
+  out.b0 = (siemens * (db + 2 * ob)) / 3;
 }
 
 /** Reads the sequence constants out of a workspace that `solvePhases` filled. */
@@ -85,7 +94,11 @@ export function readSequence(w: Workspace, frequencyHz: number): SectionConstant
   const siemens = susceptanceFactor(2 * Math.PI * frequencyHz);
   const circuits: SequenceConstants[] = [];
   const mutual: Mutual[] = [];
-  for (let c = 0; c < w.phases; c += 3) circuits.push(circuitConstants(w, c, siemens));
+  for (let c = 0; c < w.phases; c += 3) {
+    const values: SequenceConstants = { r1: 0, x1: 0, b1: 0, r0: 0, x0: 0, b0: 0 };
+    sequenceOf(w, c, siemens, values);
+    circuits.push(values);
+  }
   for (let i = 0; i < w.phases; i += 3) {
     for (let j = i + 3; j < w.phases; j += 3) {
       mutual.push({

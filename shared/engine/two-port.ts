@@ -2,7 +2,7 @@
  * Two-ports of line sections, exact at their length. A two-port is kept as [A − 1, B; C, D − 1]: a short line's A is
  * so near to one that the difference, which makes the charging, would lose its digits.
  */
-import { add, complexSqrt, divide, modulus, multiply, type Complex } from '../numerics/complex';
+import { add, complexSqrt, divide, multiply, type Complex } from '../numerics/complex';
 
 /** A − 1, B in Ω, C in S, D − 1. */
 export interface TwoPort {
@@ -22,22 +22,40 @@ export interface Pi {
 /** Nothing in series: the cascade's neutral element. */
 export const THROUGH: TwoPort = { a: [0, 0], b: [0, 0], c: [0, 0], d: [0, 0] };
 
-/** sinh(θ)/θ as a function of θ², even in θ, by series near zero. */
-function sinhc(square: Complex): Complex {
-  if (modulus(square) < 0.5) {
-    let term: Complex = [1, 0];
-    let sum: Complex = [1, 0];
-    for (let k = 1; k < 12; k++) {
-      const factor = 1 / (2 * k * (2 * k + 1));
-      term = multiply(term, [square[0] * factor, square[1] * factor]);
-      sum = add(sum, term);
-    }
-    return sum;
-  }
-  const theta = complexSqrt(square);
+/** sinh(θ)/θ from θ² = (re, im) in closed form, for long lines and high frequencies. */
+function sinhcClosed(re: number, im: number, out: Float64Array): void {
+  const theta = complexSqrt([re, im]);
   const sinh: Complex = [Math.sinh(theta[0]) * Math.cos(theta[1]), Math.cosh(theta[0]) * Math.sin(theta[1])];
-  return divide(sinh, theta);
+  const value = divide(sinh, theta);
+  out[0] = value[0];
+  out[1] = value[1];
 }
+
+/** sinh(θ)/θ as a function of θ² = (re, im), even in θ: by series near zero, where lines of real length lie. */
+function sinhc(re: number, im: number, out: Float64Array): void {
+  const size = Math.abs(re) + Math.abs(im);
+  if (size > 0.5) {
+    sinhcClosed(re, im, out);
+    return;
+  }
+  let tr = 1;
+  let ti = 0;
+  let sumR = 1;
+  let sumI = 0;
+  for (let k = 1, bound = 1; k < 12 && bound > 1e-17; k++) {
+    const factor = 1 / (2 * k * (2 * k + 1));
+    const t = (tr * re - ti * im) * factor;
+    ti = (tr * im + ti * re) * factor;
+    tr = t;
+    bound *= size * factor;
+    sumR += tr;
+    sumI += ti;
+  }
+  out[0] = sumR;
+  out[1] = sumI;
+}
+
+const scratch = new Float64Array(2);
 
 /**
  * Exact two-port of a uniform line: cosh γl − 1 = 2·sinh²(γl/2), Z_c·sinh γl = zl·sinh(γl)/γl.
@@ -46,12 +64,23 @@ function sinhc(square: Complex): Complex {
  * @param y shunt admittance of the whole section, S
  */
 export function uniformTwoPort(z: Complex, y: Complex): TwoPort {
-  const square = multiply(z, y);
-  const whole = sinhc(square);
-  const half = sinhc([square[0] / 4, square[1] / 4]);
-  const product = multiply(square, multiply(half, half));
-  const a: Complex = [product[0] / 2, product[1] / 2];
-  return { a, b: multiply(z, whole), c: multiply(y, whole), d: a };
+  const sr = z[0] * y[0] - z[1] * y[1];
+  const si = z[0] * y[1] + z[1] * y[0];
+  sinhc(sr, si, scratch);
+  const wr = scratch[0] as number;
+  const wi = scratch[1] as number;
+  sinhc(sr / 4, si / 4, scratch);
+  const hr = scratch[0] as number;
+  const hi = scratch[1] as number;
+  const qr = (hr * hr - hi * hi) / 2;
+  const qi = hr * hi;
+  const a: Complex = [sr * qr - si * qi, sr * qi + si * qr];
+  return {
+    a,
+    b: [z[0] * wr - z[1] * wi, z[0] * wi + z[1] * wr],
+    c: [y[0] * wr - y[1] * wi, y[0] * wi + y[1] * wr],
+    d: a,
+  };
 }
 
 /** Two two-ports in series, `first` at the sending end. */
@@ -67,6 +96,7 @@ export function cascade(first: TwoPort, next: TwoPort): TwoPort {
 /** The pi with the same behaviour at its ends: Z = B, legs (D − 1)/B and (A − 1)/B. */
 export function equivalentPi(t: TwoPort): Pi {
   // No series impedance at all (a cable declared so): the legs only exist as their sum, shared out evenly.
-  if (modulus(t.b) === 0) return { z: t.b, yFrom: [t.c[0] / 2, t.c[1] / 2], yTo: [t.c[0] / 2, t.c[1] / 2] };
+  if (t.b[0] === 0 && t.b[1] === 0)
+    return { z: t.b, yFrom: [t.c[0] / 2, t.c[1] / 2], yTo: [t.c[0] / 2, t.c[1] / 2] };
   return { z: t.b, yFrom: divide(t.d, t.b), yTo: divide(t.a, t.b) };
 }

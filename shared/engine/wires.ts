@@ -65,6 +65,7 @@ function count(s: OverheadSection, w: Workspace): void {
     }
   }
   w.wires = wires;
+  w.seriesWires = s.groundWireBonding === 'segmented' ? wires - w.groundWires : wires;
   w.reserve(wires);
 }
 
@@ -98,6 +99,25 @@ export function placeWires(s: OverheadSection, omega: number, w: Workspace): voi
       if (k === 0) setWire(w, slot, slot, i, p, p.bundleCount > 1 ? dx : 0, p.bundleCount > 1 ? dy : 0);
       else setWire(w, member++, slot, i, p, dx, dy);
     }
+  }
+}
+
+/**
+ * Sets every wire's internal impedance anew, for another frequency on the same geometry.
+ *
+ * @param s the section whose wires stand in the workspace
+ * @param omega angular frequency, rad/s
+ * @param w workspace after `placeWires`
+ */
+export function refreshInternal(s: OverheadSection, omega: number, w: Workspace): void {
+  let known: unknown = null;
+  for (let i = 0; i < w.wires; i++) {
+    const p = s.positions[w.position[i] as number];
+    if (!p) continue;
+    if (p.conductor !== known) internalImpedance(p.conductor, omega, scratch);
+    known = p.conductor;
+    w.internalR[i] = scratch[0] as number;
+    w.internalX[i] = scratch[1] as number;
   }
 }
 

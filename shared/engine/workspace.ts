@@ -23,6 +23,13 @@ export class Workspace {
   leader = new Int32Array(0);
   /** Index of the wire's position in the section's list. */
   position = new Int32Array(0);
+  /** By wire pair (packed): height sum and offset, m, ln of the distance to the image, ln(D/d). */
+  sum = new Float64Array(0);
+  offset = new Float64Array(0);
+  logFar = new Float64Array(0);
+  field = new Float64Array(0);
+  /** First pair that hangs like this one, see `findTwins`. */
+  twin = new Int32Array(0);
   /** Series impedance, Ω/km, and Maxwell coefficients (dimensionless), packed. */
   zr = new Float64Array(0);
   zi = new Float64Array(0);
@@ -31,6 +38,9 @@ export class Workspace {
   constructor() {
     this.reserve(FIRST_SIZE);
   }
+
+  /** Leading wires that carry current: all but segmented ground wires. */
+  seriesWires = 0;
 
   /** Makes room for n wires. */
   reserve(n: number): void {
@@ -42,6 +52,11 @@ export class Workspace {
     this.internalX = new Float64Array(n);
     this.leader = new Int32Array(n);
     this.position = new Int32Array(n);
+    this.sum = new Float64Array(packedLength(n));
+    this.offset = new Float64Array(packedLength(n));
+    this.logFar = new Float64Array(packedLength(n));
+    this.field = new Float64Array(packedLength(n));
+    this.twin = new Int32Array(packedLength(n));
     this.zr = new Float64Array(packedLength(n));
     this.zi = new Float64Array(packedLength(n));
     this.p = new Float64Array(packedLength(n));
