@@ -4,7 +4,7 @@ import { THIN_SPACE } from '#shared/format/numbers';
 import type { BalanceEntry, RowFinding } from '../../../components/charts/balance-entry';
 import { BalanceTable } from '../../../components/charts/balance-table';
 import { GradeTally } from '../../../components/ui/grade-counts';
-import { balanceEntries, parameterName, rowOf } from '../../../lib/balance-entries';
+import { balanceEntries, parameterName, rowOf } from '../../../components/charts/balance-entries';
 import { arrangeFindings, countStanding } from '../model/arrange-findings';
 import { causeLines, dispositionWords, settledRemark, splitMessage } from '../model/finding-words';
 import { LooseFindings } from './loose-findings';

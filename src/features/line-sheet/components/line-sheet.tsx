@@ -3,7 +3,7 @@ import { useSearchParams } from 'react-router-dom';
 import type { RevisionLine } from '#shared/contracts/api.generated';
 import { Notice } from '../../../components/feedback/notice';
 import { SegmentChoice } from '../../../components/ui/segment';
-import { rowOf } from '../../../lib/balance-entries';
+import { rowOf } from '../../../components/charts/balance-entries';
 import { useRevisionLine } from '../../../lib/queries/get-revision-line';
 import { arrangeFindings } from '../model/arrange-findings';
 import { readFiledLine } from '../model/filed-line';

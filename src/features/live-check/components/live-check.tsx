@@ -6,7 +6,7 @@ import { Notice } from '../../../components/feedback/notice';
 import { SkeletonLines } from '../../../components/feedback/skeleton';
 import { GradeTally } from '../../../components/ui/grade-counts';
 import { Sheet } from '../../../components/ui/sheet';
-import { rowOf } from '../../../lib/balance-entries';
+import { rowOf } from '../../../components/charts/balance-entries';
 import type { LiveCheck } from '../hooks/use-live-check';
 import { countFindings, entriesOf, sharesCause, sortFindings } from '../model/report-view';
 import { PutButton } from './put-button';

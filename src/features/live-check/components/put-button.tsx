@@ -1,7 +1,7 @@
 import type { Cause, Finding } from '#shared/checks/types';
 import { figure } from '#shared/format/numbers';
 import { Button } from '../../../components/ui/button';
-import { parameterName } from '../../../lib/balance-entries';
+import { parameterName } from '../../../components/charts/balance-entries';
 
 /** Puts a cause's correction into the form, for the applicant to confirm. */
 export type OnPut = (cause: Cause, circuit: number | undefined) => void;

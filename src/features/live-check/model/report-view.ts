@@ -1,6 +1,6 @@
 import type { CircuitReport, Finding, LineReport } from '#shared/checks/types';
 import type { GradeCounts } from '../../../components/ui/grades';
-import { balanceEntries, rowOf } from '../../../lib/balance-entries';
+import { balanceEntries, rowOf } from '../../../components/charts/balance-entries';
 import type { BalanceEntry } from '../../../components/charts/balance-entry';
 
 /** Every finding of a line, those of its circuits first. */

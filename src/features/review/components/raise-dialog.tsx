@@ -8,7 +8,7 @@ import { Field } from '../../../components/ui/field';
 import { GradeMark } from '../../../components/ui/grade-mark';
 import { GRADE_WORDS } from '../../../components/ui/grades';
 import { Checkbox, TextArea, TextInput } from '../../../components/ui/inputs';
-import { parameterName } from '../../../lib/balance-entries';
+import { parameterName } from '../../../components/charts/balance-entries';
 import { useRaiseDiscrepancy } from '../api/raise-discrepancy';
 import { draftFrom, raiseFaults, raiseRequest, type RaiseDraft } from '../model/raise';
 

@@ -1,7 +1,7 @@
 import { PARAMETER_WORDS } from '#shared/checks/parameters';
 import type { FindingParameter } from '#shared/checks/parameters';
 import { fixed, rangeTexts, signedPercent } from '#shared/format/numbers';
-import type { BalanceEntry, Written, WrittenRange } from '../components/charts/balance-entry';
+import type { BalanceEntry, Written, WrittenRange } from './balance-entry';
 
 /** The rows of a balance, in their order. */
 export const BALANCE_ROWS = ['r1', 'x1', 'b1', 'r0', 'x0', 'b0', 'surgeImpedanceOhm', 'waveSpeed'] as const;

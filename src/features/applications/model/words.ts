@@ -1,0 +1,38 @@
+import type { Application, ApplicationSummary } from '#shared/contracts/api.generated';
+import { figure, quantity } from '#shared/format/numbers';
+
+export const CONNECTION_KINDS = [
+  { value: 'generation', label: 'Generation' },
+  { value: 'storage', label: 'Storage' },
+  { value: 'load', label: 'Load' },
+  { value: 'network', label: 'Network' },
+] as const;
+
+type Place = Pick<ApplicationSummary, 'capacityMw' | 'pointOfConnection'>;
+
+/** "480 MW at Sarn", or "at Sarn" where no capacity is asked for. */
+export function connectionWords({ capacityMw, pointOfConnection }: Place): string {
+  if (capacityMw === null) return `at ${pointOfConnection}`;
+  return `${quantity(capacityMw, 'MW', 4)} at ${pointOfConnection}`;
+}
+
+/** "5, together 153.9 km". */
+export function linesWords(lineCount: number, totalLengthKm: number): string {
+  if (lineCount === 0) return 'none yet';
+  return `${lineCount}, together ${quantity(totalLengthKm, 'km', 4)}`;
+}
+
+/** "345 kV, 230 kV". */
+export const voltagesWords = (voltagesKv: readonly number[]): string =>
+  voltagesKv.length === 0 ? 'none yet' : voltagesKv.map((kv) => `${figure(kv, 4)}\u2009kV`).join(', ');
+
+/** Whether the application has a draft that its applicant may change. */
+export const hasDraft = ({ state }: Pick<Application, 'state'>): boolean =>
+  state === 'draft' || state === 'returned';
+
+/** What the due date is for, in the words of the title block. */
+export function dueWords({ state }: Pick<Application, 'state'>): string {
+  if (state === 'returned') return 'Answers due';
+  if (state === 'filed') return 'Taken up by';
+  return state === 'in-review' ? 'Review due' : 'Due';
+}
