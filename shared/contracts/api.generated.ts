@@ -852,7 +852,7 @@ export interface Cause {
   corrected: Record<string, number>;
   /** JSON Pointer of the slip in the geometry */
   where?: string;
-  /** largest remaining difference (ratio) */
+  /** largest remaining difference (ratio, unbounded above) */
   residual: number;
   /** fitted without geometry */
   possible?: boolean;
@@ -880,6 +880,8 @@ export interface CheckState {
 
 /** The conductor library. */
 export interface ConductorList {
+  /** version of the library */
+  version: string;
   /** by name */
   items: Conductor[];
 }
@@ -888,14 +890,12 @@ export interface ConductorList {
 export interface Conductor {
   /** name */
   name: string;
-  /** family */
-  family: string;
-  /** handbook data in the fields of a filing’s conductor */
-  data: Record<string, unknown> | null;
+  /** the library’s row, with its units in the names of its fields */
+  row: Record<string, unknown>;
+  /** has what a filing needs of it */
+  choosable: boolean;
   /** may not be chosen any more */
   retired: boolean;
-  /** source */
-  source: string;
 }
 
 /** Whom to ask about an application. */
@@ -1161,7 +1161,7 @@ export interface Finding {
   recomputed: number | null;
   /** difference (ratio, unbounded) */
   deviation: number | null;
-  /** tolerance (ratio) */
+  /** tolerance (ratio, unbounded above) */
   tolerance: number | null;
   /** JSON Pointer within the filing */
   where: string | null;
@@ -1177,13 +1177,13 @@ export interface Finding {
   follows: string | null;
   /** what the tolerance in use comes from */
   toleranceOf: {
-    /** the administrator’s tolerance (ratio) */
+    /** the administrator’s tolerance (ratio, unbounded above) */
     administrator: number;
-    /** what the inputs’ uncertainty explains (ratio) */
+    /** what the inputs’ uncertainty explains (ratio, unbounded above) */
     inputs: number;
     /** the input that dominates it */
     dominantInput: string;
-    /** half a unit of the last digit declared (ratio) */
+    /** half a unit of the last digit declared (ratio, unbounded above) */
     rounding: number;
   } | null;
   /** not settled, waived or set aside */
@@ -1496,7 +1496,7 @@ export interface ParameterValue {
   high: number | null;
   /** declared less recomputed, by recomputed (ratio, unbounded) */
   deviation: number | null;
-  /** tolerance in use (ratio) */
+  /** tolerance in use (ratio, unbounded above) */
   tolerance: number | null;
   /** typical range of the class */
   typical: [number, number] | null;
@@ -1713,9 +1713,9 @@ export interface RevisionLine {
   impliedGeometry: {
     /** circuit (count) */
     circuit: number;
-    /** mean phase spacing that X1 and B1 need (m) */
+    /** mean phase spacing that X1 and B1 need (m, unbounded above) */
     meanSpacingM: number | null;
-    /** conductor GMR that they need (mm) */
+    /** conductor GMR that they need (mm, unbounded above) */
     gmrMm: number | null;
     /** in words */
     sentence: string;
