@@ -206,5 +206,8 @@ function toFault(e: ErrorObject, data: unknown): PointerFault {
  * @returns one fault a place, in the order of their pointers
  */
 export function schemaFaults(errors: readonly ErrorObject[], data: unknown): PointerFault[] {
-  return inOrder(errors.filter((e) => !NOISE.has(e.keyword)).map((e) => toFault(e, data)));
+  const out = errors.filter((e) => e.keyword === 'false schema').map((e) => `${e.instancePath}/`);
+  // What cannot stand here at all need not hold in itself.
+  const told = errors.filter((e) => !NOISE.has(e.keyword) && !out.some((p) => placeOf(e).startsWith(p)));
+  return inOrder(told.map((e) => toFault(e, data)));
 }

@@ -37,17 +37,21 @@ function placed(p: Position, conductors: Readonly<Record<string, Conductor>>): R
   return { ...rest, ...spacing, conductor: conductors[p.conductor] };
 }
 
-/** Phases by circuit and letter, then ground wires as they come: the order in the file means nothing. */
-function inOrder(positions: readonly Position[]): Position[] {
-  const rank = (p: Position) => (p.groundWire ? '~' : `${p.circuit}${p.phase}`);
-  return [...positions].sort((a, b) => (rank(a) < rank(b) ? -1 : rank(a) > rank(b) ? 1 : 0));
+/** Phases by circuit and letter, then ground wires by what they are: the order in the file means nothing. */
+function inOrder(positions: readonly Position[], conductors: Readonly<Record<string, Conductor>>) {
+  const ranked = positions.map((p) => {
+    const value = placed(p, conductors);
+    return { value, rank: p.groundWire ? `~${canonicalJson(value)}` : `${p.circuit}${p.phase}` };
+  });
+  ranked.sort((a, b) => (a.rank < b.rank ? -1 : a.rank > b.rank ? 1 : 0));
+  return ranked.map((r) => r.value);
 }
 
 function section(s: Section, normalised: NormalisedSection | undefined): Record<string, unknown> {
   const { conductors, positions, perLength: _perLength, ...rest } = s;
   if (normalised?.kind === 'cable') return { ...rest, perLength: normalised.input.perLength };
   if (!conductors || !positions) return rest;
-  return { ...rest, positions: inOrder(positions).map((p) => placed(p, conductors)) };
+  return { ...rest, positions: inOrder(positions, conductors) };
 }
 
 function canonicalLine(line: NormalisedLine): Record<string, unknown> {

@@ -28,9 +28,10 @@ function positionConductors(s: Section, at: string): PointerFault[] {
 
 /** Each circuit has phases a, b and c once. */
 function phases(s: Section, at: string): PointerFault[] {
+  if (!s.positions) return [];
   const seen = new Map<string, number>();
   const faults: PointerFault[] = [];
-  s.positions?.forEach((p, i) => {
+  s.positions.forEach((p, i) => {
     if (p.groundWire) return;
     const key = `${p.circuit}${p.phase}`;
     const first = seen.get(key);
