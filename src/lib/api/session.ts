@@ -1,11 +1,17 @@
-import { queryOptions, useMutation, useQueryClient, useSuspenseQuery } from '@tanstack/react-query';
+import {
+  queryOptions,
+  useMutation,
+  useQueryClient,
+  useSuspenseQuery,
+  type QueryClient,
+} from '@tanstack/react-query';
 import type {
   Membership,
   NextStep,
   Session as SessionAnswer,
   TotpEnrolment,
 } from '#shared/contracts/api.generated';
-import { signedInAgain } from './session-loss';
+import { signedInAgain, waitForSignIn } from './session-loss';
 import { keepCsrfToken, send } from './transport';
 
 export type Role = Membership['role'];
@@ -47,10 +53,24 @@ async function post(path: string, body: unknown): Promise<SignInStep> {
   return { next: 'in', session };
 }
 
+const KEY = ['session'] as const;
+
+/**
+ * Who is signed in, asked anew. Where somebody was a moment ago and is not any more, the answer waits for
+ * the sign-in above the page: to say "nobody" would take the page away with all that was typed into it.
+ */
+async function askForSession(client: QueryClient, signal: AbortSignal): Promise<Session | null> {
+  const session = await getSession(signal);
+  const before = client.getQueryData<Session | null>(KEY);
+  if (session || !before) return session;
+  await waitForSignIn(new Error('The session has ended.'));
+  return client.getQueryData<Session | null>(KEY) ?? null;
+}
+
 export const sessionQuery = () =>
   queryOptions({
-    queryKey: ['session'],
-    queryFn: ({ signal }) => getSession(signal),
+    queryKey: KEY,
+    queryFn: ({ client, signal }) => askForSession(client, signal),
     staleTime: 5 * 60_000,
   });
 
