@@ -90,6 +90,16 @@ export class Invitation {
   @Column({ type: 'timestamptz', precision: 3, nullable: true }) decidedAt!: Date | null;
 }
 
+/** A password that was forgotten; the newest one of a person counts, once. */
+@Entity({ name: 'password_resets' })
+export class PasswordReset {
+  @PrimaryGeneratedColumn('uuid') id!: string;
+  @Column({ type: 'uuid' }) @ForeignKey('User') @Index() userId!: string;
+  @Column({ type: 'text' }) @Index({ unique: true }) tokenHash!: string;
+  @Column({ type: 'timestamptz', precision: 3 }) expiresAt!: Date;
+  @Column({ type: 'timestamptz', precision: 3, nullable: true }) usedAt!: Date | null;
+}
+
 @Entity({ name: 'second_factors' })
 export class SecondFactor {
   @PrimaryColumn({ type: 'uuid' }) @ForeignKey('User') userId!: string;

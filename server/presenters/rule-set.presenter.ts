@@ -9,7 +9,7 @@ export function presentRuleSet(set: RuleSet, people: PeopleById, inForceVersion:
     status,
     effectiveFrom: effectiveFrom?.toISOString() ?? null,
     reason,
-    publishedBy: (publishedBy && people.get(publishedBy)) ?? null,
+    publishedBy: publishedBy === null ? null : (people.get(publishedBy) ?? null),
     inForce: version === inForceVersion,
   };
 }

@@ -65,7 +65,9 @@ export function passwordFault(password: string, context: readonly string[]): str
   const words = context
     .flatMap((text) => text.toLowerCase().split(/[^\p{L}\p{N}]+/u))
     .filter((word) => word.length > 3);
-  const found = [...COMMON, ...words].find((word) => plain.includes(word) && plain.replaceAll(word, '').length < 6);
+  const found = [...COMMON, ...words].find(
+    (word) => plain.includes(word) && plain.replaceAll(word, '').length < 6,
+  );
   if (found) return `It is little more than "${found}", which is guessed first.`;
   return undefined;
 }

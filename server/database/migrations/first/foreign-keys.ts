@@ -6,6 +6,7 @@ export const FOREIGN_KEYS: readonly string[] = [
   `ALTER TABLE reviewer_bars ADD CONSTRAINT fk_reviewer_bars_org_id FOREIGN KEY (org_id) REFERENCES organisations (id)`,
   `ALTER TABLE invitations ADD CONSTRAINT fk_invitations_org_id FOREIGN KEY (org_id) REFERENCES organisations (id)`,
   `ALTER TABLE invitations ADD CONSTRAINT fk_invitations_decided_by FOREIGN KEY (decided_by) REFERENCES users (id)`,
+  `ALTER TABLE password_resets ADD CONSTRAINT fk_password_resets_user_id FOREIGN KEY (user_id) REFERENCES users (id)`,
   `ALTER TABLE second_factors ADD CONSTRAINT fk_second_factors_user_id FOREIGN KEY (user_id) REFERENCES users (id)`,
   `ALTER TABLE api_keys ADD CONSTRAINT fk_api_keys_user_id FOREIGN KEY (user_id) REFERENCES users (id)`,
   `ALTER TABLE api_keys ADD CONSTRAINT fk_api_keys_org_id FOREIGN KEY (org_id) REFERENCES organisations (id)`,

@@ -7,6 +7,7 @@ const OTHER_TABLES = [
   'users',
   'sessions',
   'second_factors',
+  'password_resets',
   'rate_limits',
   'rule_sets',
   'voltage_classes',

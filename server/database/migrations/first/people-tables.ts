@@ -81,6 +81,18 @@ export const PEOPLE_TABLES: readonly string[] = [
   `CREATE INDEX ix_invitations_org_id ON invitations (org_id)`,
   `CREATE UNIQUE INDEX ix_invitations_token_hash ON invitations (token_hash)`,
   `
+  CREATE TABLE password_resets (
+    id uuid NOT NULL DEFAULT gen_random_uuid(),
+    user_id uuid NOT NULL,
+    token_hash text NOT NULL,
+    expires_at timestamptz(3) NOT NULL,
+    used_at timestamptz(3),
+    CONSTRAINT pk_password_resets_id PRIMARY KEY (id)
+  )
+  `,
+  `CREATE INDEX ix_password_resets_user_id ON password_resets (user_id)`,
+  `CREATE UNIQUE INDEX ix_password_resets_token_hash ON password_resets (token_hash)`,
+  `
   CREATE TABLE second_factors (
     user_id uuid NOT NULL,
     sealed_secret text NOT NULL,
