@@ -1,5 +1,6 @@
 import { conductorResistanceOhmPerKm } from './conductor';
 import { fail, succeed } from './failures';
+import { checkFrequency, checkSection } from './validate';
 import { solarHeat, type SolarPosition } from './solar';
 import type { WeatherAssumptions } from './weather';
 import type { ConductorData, Failure, OverheadSection, Result } from './types';
@@ -45,6 +46,7 @@ const WEATHER_RANGES: Record<Exclude<keyof WeatherAssumptions, 'atmosphere'>, re
 };
 
 function checkInput(input: AmpacityInput): Failure | null {
+  if (!input.weather) return fail('non-finite', { field: 'weather' }, 'the weather assumptions are missing');
   const numbers: [string, number, number, number][] = [
     ['diameterMm', input.diameterMm, 0.1, 200],
     ['resistanceOhmPerKm', input.resistanceOhmPerKm, 1e-6, 1e4],
@@ -135,7 +137,7 @@ export interface CircuitAmpacity {
 /**
  * Rating of one circuit of a section at a maximum conductor temperature: subconductors × rating, least over the phases.
  *
- * @param s the section, checked or not
+ * @param s the section
  * @param circuit number from 1
  * @param maxTemperatureC maximum conductor temperature, °C
  * @param weather the owner's assumptions
@@ -148,6 +150,8 @@ export function circuitAmpacity(
   weather: WeatherAssumptions,
   frequencyHz: number,
 ): Result<CircuitAmpacity> {
+  const fault = checkFrequency(frequencyHz) ?? checkSection(s);
+  if (fault) return fault;
   let weakest: CircuitAmpacity | null = null;
   for (const [position, p] of s.positions.entries()) {
     if (p.kind !== 'phase' || p.circuit !== circuit) continue;

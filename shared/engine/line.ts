@@ -52,6 +52,7 @@ export function solveCable(s: CableSection, ratio: number): Result<SectionConsta
 }
 
 function solveAny(s: LineSection, frequencyHz: number, ratio: number): Result<SectionConstants> {
+  if (s === null || typeof s !== 'object') return fail('empty-section', {}, 'there is no section');
   return s.kind === 'cable' ? solveCable(s, ratio) : solveSection(s, frequencyHz);
 }
 
@@ -142,6 +143,7 @@ function nominalPi(mean: SequenceConstants, lengthKm: number): PiTotals {
  * @returns the failure, or null
  */
 export function checkLine(l: LineInput, frequencyHz: number): Failure | null {
+  if (l === null || typeof l !== 'object') return fail('empty-line', {}, 'there is no line');
   const fault = checkFrequency(frequencyHz) ?? checkFrequency(l.frequencyHz);
   if (fault) return fault;
   if (Array.isArray(l.sections) && l.sections.length > 0) return null;
@@ -185,7 +187,7 @@ export function combineSections(l: LineInput, parts: readonly SectionConstants[]
  * @param frequencyHz 0.1 Hz to 1 MHz; the line's own when left out
  * @returns per circuit Ω/km and µS/km, totals in Ω and µS; or the typed failure with section and position
  */
-export function solveLine(l: LineInput, frequencyHz: number = l.frequencyHz): Result<LineConstants> {
+export function solveLine(l: LineInput, frequencyHz: number = l?.frequencyHz): Result<LineConstants> {
   const fault = checkLine(l, frequencyHz);
   if (fault) return fault;
   const parts: SectionConstants[] = [];

@@ -46,6 +46,7 @@ function balancedBlocks(circuits: readonly SequenceConstants[]): PhaseConstants 
 }
 
 function phaseConstants(s: LineSection, frequencyHz: number, ratio: number): Result<PhaseConstants> {
+  if (s === null || typeof s !== 'object') return fail('empty-section', {}, 'there is no section');
   if (s.kind === 'cable') {
     const cable = solveCable(s, ratio);
     return cable.ok ? succeed(balancedBlocks(cable.value.circuits)) : cable;
@@ -115,7 +116,7 @@ function cascadeSections(l: LineInput, frequencyHz: number): DenseMatrix | Failu
  * @param frequencyHz 0.1 Hz to 1 MHz; the line's own when left out
  * @returns A, B, C, D and the equivalent pi; or the typed failure
  */
-export function phaseCascade(l: LineInput, frequencyHz: number = l.frequencyHz): Result<PhaseCascade> {
+export function phaseCascade(l: LineInput, frequencyHz: number = l?.frequencyHz): Result<PhaseCascade> {
   const fault = checkLine(l, frequencyHz);
   if (fault) return fault;
   const port = cascadeSections(l, frequencyHz);

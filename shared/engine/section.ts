@@ -1,6 +1,6 @@
-import { rowStart } from '../numerics/packed';
+import { packedLength, rowStart } from '../numerics/packed';
 import { EPSILON_0 } from './constants';
-import { succeed } from './failures';
+import { fail, succeed } from './failures';
 import { fillGeometry, fillSeries } from './primitive';
 import { reduceSeries, reduceShunt } from './reduction';
 import type { Failure, Mutual, OverheadSection, Result, SectionConstants, SequenceConstants } from './types';
@@ -36,7 +36,17 @@ export function solvePhases(s: OverheadSection, frequencyHz: number): Workspace 
   const failure = fillGeometry(w) ?? reduceShunt(w);
   if (failure) return failure;
   fillSeries(w, omega, s.earthResistivityOhmM);
-  return reduceSeries(w) ?? w;
+  return reduceSeries(w) ?? notFinite(w) ?? w;
+}
+
+/** The last guard: whatever slipped through all checks ends here, not as NaN in a result. */
+function notFinite(w: Workspace): Failure | null {
+  let sum = 0;
+  const count = packedLength(w.phases);
+  for (let e = 0; e < count; e++) sum += (w.zr[e] as number) + (w.zi[e] as number) + (w.p[e] as number);
+  return Number.isFinite(sum)
+    ? null
+    : fail('ill-conditioned', {}, 'the matrices have no finite solution', Infinity);
 }
 
 /** Sum of a circuit's three diagonal elements. */

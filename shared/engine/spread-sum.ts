@@ -1,6 +1,8 @@
 import { sameConductor } from './conductor-slopes';
+import { fail } from './failures';
+import { DEFAULT_INPUT_UNCERTAINTIES } from './sensitivity-types';
 import type { InputUncertainties, Spread, UncertainInput } from './sensitivity-types';
-import type { ConductorData, Where } from './types';
+import type { ConductorData, Failure, Where } from './types';
 
 /**
  * Step of an input within its uncertainty, in the unit of its slope (m, K, or a unit of its logarithm).
@@ -29,6 +31,25 @@ export function stepOf(input: UncertainInput, u: InputUncertainties): number {
     case 'earth-resistivity':
       return Math.log(u.earthResistivityFactor);
   }
+}
+
+/**
+ * Checks the administrator's uncertainties: finite, not negative, the factor of ρ at least 1.
+ *
+ * @returns the failure with the field's name, or null
+ */
+export function checkUncertainties(u: InputUncertainties): Failure | null {
+  for (const field of Object.keys(DEFAULT_INPUT_UNCERTAINTIES) as (keyof InputUncertainties)[]) {
+    const value = u[field];
+    const low = field === 'earthResistivityFactor' ? 1 : 0;
+    if (typeof value === 'number' && value >= low && value < Infinity) continue;
+    return fail(
+      'out-of-range',
+      { field },
+      `${field} is ${String(value)}, wanted is a finite value from ${low} up`,
+    );
+  }
+  return null;
 }
 
 /** Moves of one conductor input, summed over all sections of the line that use the same conductor. */

@@ -1,9 +1,9 @@
 import { MAX_CIRCUITS } from './constants';
-import { inSection, succeed } from './failures';
+import { fail, inSection, succeed } from './failures';
 import { checkLine, combineSections, solveCable } from './line';
 import { visitSlopes } from './section-slopes';
 import type { InputUncertainties, LineUncertainty, Sensitivity, UncertainInput } from './sensitivity-types';
-import { SpreadSum } from './spread-sum';
+import { checkUncertainties, SpreadSum } from './spread-sum';
 import {
   SEQUENCE_KEYS,
   type CableSection,
@@ -95,12 +95,13 @@ function readSpreads(constants: LineConstants, sum: SpreadSum): LineUncertainty 
  * @returns constants and spreads; or the typed failure
  */
 export function uncertainty(l: LineInput, inputs: InputUncertainties): Result<LineUncertainty> {
-  const fault = checkLine(l, l.frequencyHz);
+  const fault = checkLine(l, l?.frequencyHz) ?? checkUncertainties(inputs);
   if (fault) return fault;
   const alone = l.sections.length === 1;
   let lengthKm = 0;
   let circuits = 0;
   for (const s of l.sections) {
+    if (s === null || typeof s !== 'object') return fail('empty-section', {}, 'there is no section');
     lengthKm += s.lengthKm;
     // Sections that differ in circuits are refused below; until then the widest one's room serves all.
     circuits = Math.max(circuits, countCircuits(s));

@@ -1,3 +1,4 @@
+import { dcResistanceOhmPerKm } from './conductor';
 import { FREQUENCY_RANGE_HZ, MAX_BUNDLE, MAX_CIRCUITS } from './constants';
 import { fail } from './failures';
 import type {
@@ -72,6 +73,13 @@ function checkTube(c: ConductorData, where: Where): Failure | null {
       ? null
       : badNumber(c.temperatureCoefficientPerK, 0, 1, false, where, 'temperatureCoefficientPerK'));
   if (fault) return fault;
+  if (!(dcResistanceOhmPerKm(c) > 0)) {
+    return fail(
+      'conductor-data',
+      { ...where, field: 'temperatureC' },
+      `at ${c.temperatureC} °C the resistance would not be positive any more`,
+    );
+  }
   if ((c.coreDiameterMm ?? 0) >= c.diameterMm) {
     return fail(
       'conductor-data',
@@ -198,6 +206,7 @@ function checkPhases(positions: readonly Position[]): Failure | null {
  * @returns the first failure (positions in their order), or null
  */
 export function checkSection(s: OverheadSection): Failure | null {
+  if (s === null || typeof s !== 'object') return fail('empty-section', {}, 'there is no section');
   const earth =
     badNumber(s.lengthKm, 0, 1e5, true, {}, 'lengthKm') ??
     badNumber(s.earthResistivityOhmM, 0, MAX_RESISTIVITY, true, {}, 'earthResistivityOhmM');
