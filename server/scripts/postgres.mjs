@@ -169,7 +169,7 @@ async function locked(base, work) {
     } catch (error) {
       if (error.code !== 'EEXIST') throw error;
       const holder = lockHolder(file);
-      if (i > 1200) throw new Error(`${file} is held by process ${holder}`);
+      if (i > 1200) throw new Error(`${file} is held by process ${holder}`, { cause: error });
       await pause(100);
     }
   }
