@@ -1,8 +1,8 @@
 import type { LooseFinding } from './apply-rules';
 import type { CircuitContext } from './context';
 import { bandValue } from './derive';
-import { BAND_PARAMETERS, LINE_PARAMETERS, isLineParameter } from './parameters';
-import type { BandParameter, LineParameter } from './parameters';
+import { BAND_PARAMETERS, LINE_PARAMETERS, MADE_OF, isLineParameter } from './parameters';
+import type { BandParameter, FindingParameter, LineParameter } from './parameters';
 import { GRADES } from './types';
 import type { Grade, Weighed } from './types';
 
@@ -34,9 +34,22 @@ export function weighedValues(context: CircuitContext, findings: readonly LooseF
       typical: band?.typical ?? null,
       outer: band?.outer ?? null,
       grade: worstOf(own.map(({ grade }) => grade)),
-      follows: own.find(({ follows }) => follows !== undefined)?.follows ?? null,
+      follows: followedBy(context, parameter, own),
     };
   });
+}
+
+/** The constant that a value follows: where each of its findings follows one, or it is made of one that is contradicted. */
+function followedBy(
+  context: CircuitContext,
+  parameter: LineParameter | BandParameter,
+  own: readonly LooseFinding[],
+): FindingParameter | null {
+  if (own.some(({ follows }) => follows === undefined)) return null;
+  const told = own.find(({ follows }) => follows !== undefined)?.follows;
+  if (told !== undefined || isLineParameter(parameter)) return told ?? null;
+  const parts = MADE_OF[parameter].filter(isLineParameter);
+  return parts.find((part) => context.weighings[part]?.contradicted === true) ?? null;
 }
 
 function isBand(parameter: LineParameter | BandParameter): parameter is BandParameter {

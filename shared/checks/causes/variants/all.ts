@@ -6,6 +6,7 @@ import {
   frequencySlip,
   groundWireSlips,
   longLineSlips,
+  misplacedSlips,
   towerHeightSlip,
 } from './line-slips';
 import { otherConductorSlips } from './other-conductor';
@@ -23,6 +24,7 @@ export function allVariants(context: VariantContext, violated: ReadonlySet<strin
   return [
     ...frequencySlip(context),
     ...longLineSlips(context),
+    ...misplacedSlips(context),
     ...resistanceSlips(context),
     ...conductorSlips(context),
     ...arithmeticSpacingSlip(context),

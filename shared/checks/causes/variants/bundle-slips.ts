@@ -110,11 +110,26 @@ function sideSlips(context: VariantContext, filed: Filed): Variant[] {
     ];
   };
   const known = [...BUILT_SIDES_M, ...SIDE_FACTORS.map((factor) => factor * filed.sideM)];
-  const others = known.filter((side) => Math.abs(side / filed.sideM - 1) > 0.01 && side > 0.02 && side < 5);
+  const isOther = (side: number): boolean =>
+    Math.abs(side / filed.sideM - 1) > 0.01 && !isOtherUnit(side / filed.sideM) && side > 0.02 && side < 5;
+  const others = known.filter(isOther);
   return [
-    ...others.flatMap((side) => make(side, 0, -1 - Math.log(others.length))),
-    ...fittedSides(context, filed).flatMap((side) => make(side, 1, -2.5)),
+    ...others.flatMap((side) => make(side, 0, -1 - Math.log(others.length) + likelihood(side, filed.sideM))),
+    ...fittedSides(context, filed)
+      .filter(isOther)
+      .flatMap((side) => make(side, 1, -2.5 + likelihood(side, filed.sideM))),
   ];
+}
+
+/** Ratios that are feet or centimetres taken as metres: slips with codes of their own. */
+function isOtherUnit(ratio: number): boolean {
+  return [0.01, 0.3048].some((unit) => Math.abs(ratio / unit - 1) < 0.05);
+}
+
+/** Log price of taking a side for another: a side as built is rarely wrong, an odd one rarely right. */
+function likelihood(side: number, filedM: number): number {
+  const isBuilt = (metres: number): boolean => metres >= 0.28 && metres <= 0.62;
+  return (isBuilt(filedM) ? -1.5 : 0.7) + (isBuilt(side) ? 0 : -2);
 }
 
 /** The side that the declared X1 itself would need. */

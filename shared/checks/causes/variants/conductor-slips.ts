@@ -86,7 +86,7 @@ const doubled: readonly Recipe[] = DOUBLED_GMR.map((gmr) => ({
         );
   },
   reach: (parameter: DeclaredParameter) => !isResistance(parameter),
-  prior: -1.7,
+  prior: -3.5,
   model: ENGINE_MODEL,
   words: 'the diameter was used in place of the radius, in the GMR too',
 }));

@@ -19,6 +19,45 @@ export function frequencySlip({ bench }: VariantContext): Variant[] {
   ];
 }
 
+/** Values of one kind standing in the field of another, where the other field does not tell. */
+export function misplacedSlips({ base }: VariantContext): Variant[] {
+  const make = (
+    code: Variant['code'],
+    pairs: readonly (readonly [DeclaredParameter, DeclaredParameter])[],
+    words: string,
+  ): Variant => {
+    const circuits = base.circuits.map((values): Values => {
+      const moved: Values = { ...values };
+      for (const [one, other] of pairs) {
+        if (values[other] !== undefined) moved[one] = values[other];
+        if (values[one] !== undefined) moved[other] = values[one];
+      }
+      return moved;
+    });
+    const outcome: Outcome = { circuits, pairs: base.pairs };
+    return { code, in: 'declared', outcome, prior: -1.5, model: ENGINE_MODEL, freedom: 0, words };
+  };
+  return [
+    make(
+      'sequence-swapped',
+      [
+        ['r1', 'r0'],
+        ['x1', 'x0'],
+        ['b1', 'b0'],
+      ],
+      'it is the value of the other sequence',
+    ),
+    make(
+      'r-x-swapped',
+      [
+        ['r1', 'x1'],
+        ['r0', 'x0'],
+      ],
+      'R and X stand in each other’s place',
+    ),
+  ];
+}
+
 /** Ground wires left out, or taken as carrying no current. */
 export function groundWireSlips({ bench }: VariantContext): Variant[] {
   const has = (section: OverheadSection): boolean =>

@@ -30,6 +30,14 @@ const FIELD_SETS: readonly { fields: readonly Field[]; words: string; prior: num
   { fields: ['bundleSpacingM'], words: 'bundle spacings', prior: -1 },
 ];
 
+/** A length in metres beyond which centimetres come to mind; below it nobody has typed them. */
+const BEYOND_METRES: Readonly<Record<Field, number>> = {
+  horizontalM: 60,
+  attachmentHeightM: 150,
+  sagM: 60,
+  bundleSpacingM: 2,
+};
+
 const UNITS: readonly { code: CauseCode; factor: number; unit: string }[] = [
   { code: 'feet-for-metres', factor: FEET, unit: 'feet' },
   { code: 'centimetres-for-metres', factor: 0.01, unit: 'centimetres' },
@@ -43,6 +51,9 @@ export function lengthUnitSlips(context: VariantContext): Variant[] {
     UNITS.flatMap(({ code, factor, unit }) =>
       FIELD_SETS.flatMap(({ fields, words, prior }): Variant[] => {
         const indices = new Set(group.map(({ index }) => index));
+        const isLikely =
+          code !== 'centimetres-for-metres' || group.some(({ section }) => isBeyond(section, fields));
+        if (!isLikely) return [];
         const outcome = context.bench.changed((section, index) =>
           indices.has(index) ? scaled(section, fields, factor) : null,
         );
@@ -56,6 +67,13 @@ export function lengthUnitSlips(context: VariantContext): Variant[] {
         return [{ ...common, ...place, code, outcome, corrected, prior, words: `${words} are in ${unit}` }];
       }),
     ),
+  );
+}
+
+/** True when every one of the fields is too large somewhere to be in metres. */
+function isBeyond(section: OverheadSection, fields: readonly Field[]): boolean {
+  return fields.every((field) =>
+    section.positions.some((position) => Math.abs(fieldOf(position, field) ?? 0) > BEYOND_METRES[field]),
   );
 }
 
