@@ -48,18 +48,19 @@ export function Dialog({
                 <Radix.Description className="mt-1 text-table text-ink-soft">{description}</Radix.Description>
               )}
             </div>
-            {!insistent && (
-              <Radix.Close asChild>
-                <IconButton label="Close">
-                  <svg width={12} height={12} viewBox="0 0 12 12" aria-hidden="true">
-                    <path d="M1 1 11 11M11 1 1 11" stroke="currentColor" strokeWidth={1.5} />
-                  </svg>
-                </IconButton>
-              </Radix.Close>
-            )}
           </div>
           <div className="dialog-body">{children}</div>
           {foot && <div className="dialog-foot">{foot}</div>}
+          {/* Last, so that the focus starts at what the dialog asks for. */}
+          {!insistent && (
+            <Radix.Close asChild>
+              <IconButton label="Close" className="dialog-close">
+                <svg width={12} height={12} viewBox="0 0 12 12" aria-hidden="true">
+                  <path d="M1 1 11 11M11 1 1 11" stroke="currentColor" strokeWidth={1.5} />
+                </svg>
+              </IconButton>
+            </Radix.Close>
+          )}
         </Radix.Content>
       </Radix.Portal>
     </Radix.Root>
