@@ -1,7 +1,7 @@
 import { PROBLEMS } from '../../shared/contracts/errors';
 import { parameterNames, parameterPattern } from './path-parameters';
 import { inQuery, requestSchema } from './request-content';
-import type { Route } from './route';
+import type { Route } from '../routes/route';
 import { componentName, schemaDocuments } from './schema-documents';
 
 type Json = Record<string, unknown>;

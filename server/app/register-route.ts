@@ -17,8 +17,8 @@ import { findActor } from '../services/session/find-actor';
 import { checkParameters, expressPath } from './path-parameters';
 import { readContent } from './request-content';
 import type { Content } from './request-content';
-import { Answer } from './route';
-import type { Call, Route, UploadedFile } from './route';
+import { Answer } from '../routes/route';
+import type { Call, Route, UploadedFile } from '../routes/route';
 import type { Context } from '../integrations/context';
 import { sendAnswer } from './send-answer';
 

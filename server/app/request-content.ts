@@ -3,7 +3,7 @@ import * as validators from '../../shared/contracts/api-validators.generated.js'
 import { faultsAgainst } from '../../shared/contracts/validators-by-name';
 import type { SchemaPath } from '../../shared/contracts/validators-by-name';
 import { invalidContent, Problem } from '../errors/problem';
-import type { Route } from './route';
+import type { Route } from '../routes/route';
 
 export const inQuery = ({ method }: Pick<Route, 'method'>) => method === 'GET' || method === 'DELETE';
 

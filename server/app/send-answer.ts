@@ -1,7 +1,7 @@
 import type { Response } from 'express';
 import { faultsAgainst } from '../../shared/contracts/validators-by-name';
-import { Answer } from './route';
-import type { FileAnswer, Route } from './route';
+import { Answer } from '../routes/route';
+import type { FileAnswer, Route } from '../routes/route';
 import type { Context } from '../integrations/context';
 
 /** A file name for a header: plain for old readers, whole for all others (RFC 6266, RFC 8187). */

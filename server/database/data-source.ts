@@ -1,6 +1,6 @@
 import { DataSource } from 'typeorm';
 import { ENTITIES } from './entity-list';
-import { MIGRATIONS } from './migrations';
+import { MIGRATIONS } from './migration-list';
 import { NamingStrategy } from './naming-strategy';
 
 /** Who connects: the owner migrates, the web role serves requests, the worker role runs jobs. */

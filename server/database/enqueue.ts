@@ -1,4 +1,4 @@
-import type { QueueName } from './queue-names';
+import type { QueueName } from '../integrations/queue-names';
 import type { Transaction } from './transaction';
 
 /** Queues work that is done after this transaction commits, and not at all when it does not. */

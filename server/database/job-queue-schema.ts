@@ -1,6 +1,6 @@
 import PgBoss from 'pg-boss';
 import type { QueryRunner } from 'typeorm';
-import { QUEUES } from './queue-names';
+import { QUEUES } from '../integrations/queue-names';
 import { WEB_ROLE, WORKER_ROLE } from './role-names';
 
 /** The job queue's own tables, made by the owner; queues are tables too, so no other role can add one. */

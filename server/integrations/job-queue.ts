@@ -1,6 +1,6 @@
 import PgBoss from 'pg-boss';
 import type { EntityManager } from 'typeorm';
-import type { QueueName } from '../database/queue-names';
+import type { QueueName } from './queue-names';
 
 /** Puts work into the queue as part of the transaction that causes it. */
 export interface JobQueue {

@@ -1,4 +1,4 @@
-import { Answer, openRoute } from '../app/route';
+import { Answer, openRoute } from './route';
 import { acceptInvitation } from '../services/accounts/accept-invitation';
 import { askForAccount } from '../services/accounts/ask-for-account';
 import { askForReset, resetPassword } from '../services/accounts/reset-password';

@@ -1,4 +1,4 @@
-import { route } from '../app/route';
+import { route } from './route';
 import { Problem } from '../errors/problem';
 import { presentAuditEvent } from '../presenters/audit.presenter';
 import { readAuditTrail } from '../repositories/audit.repository';

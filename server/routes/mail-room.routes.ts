@@ -1,4 +1,4 @@
-import { openRoute } from '../app/route';
+import { openRoute } from './route';
 import { ReceivedMail } from '../entities/correspondence.entities';
 import { notFound } from '../errors/problem';
 import { presentMail } from '../presenters/mail.presenter';

@@ -1,4 +1,4 @@
-import { Answer, route } from '../app/route';
+import { Answer, route } from './route';
 import type { Transaction } from '../database/transaction';
 import { notFound } from '../errors/problem';
 import { presentInvitation, presentOrganisation, presentPerson } from '../presenters/people.presenter';

@@ -1,4 +1,4 @@
-import type { Route } from '../app/route';
+import type { Route } from './route';
 import { accountRoutes } from './account.routes';
 import { auditRoutes } from './audit.routes';
 import { mailRoomRoutes } from './mail-room.routes';

@@ -1,4 +1,4 @@
-import { route } from '../app/route';
+import { route } from './route';
 import { presentRuleSet } from '../presenters/rule-set.presenter';
 import { namesOf } from '../repositories/people-names.repository';
 import { listRuleSets } from '../repositories/rule-parts.repository';

@@ -1,5 +1,5 @@
-import { bareRoute } from '../app/route';
-import { requireReady } from '../app/readiness';
+import { bareRoute } from './route';
+import { requireReady } from './readiness';
 
 /** The server itself: whether it lives, whether it can work, what it offers. */
 export const serverRoutes = [

@@ -1,4 +1,4 @@
-import { Answer, openRoute, route } from '../app/route';
+import { Answer, openRoute, route } from './route';
 import { asSystem } from '../database/transaction';
 import { presentSession } from '../presenters/session.presenter';
 import { changePassword } from '../services/session/change-password';

@@ -7,6 +7,7 @@ import type { RuleSet } from '../../shared/checks/rule-set';
 import { readBands, readTolerances } from '../../shared/checks/rule-set-file';
 import type { RuleFile } from '../../shared/checks/rule-set-file';
 import type { Fault } from '../../shared/contracts/faults';
+import type { Notice } from '../../shared/filing/types';
 import { readJsonText } from '../../shared/contracts/json-text';
 import { STARTING_LIBRARY } from '../../shared/library/conductors';
 import { readFilingFile } from '../files/read-filing-file';
@@ -77,7 +78,7 @@ async function check(wanted: CheckArguments): Promise<number> {
     frequenciesHz: wanted.frequenciesHz,
     matrices: wanted.wantsMatrices,
   });
-  for (const { message } of read.notices) process.stderr.write(`Note: ${message}\n`);
+  tellNotices(read.notices);
   if (wanted.isJson) {
     process.stdout.write(`${JSON.stringify(report)}\n`);
     process.stderr.write(`${summaryLines(report).join('\n')}\n`);
@@ -130,6 +131,15 @@ async function readRuleFile<T>(
   if (!result.ok) throw new Unusable(nameOf(file), result.faults);
   const version = `file-${createHash('sha256').update(bytes).digest('hex').slice(0, 12)}`;
   return { value: result.value, version };
+}
+
+/** Each notice once, with how often it was given. */
+function tellNotices(notices: readonly Notice[]): void {
+  const counts = new Map<string, number>();
+  for (const { message } of notices) counts.set(message, (counts.get(message) ?? 0) + 1);
+  for (const [message, count] of counts) {
+    process.stderr.write(`Note: ${message}${count > 1 ? ` (${count} times)` : ''}\n`);
+  }
 }
 
 /** A fault of our own: said in one sentence, so that nobody takes a stack trace for an answer. */

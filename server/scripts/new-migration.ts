@@ -49,5 +49,5 @@ const file = `${FOLDER}/${String(number).padStart(4, '0')}-${name}.ts`;
 const changes = await wantedChanges();
 writeFileSync(file, migrationText(`${pascal(name)}${Date.now()}`, changes));
 console.log(
-  `wrote ${file} with ${changes.length} statements; say what it is for, add grants, row security and triggers, list it in index.ts`,
+  `wrote ${file} with ${changes.length} statements; say what it is for, add grants, row security and triggers, list it in migration-list.ts`,
 );

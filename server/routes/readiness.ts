@@ -1,4 +1,4 @@
-import { NEWEST_MIGRATION } from '../database/migrations';
+import { NEWEST_MIGRATION } from '../database/migration-list';
 import { Problem } from '../errors/problem';
 import type { Context } from '../integrations/context';
 
