@@ -3,6 +3,7 @@ import { inOrder, MAX_FAULTS, shown } from '../../shared/contracts/faults';
 import type { CellFault, Fault } from '../../shared/contracts/faults';
 import { readJsonText } from '../../shared/contracts/json-text';
 import type { CellReader } from '../../shared/filing/csv-cells';
+import { CSV_NAMES } from '../../shared/filing/csv-columns';
 import { filingFromRows } from '../../shared/filing/csv-rows';
 import { readFiling } from '../../shared/filing/read-filing';
 import type { ReadContext } from '../../shared/filing/read-filing';
@@ -87,9 +88,13 @@ function readJson(text: string, notices: Notice[], options: FileOptions): Filing
   return { ...base, filing: null, sound: { lines: sound }, faults, notices };
 }
 
-/** In the order of the file, cut where more would help nobody. */
+/** Places of the columns in the list; a fault of a whole row, or of a column that is not known, comes first. */
+const placeOfColumn = new Map(CSV_NAMES.map((name, i) => [name, i]));
+
+/** Row by row, within a row in the order of the list of columns; cut where more would help nobody. */
 function inFileOrder(faults: readonly CellFault[]): CellFault[] {
-  const sorted = [...faults].sort((a, b) => a.row - b.row);
+  const place = (f: CellFault) => placeOfColumn.get(f.column) ?? -1;
+  const sorted = [...faults].sort((a, b) => a.row - b.row || place(a) - place(b));
   if (sorted.length <= MAX_FAULTS) return sorted;
   const message = `There are more faults than the ${MAX_FAULTS} listed here.`;
   return [
