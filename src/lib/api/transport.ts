@@ -34,14 +34,19 @@ function bodyOf(body: unknown): { body?: BodyInit; type: Record<string, string> 
   return { body: JSON.stringify(body), type: { 'Content-Type': 'application/json' } };
 }
 
+/** Headers of every write: the token that shows that it comes from this product's page. */
+export async function writeHeaders(): Promise<Record<string, string>> {
+  if (csrfToken === undefined) await fetchCsrfToken();
+  const token: Record<string, string> = csrfToken === undefined ? {} : { 'X-CSRF-Token': csrfToken };
+  return { Accept: 'application/json', ...token };
+}
+
 async function attempt(sending: Sending): Promise<Response> {
-  const safe = SAFE.has(sending.method);
-  if (!safe && csrfToken === undefined) await fetchCsrfToken();
   const { body, type } = bodyOf(sending.body);
+  const safe = SAFE.has(sending.method);
   const headers = {
-    Accept: 'application/json',
+    ...(safe ? { Accept: 'application/json' } : await writeHeaders()),
     ...type,
-    ...(safe || csrfToken === undefined ? {} : { 'X-CSRF-Token': csrfToken }),
     ...sending.headers,
   };
   try {

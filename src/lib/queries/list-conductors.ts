@@ -9,4 +9,4 @@ export const conductorsQuery = () =>
     staleTime: 5 * 60_000,
   });
 
-export const useConductors = () => useSuspenseQuery(conductorsQuery()).data.items;
+export const useConductors = () => useSuspenseQuery(conductorsQuery()).data;

@@ -1,10 +1,17 @@
 import { useMutation } from '@tanstack/react-query';
-import { call, fileForm } from '../../../lib/api/call';
+import type { Import } from '#shared/contracts/api.generated';
+import { addressOf, fileForm } from '../../../lib/api/call';
+import { upload } from '../../../lib/api/upload';
+import type { OnProgress } from '../../../lib/api/upload';
 
 /** Sends a file to be read; nothing of it is in the draft until the applicant has taken it. */
-export function useImportFile(number: string) {
+export function useImportFile(number: string, onProgress: OnProgress) {
   return useMutation({
     mutationFn: (file: File) =>
-      call('importFile', { params: { applicationId: number }, body: fileForm(file) }),
+      upload<Import>({
+        url: addressOf('importFile', { params: { applicationId: number } }),
+        form: fileForm(file),
+        onProgress,
+      }),
   });
 }

@@ -1,9 +1,15 @@
+import type { Conductor } from '#shared/contracts/api.generated';
 import { Field } from '../../../components/ui/field';
 import { Select } from '../../../components/ui/inputs';
 import { useLineFormView } from '../hooks/form-context';
-import type { LibraryConductor } from '../hooks/form-context';
 import { useFieldTies } from '../hooks/use-field';
-import { chooseFromLibrary, conductorWords, isForGroundWires, ownData } from '../model/conductor-choice';
+import {
+  chooseFromLibrary,
+  conductorWords,
+  familyOf,
+  isForGroundWires,
+  ownData,
+} from '../model/conductor-choice';
 import type { ConductorForm } from '../model/form-types';
 import { OwnConductor } from './own-conductor';
 import { TypedField } from './typed-field';
@@ -11,15 +17,9 @@ import { TypedField } from './typed-field';
 const OWN = '\u0000own';
 
 /** The library's conductors by family; those that lack what the model needs stand there but cannot be chosen. */
-function LibraryOptions({
-  conductors,
-  current,
-}: {
-  conductors: readonly LibraryConductor[];
-  current: string;
-}) {
+function LibraryOptions({ conductors, current }: { conductors: readonly Conductor[]; current: string }) {
   const shown = conductors.filter((c) => !c.retired || c.name === current);
-  const families = [...new Set(shown.map((c) => c.family))];
+  const families = [...new Set(shown.map(familyOf))];
   const unknown = current !== '' && !shown.some((c) => c.name === current);
   return (
     <>
@@ -27,10 +27,10 @@ function LibraryOptions({
       {families.map((family) => (
         <optgroup key={family} label={family}>
           {shown
-            .filter((c) => c.family === family)
+            .filter((c) => familyOf(c) === family)
             .map((c) => (
-              <option key={c.name} value={c.name} disabled={c.data === null}>
-                {c.data === null ? `${c.name} (data missing)` : c.name}
+              <option key={c.name} value={c.name} disabled={!c.choosable}>
+                {!c.choosable ? `${c.name} (data missing)` : c.name}
               </option>
             ))}
         </optgroup>
@@ -54,7 +54,8 @@ export function ConductorFields({ section, name, conductor, label }: ConductorFi
   const chosen = conductors.find((c) => c.name === conductor.library);
   const grounds = name.startsWith('ground');
   const offered = [...conductors].sort(
-    (a, b) => Number(isForGroundWires(b.family) === grounds) - Number(isForGroundWires(a.family) === grounds),
+    (a, b) =>
+      Number(isForGroundWires(familyOf(b)) === grounds) - Number(isForGroundWires(familyOf(a)) === grounds),
   );
   const choose = (value: string) =>
     set(path, value === OWN ? ownData(conductor, chosen) : chooseFromLibrary(conductor, conductors, value));

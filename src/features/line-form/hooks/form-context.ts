@@ -1,4 +1,5 @@
 import { createContext, useContext } from 'react';
+import type { Conductor } from '#shared/contracts/api.generated';
 import type { FormPath, LineForm } from '../model/form-types';
 
 /** What the check or the schema says at a field. */
@@ -22,21 +23,13 @@ export interface LineFormView {
   leave: (pointer: string) => void;
   /** The hint under a field: its typical band, or the value in the filing's unit. */
   hintAt: (pointer: string) => string | undefined;
-  conductors: readonly LibraryConductor[];
+  conductors: readonly Conductor[];
   /** Resistivity assumed where none is entered, Ω·m. */
   ownersResistivityOhmM: number;
   /** Power base assumed where none is entered, MVA. */
   ownersBaseMva: number;
   /** Nominal voltages that the rules have bands for, kV. */
   classesKv: readonly number[];
-}
-
-/** A conductor of the library as the form offers it. */
-export interface LibraryConductor {
-  name: string;
-  family: string;
-  data: Record<string, unknown> | null;
-  retired: boolean;
 }
 
 export const LineFormContext = createContext<LineFormView | null>(null);

@@ -12,7 +12,7 @@ const DECLARED = /^\/declared\/\d+\/([rxb][01])$/;
 /** What rules and library add to the form: hints under its fields, choices, assumptions. */
 export function useFormSettings(form: LineForm) {
   const rules = useRules();
-  const conductors = useConductors();
+  const { items: conductors } = useConductors();
   const { bands, owner } = rules;
   const hintAt = useCallback(
     (pointer: string) => {

@@ -1,63 +1,73 @@
+import type { Conductor } from '#shared/contracts/api.generated';
+import { figure, THIN_SPACE } from '#shared/format/numbers';
+import { handbookData } from '#shared/library/handbook-data';
+import type { LibraryConductor } from '#shared/library/types';
 import type { ConductorForm } from './form-types';
 import { fieldOf } from './leaf';
 import { readNumber, writeNumber } from './number-text';
 
-/** A conductor of the library as far as the form needs it. */
-interface Offered {
-  name: string;
-  family: string;
-  data: Record<string, unknown> | null;
-}
+/** The library's row of a conductor: the API sends it as the library has it. */
+export const rowOf = ({ row }: Conductor): LibraryConductor => row as unknown as LibraryConductor;
+
+export const familyOf = (conductor: Conductor): string => rowOf(conductor).family;
 
 /** Families that are offered first where a ground wire is asked for. */
 export const isForGroundWires = (family: string): boolean => /shield|ground/i.test(family);
 
-const temperatureOf = (offered: Offered | undefined): string => {
-  const given = offered?.data?.['temperatureC'];
-  return typeof given === 'number' ? writeNumber(given) : '';
-};
+/** What a conductor is meant at while nobody says otherwise, °C: where most tables have a value. */
+const USUAL_C = 50;
 
-/** A library conductor chosen by its name; the temperature of its data stands in where none was entered. */
+/** A temperature to begin with: the usual one where the row has it, else the row's first. */
+function startingTemperature(conductor: Conductor): string {
+  const tabled = rowOf(conductor).acResistances ?? [];
+  const usual = tabled.find((t) => t.temperatureC === USUAL_C) ?? tabled[0];
+  return usual ? writeNumber(usual.temperatureC) : '';
+}
+
+/** A library conductor chosen by its name; a temperature is put in where none was entered. */
 export function chooseFromLibrary(
   form: ConductorForm,
-  library: readonly Offered[],
+  library: readonly Conductor[],
   name: string,
 ): ConductorForm {
   const found = library.find((c) => c.name === name);
-  const temperature = form.temperatureC.text.trim() === '' ? temperatureOf(found) : form.temperatureC.text;
-  return { ...form, source: 'library', library: name, temperatureC: { text: temperature, unit: 'degC' } };
+  const empty = form.temperatureC.text.trim() === '';
+  const text = empty && found ? startingTemperature(found) : form.temperatureC.text;
+  return { ...form, source: 'library', library: name, temperatureC: { text, unit: 'degC' } };
+}
+
+function dataOf(form: ConductorForm, conductor: Conductor | undefined) {
+  const temperature = readNumber(form.temperatureC.text);
+  if (!conductor || temperature.kind !== 'number') return null;
+  return handbookData(rowOf(conductor), temperature.value);
 }
 
 /** The applicant's own data, begun with those of the library conductor that was chosen before. */
-export function ownData(form: ConductorForm, before: Offered | undefined): ConductorForm {
-  const data = before?.data;
+export function ownData(form: ConductorForm, before: Conductor | undefined): ConductorForm {
+  const data = dataOf(form, before);
   if (!data || form.diameterMm.text.trim() !== '') return { ...form, source: 'own' };
-  const from = (key: string, unit: string) => fieldOf(data[key], unit, [unit], undefined);
+  const from = (value: number | undefined, unit: string) => fieldOf(value, unit, [unit], undefined);
   return {
     ...form,
     source: 'own',
     model: 'handbook',
-    name: form.name || (before?.name ?? ''),
-    diameterMm: from('diameterMm', 'mm'),
-    coreDiameterMm: from('coreDiameterMm', 'mm'),
-    gmrMm: from('gmrMm', 'mm'),
-    acResistanceOhmPerKm: from('acResistanceOhmPerKm', 'ohm/km'),
-    dcResistance20OhmPerKm: from('dcResistance20OhmPerKm', 'ohm/km'),
-    temperatureC: from('temperatureC', 'degC'),
-    temperatureCoefficientPerK: from('temperatureCoefficientPerK', '1/K'),
+    name: form.name || data.name,
+    diameterMm: from(data.diameterMm, 'mm'),
+    coreDiameterMm: from(data.coreDiameterMm, 'mm'),
+    gmrMm: from(data.gmrMm, 'mm'),
+    acResistanceOhmPerKm: from(data.acResistanceOhmPerKm, 'ohm/km'),
+    dcResistance20OhmPerKm: from(data.dcResistance20OhmPerKm, 'ohm/km'),
+    temperatureC: from(data.temperatureC, 'degC'),
+    temperatureCoefficientPerK: from(data.temperatureCoefficientPerK, '1/K'),
   };
 }
 
 /** What a chosen library conductor stands for: "28.14 mm, GMR 11.37 mm, 0.0798 Ω/km at 50 °C". */
-export function conductorWords(form: ConductorForm, offered: Offered | undefined): string | undefined {
-  if (form.source === 'own') return undefined;
-  if (!offered?.data) return undefined;
-  const number = (key: string) => {
-    const value = offered.data?.[key];
-    return typeof value === 'number' ? writeNumber(value) : '?';
-  };
-  const words = `${number('diameterMm')} mm, GMR ${number('gmrMm')} mm, ${number('acResistanceOhmPerKm')} Ω/km at ${number('temperatureC')} °C`;
-  const entered = readNumber(form.temperatureC.text);
-  const own = entered.kind === 'number' && entered.value !== offered.data['temperatureC'];
-  return own ? `${words}; the resistance is taken at your temperature` : words;
+export function conductorWords(form: ConductorForm, conductor: Conductor | undefined): string | undefined {
+  const data = form.source === 'library' ? dataOf(form, conductor) : null;
+  if (!data) return undefined;
+  const t = THIN_SPACE;
+  const diameter = `${figure(data.diameterMm, 4)}${t}mm`;
+  const gmr = `GMR ${figure(data.gmrMm, 4)}${t}mm`;
+  return `${diameter}, ${gmr}, ${figure(data.acResistanceOhmPerKm, 4)}${t}Ω/km at ${figure(data.temperatureC, 4)}${t}°C`;
 }

@@ -1,0 +1,71 @@
+import { useState } from 'react';
+import type { Import } from '#shared/contracts/api.generated';
+import { ProblemNotice } from '../../../components/feedback/problem-notice';
+import { Button } from '../../../components/ui/button';
+import { Dialog } from '../../../components/ui/dialog';
+import { useCaseWrite } from '../../../lib/queries/use-case-write';
+import { dialectWords, readWords } from '../model/dialect-words';
+import { FaultTable } from './fault-table';
+
+interface ImportResultProps {
+  number: string;
+  read: Import;
+  /** Puts the file aside: another may be chosen. */
+  onDone: () => void;
+}
+
+/** What was read of a file: how it is written, what can be taken, what must be looked at; then the applicant's word. */
+export function ImportResult({ number, read, onDone }: ImportResultProps) {
+  const [looking, setLooking] = useState(false);
+  const take = useCaseWrite('takeImport', number);
+  const { id, lines, faults, notices, dialect } = read;
+  const replaced = lines.filter((l) => l.replaces);
+  const takeLines = (which: 'all' | 'good') =>
+    take.mutate({ params: { importId: id }, body: { take: which } }, { onSuccess: onDone });
+  return (
+    <div className="grid gap-3 text-table" role="status">
+      <p className="text-h3 font-strong">{readWords(read)}</p>
+      {dialect && (
+        <p className="text-ink-soft">{`${dialectWords(dialect)}. If that is not so, save the file anew.`}</p>
+      )}
+      {replaced.length > 0 && <p>{`Replaced in the draft: ${replaced.map((l) => l.name).join(', ')}.`}</p>}
+      {notices.map((notice, i) => (
+        <p key={i} className="text-ink-soft">
+          {notice.message}
+        </p>
+      ))}
+      {faults.length > 0 && (
+        <div>
+          <Button small onClick={() => setLooking(true)}>
+            {faults.length === 1 ? 'The place to look at' : `All ${faults.length} places`}
+          </Button>
+        </div>
+      )}
+      <ProblemNotice error={take.error} />
+      <div className="flex flex-wrap gap-3">
+        {lines.length > 0 && (
+          <Button
+            small
+            kind="primary"
+            busy={take.isPending}
+            onClick={() => takeLines(faults.length === 0 ? 'all' : 'good')}
+          >
+            {lines.length === 1 ? 'Take the line' : `Take ${lines.length} lines`}
+          </Button>
+        )}
+        <Button small onClick={onDone}>
+          {lines.length > 0 ? 'Take nothing' : 'Choose another file'}
+        </Button>
+      </div>
+      <Dialog
+        open={looking}
+        onOpenChange={setLooking}
+        title={read.fileName}
+        description={readWords(read)}
+        wide
+      >
+        <FaultTable faults={faults} />
+      </Dialog>
+    </div>
+  );
+}

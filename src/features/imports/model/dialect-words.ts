@@ -1,0 +1,30 @@
+import type { Import } from '#shared/contracts/api.generated';
+
+type Dialect = NonNullable<Import['dialect']>;
+
+const DELIMITERS: Readonly<Record<Dialect['delimiter'], string>> = {
+  comma: 'commas',
+  semicolon: 'semicolons',
+  tab: 'tabs',
+};
+const ENCODINGS: Readonly<Record<Dialect['encoding'], string>> = {
+  'utf-8': 'UTF-8',
+  'windows-1252': 'Windows-1252',
+};
+
+/** How a table is written, as it was found: "Columns parted by semicolons, decimal comma, UTF-8". */
+export function dialectWords({ delimiter, decimal, encoding, lineEnds }: Dialect): string {
+  const ends = lineEnds === 'mixed' ? ', mixed line ends' : '';
+  return `Columns parted by ${DELIMITERS[delimiter]}, decimal ${decimal}, ${ENCODINGS[encoding]}${ends}`;
+}
+
+const counted = (n: number, one: string): string => `${n} ${one}${n === 1 ? '' : 's'}`;
+
+/** What was read, in one sentence. */
+export function readWords({ format, rowCount, lines, faults }: Import): string {
+  const rows = format === 'csv' ? `${counted(rowCount, 'row')} read: ` : '';
+  const taken = `${counted(lines.length, 'line')} can be taken`;
+  return faults.length === 0
+    ? `${rows}${taken}.`
+    : `${rows}${taken}, ${counted(faults.length, 'place')} to look at.`;
+}
