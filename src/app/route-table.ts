@@ -29,7 +29,11 @@ export const ROUTES: readonly RouteEntry[] = [
   { path: '/applications', lazy: () => import('./routes/applications') },
   { path: '/applications/new', roles: ['applicant'], lazy: () => import('./routes/new-application') },
   { path: '/applications/:number', lazy: () => import('./routes/application') },
-  { path: '/applications/:number/edit', roles: ['applicant'], lazy: () => import('./routes/edit-application') },
+  {
+    path: '/applications/:number/edit',
+    roles: ['applicant'],
+    lazy: () => import('./routes/edit-application'),
+  },
   {
     path: '/applications/:number/lines/:lineKey',
     roles: ['applicant'],
@@ -40,4 +44,18 @@ export const ROUTES: readonly RouteEntry[] = [
     lazy: () => import('./routes/filed-line'),
   },
   { path: '/mail-room', lazy: () => import('./routes/mail-room') },
+  { path: '/applications/:number/compare', lazy: () => import('./routes/compare') },
+  { path: '/applications/:number/record', lazy: () => import('./routes/case-record') },
+  {
+    path: '/applications/:number/review',
+    roles: ['reviewer', 'administrator'],
+    lazy: () => import('./routes/review'),
+  },
+  { path: '/queue', roles: ['reviewer', 'administrator'], lazy: () => import('./routes/queue') },
+  { path: '/lines', lazy: () => import('./routes/lines') },
+  { path: '/letters', lazy: () => import('./routes/letters') },
+  { path: '/rules', lazy: () => import('./routes/rules') },
+  { path: '/bands', roles: ['administrator'], lazy: () => import('./routes/bands') },
+  { path: '/people', roles: ['administrator'], lazy: () => import('./routes/people') },
+  { path: '/record', roles: ['administrator'], lazy: () => import('./routes/record') },
 ];

@@ -6,10 +6,12 @@ import { SegmentChoice } from '../../../components/ui/segment';
 import { rowOf } from '../../../components/charts/balance-entries';
 import { useRevisionLine } from '../../../lib/queries/get-revision-line';
 import { arrangeFindings } from '../model/arrange-findings';
-import { readFiledLine } from '../model/filed-line';
+import { overheadOf, readFiledLine, type FiledLine } from '../model/filed-line';
 import { BalanceSection, type FindingActions } from './balance-section';
 import { CouplingSection } from './coupling-section';
+import { FrequencySection } from './frequency-section';
 import { GeometrySection } from './geometry-section';
+import { HandCheckSection } from './hand-check-section';
 import { LineHead } from './line-head';
 import { WholeLineSection } from './whole-line-section';
 
@@ -60,7 +62,21 @@ export function LineSheet({ applicationNumber, letter, lineKey, findingActions }
         findingActions={findingActions}
       />
       <WholeLineSection line={line} circuit={circuit} />
+      <Calculations line={line} filed={filed} circuit={circuit} />
     </article>
+  );
+}
+
+/** What the browser computes from the filed geometry of the first overhead section. */
+function Calculations({ line, filed, circuit }: { line: RevisionLine; filed: FiledLine; circuit: number }) {
+  const index = filed.normalised.sections.findIndex((s) => s.kind === 'overhead');
+  const section = overheadOf(filed.normalised.sections[index]);
+  const where = line.sectionCount > 1 ? `Section ${index + 1}; ` : '';
+  return (
+    <>
+      <FrequencySection line={line} circuit={circuit} section={section} index={index} />
+      <HandCheckSection section={section} frequencyHz={line.frequencyHz} circuit={circuit} where={where} />
+    </>
   );
 }
 
@@ -70,6 +86,8 @@ function jumpsOf(line: RevisionLine): { id: string; label: string }[] {
     ...(line.mutual.length > 0 ? [{ id: 'coupling', label: 'Coupling' }] : []),
     { id: 'geometry', label: 'Geometry' },
     { id: 'whole-line', label: 'Whole line' },
+    { id: 'frequency', label: 'Frequency' },
+    { id: 'hand-check', label: 'By hand' },
   ];
 }
 

@@ -1,0 +1,15 @@
+import type { QueryClient } from '@tanstack/react-query';
+import { bandDraftQuery } from '../../features/bands/api/get-band-draft';
+import { ruleSetsQuery } from '../../features/bands/api/list-rule-sets';
+import { BandsPage } from '../../features/bands/components/bands-page';
+import { rulesQuery } from '../../lib/queries/get-rules';
+
+export function prefetch(client: QueryClient) {
+  return Promise.all([
+    client.prefetchQuery(bandDraftQuery()),
+    client.prefetchQuery(ruleSetsQuery()),
+    client.prefetchQuery(rulesQuery()),
+  ]);
+}
+
+export const Component = BandsPage;
