@@ -30,7 +30,7 @@ export function BandStrip({ outer, typical, inForce, values, label }: BandStripP
   const moved = (inForce ?? []).filter((limit, i) => limit !== typical[i]);
   return (
     <div ref={box} className="min-w-0">
-      <svg width={width} height={36} role="img" aria-label={label} className="max-w-full">
+      <svg width={width} height={36} viewBox={`0 0 ${width} 36`} role="img" aria-label={label}>
         <rect x={low} y={TOP} width={Math.max(high - low, 0)} height={BASE - TOP} className="fill-band" />
         {bins.map((bin, i) => {
           const middle = (bin.from + bin.to) / 2;

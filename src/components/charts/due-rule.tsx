@@ -72,7 +72,14 @@ export function DueRule({ days, today, items, label }: DueRuleProps) {
   const { todayX } = layout;
   return (
     <div ref={box} className="min-w-0">
-      <svg width={width} height={HEIGHT} role="img" aria-label={label} className="axis-text max-w-full">
+      <svg
+        width={width}
+        height={HEIGHT}
+        viewBox={`0 0 ${width} ${HEIGHT}`}
+        role="img"
+        aria-label={label}
+        className="axis-text"
+      >
         {todayX !== null && todayX > layout.start && <Overdue from={layout.start} to={todayX} />}
         <Rule layout={layout} />
         {todayX !== null && <Today x={todayX} text={today.text} width={width} />}

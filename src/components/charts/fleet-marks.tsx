@@ -29,15 +29,10 @@ export function FleetMarks({ newly, already, total, label }: FleetMarksProps) {
     `M${x} ${y - size}l${size} ${size}-${size} ${size}-${size}-${size}Z`;
   const dot = (x: number, y: number) => `M${x - 1.5} ${y}a1.5 1.5 0 1 0 3 0a1.5 1.5 0 1 0-3 0`;
   const flagged = newly + already;
+  const height = Math.ceil(total / perRow) * PITCH + 2;
   return (
     <div ref={box} className="min-w-0">
-      <svg
-        width={width}
-        height={Math.ceil(total / perRow) * PITCH + 2}
-        role="img"
-        aria-label={label}
-        className="max-w-full"
-      >
+      <svg width={width} height={height} viewBox={`0 0 ${width} ${height}`} role="img" aria-label={label}>
         <path d={path(0, newly, diamond(4.6))} className="fill-ochre" />
         <path d={path(newly, flagged, diamond(4))} fill="none" strokeWidth={1.5} className="stroke-ochre" />
         <path d={path(flagged, total, dot)} className="fill-rule-strong" />

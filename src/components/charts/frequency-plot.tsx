@@ -140,7 +140,14 @@ export function FrequencyPlot(props: FrequencyPlotProps) {
       <p className="text-table">
         <b>{props.title}</b> <span className="text-label text-ink-soft">{props.unit}</span>
       </p>
-      <svg width={width} height={HEIGHT} role="img" aria-label={props.label} className="axis-text max-w-full">
+      <svg
+        width={width}
+        height={HEIGHT}
+        viewBox={`0 0 ${width} ${HEIGHT}`}
+        role="img"
+        aria-label={props.label}
+        className="axis-text"
+      >
         <Grid axes={axes} />
         <path
           d={curve(props.points) ?? ''}

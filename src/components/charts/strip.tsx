@@ -1,3 +1,4 @@
+import { useMediaQuery } from '../../hooks/use-media-query';
 import { useWidth } from '../../hooks/use-width';
 import {
   layOutStrip,
@@ -18,6 +19,8 @@ interface StripProps {
 const TOP = 12;
 const BASE = 29;
 const HEIGHT = 44;
+const WIDEST = 520;
+const PRINTED_WIDTH = 146;
 
 /** A triangle on its tip above the value; lying outward when the value is beyond the scale. */
 function DeclaredPointer({ x, pinned }: Place) {
@@ -91,11 +94,19 @@ function Scale({ layout }: { layout: StripLayout }) {
  */
 export function Strip({ values, endTexts, label }: StripProps) {
   const [box, width] = useWidth<HTMLDivElement>(272);
-  const layout = layOutStrip(values, Math.min(width, 520));
+  // Paper is not measured: the column has this width on an A4 page.
+  const printed = useMediaQuery('print');
+  const layout = layOutStrip(values, printed ? PRINTED_WIDTH : Math.min(width, WIDEST));
   const { declared, recomputed, whisker, dimension } = layout;
   return (
     <div ref={box} className="min-w-0">
-      <svg width={layout.end + 8} height={HEIGHT} role="img" aria-label={label} className="max-w-full">
+      <svg
+        width={layout.end + 8}
+        height={HEIGHT}
+        viewBox={`0 0 ${layout.end + 8} ${HEIGHT}`}
+        role="img"
+        aria-label={label}
+      >
         <Scale layout={layout} />
         <g className="axis-text">
           <text x={4} y={43}>

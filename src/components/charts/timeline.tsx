@@ -126,7 +126,7 @@ export function Timeline({ revisions, entries, ...input }: TimelineProps) {
     <div ref={box} className="min-w-0">
       {layout ? (
         <>
-          <svg width={width} height={98} aria-hidden="true" className="max-w-full">
+          <svg width={width} height={98} viewBox={`0 0 ${width} 98`} aria-hidden="true">
             <Weeks layout={layout} width={width} />
             <Stretches layout={layout} />
             {layout.dueX !== null && input.due && (

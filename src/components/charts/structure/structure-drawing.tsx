@@ -74,6 +74,7 @@ export function StructureDrawing({
   const { keptExtent, handlersFor } = usePositionDrag({ stepM, onMove, onPick });
   const layout = layOutStructure(positions, { width, tallest, unit, clearanceM, extent: keptExtent });
   const { frame, marks, discRadius: radius, circuits, extent } = layout;
+  const height = layout.height + 18;
   const symbol = unit.name === 'feet' ? 'ft' : 'm';
   const clearance =
     clearanceM === null ? '' : `${lengthText(clearanceM, unit)}\u2009${symbol}, the least clearance`;
@@ -82,8 +83,9 @@ export function StructureDrawing({
     <div ref={box} className="min-w-0">
       <svg
         width={width}
-        height={layout.height + 18}
-        className="drawing block max-w-full"
+        height={height}
+        viewBox={`0 0 ${width} ${height}`}
+        className="drawing block"
         role={onMove ? 'group' : 'img'}
         aria-label={description}
       >
