@@ -1,3 +1,4 @@
+import { In } from 'typeorm';
 import type { EntityManager } from 'typeorm';
 import { Invitation, Organisation, PasswordReset } from '../entities/people.entities';
 
@@ -8,7 +9,13 @@ export interface InvitationRow extends Invitation {
 /** Newest first, with the organisations' names. */
 export async function listInvitations(manager: EntityManager): Promise<InvitationRow[]> {
   const invitations = await manager.find(Invitation, { order: { createdAt: 'DESC', id: 'ASC' }, take: 1000 });
-  return Promise.all(invitations.map((invitation) => withOrganisation(manager, invitation)));
+  const ids = invitations.map((invitation) => invitation.orgId).filter((id) => id !== null);
+  const organisations = await manager.findBy(Organisation, { id: In(ids) });
+  const byId = new Map(organisations.map(({ id, name }) => [id, { id, name }]));
+  return invitations.map((invitation) => ({
+    ...invitation,
+    organisation: (invitation.orgId === null ? null : byId.get(invitation.orgId)) ?? null,
+  }));
 }
 
 export async function withOrganisation(

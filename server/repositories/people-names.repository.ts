@@ -79,3 +79,16 @@ export async function addressOf(manager: EntityManager, userId: string): Promise
   const user = await manager.findOneBy(User, { id: userId, status: 'active' });
   return user?.email ?? null;
 }
+
+/** Which of these people belong to an organisation. Needs the product's own sight. */
+export async function membersAmong(
+  manager: EntityManager,
+  orgId: string,
+  ids: readonly string[],
+): Promise<ReadonlySet<string>> {
+  const rows = await manager.query<{ id: string }[]>(
+    'SELECT DISTINCT user_id AS id FROM memberships WHERE org_id = $1 AND user_id = ANY($2::uuid[])',
+    [orgId, ids],
+  );
+  return new Set(rows.map((row) => row.id));
+}

@@ -140,3 +140,7 @@ export async function insertRevisionLines(
     })),
   );
 }
+
+export async function findRevisionById(manager: EntityManager, id: string): Promise<Revision | null> {
+  return manager.findOneBy(Revision, { id });
+}

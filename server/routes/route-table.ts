@@ -1,4 +1,12 @@
 import type { Route } from './route';
+import { applicationRoutes } from './application.routes';
+import { correspondenceRoutes } from './correspondence.routes';
+import { demoRoutes } from './demo.routes';
+import { discrepancyRoutes } from './discrepancy.routes';
+import { draftRoutes } from './draft.routes';
+import { reviewRoutes } from './review.routes';
+import { revisionRoutes } from './revision.routes';
+import { rulesRoutes } from './rules.routes';
 import { accountRoutes } from './account.routes';
 import { auditRoutes } from './audit.routes';
 import { mailRoomRoutes } from './mail-room.routes';
@@ -16,4 +24,12 @@ export const ROUTES: readonly Route[] = [
   ...ruleDraftRoutes,
   ...auditRoutes,
   ...mailRoomRoutes,
+  ...applicationRoutes,
+  ...draftRoutes,
+  ...reviewRoutes,
+  ...discrepancyRoutes,
+  ...revisionRoutes,
+  ...correspondenceRoutes,
+  ...rulesRoutes,
+  ...demoRoutes,
 ];

@@ -1,5 +1,5 @@
 import type { Transaction } from '../../database/transaction';
-import { QUEUES } from '../../database/queue-names';
+import { QUEUES } from '../../integrations/queue-names';
 import type { Revision } from '../../entities/filed.entities';
 import { linesOfRevision } from '../../repositories/revision.repository';
 import { currentRuleSet } from '../../repositories/rule-set.repository';

@@ -1,0 +1,63 @@
+import { forbidden, notFound } from '../../errors/problem';
+import { readFilingFile, type FilingFile } from '../../files/read-filing-file';
+import { draftLines } from '../../repositories/draft.repository';
+import { findImport, importRows, insertImport } from '../../repositories/import.repository';
+import { presentImport } from '../../presenters/import.presenter';
+import type * as Api from '../../../shared/contracts/api.generated';
+import { safeFileName } from '../attachments/file-kinds';
+import type { UploadedBytes } from '../attachments/upload-attachment';
+import type { Caller } from '../cases/caller';
+import { holdCase, readCase } from '../cases/case-file';
+import { requireEditable } from '../drafts/update-application';
+import { sha256 } from '../filing/line-hash';
+import { readingContext } from '../rules/reading-context';
+
+/** Reads a JSON or CSV file of lines and stages what it holds; the applicant's word takes it into the draft. */
+export async function readImport(caller: Caller, reference: string, upload: UploadedBytes): Promise<string> {
+  const { tx, actor, ability } = caller;
+  const file = await holdCase(caller, reference, 'update');
+  const { orgId, id: applicationId } = file.application;
+  if (!ability.can('create', { kind: 'Import', orgId })) throw forbidden();
+  requireEditable(file);
+  const { library, owner } = await readingContext(tx.manager);
+  const name = safeFileName(upload.name);
+  const read = readFilingFile(upload.bytes, name, { library, owner });
+  return insertImport(
+    tx.manager,
+    {
+      orgId,
+      applicationId,
+      roundId: file.round.id,
+      state: read.sound.lines.length === 0 ? 'refused' : 'staged',
+      fileName: name,
+      fileSha256: sha256(upload.bytes),
+      dialect: { format: read.format, csv: read.dialect } as never,
+      faults: read.faults as never,
+      notices: read.notices as never,
+      rowCount: read.rowCount,
+      lineCount: read.sound.lines.length,
+      createdBy: actor.userId,
+      createdAt: tx.now,
+    },
+    rowsOf(read).map((row) => ({ ...row, orgId })),
+  );
+}
+
+function rowsOf(read: FilingFile) {
+  return read.sound.lines.map((line, i) => ({
+    ordinal: i + 1,
+    row: null,
+    body: { sheet: line.sheet, nominalVoltageKv: line.nominalVoltageKv, lengthKm: line.lengthKm } as never,
+  }));
+}
+
+/** What an import holds, as the applicant is shown it. */
+export async function getImport(caller: Caller, reference: string, id: string): Promise<Api.Import> {
+  const { tx, ability } = caller;
+  const file = await readCase(caller, reference);
+  const staged = await findImport(tx.manager, ability, file.application.id, id);
+  if (staged === null) throw notFound();
+  const rows = await importRows(tx.manager, staged.id);
+  const draft = await draftLines(tx.manager, file.round.id);
+  return presentImport(staged, rows, draft);
+}
