@@ -35,6 +35,9 @@ const fetchMock = vi.fn((url: RequestInfo | URL, init?: RequestInit) => {
   return given ? Promise.resolve(given) : new Promise<Response>(() => undefined);
 });
 
+/** A page's code is fetched when it is first opened. */
+const LONG = { timeout: 10_000 };
+
 const client = () => new QueryClient({ defaultOptions: { queries: { retry: false } } });
 
 function open(path: string) {
@@ -57,14 +60,14 @@ describe('coming in', () => {
   it('leads somebody without a session to the sign-in, with the way back', async () => {
     answer = (url) => (url === '/api/session' ? json(NOBODY) : undefined);
     open('/queue?sort=-due');
-    await waitFor(() => expect(window.location.pathname).toBe('/sign-in'));
+    await waitFor(() => expect(window.location.pathname).toBe('/sign-in'), LONG);
     expect(new URLSearchParams(window.location.search).get('next')).toBe('/queue?sort=-due');
   });
 
   it('leads each role to its first place, and marks where one is', async () => {
     answer = (url) => (url === '/api/session' ? json(SIGNED_IN) : undefined);
     open('/');
-    await waitFor(() => expect(window.location.pathname).toBe('/queue'));
+    await waitFor(() => expect(window.location.pathname).toBe('/queue'), LONG);
     const place = await screen.findByRole('link', { name: 'Queue' });
     expect(place).toHaveAttribute('aria-current', 'page');
     expect(screen.getByRole('link', { name: 'Skip to the page' })).toHaveAttribute('href', '#page');
