@@ -78,6 +78,7 @@ function sameCorrection(item: Item, chosen: Item): number {
 /** An item as a report gives it. */
 export function toCause(item: Item, targets: readonly Target[]): Cause {
   const residual = worstResidual(item);
+  const words = typeof item.words === 'string' ? item.words : item.words();
   return {
     code: item.code,
     in: item.in,
@@ -85,6 +86,6 @@ export function toCause(item: Item, targets: readonly Target[]): Cause {
     corrected: { ...item.corrected },
     ...(item.where === undefined ? {} : { where: item.where }),
     residual,
-    sentence: `Fits within ${percent(Math.max(residual, 1e-5))} if ${item.words}.`,
+    sentence: `Fits within ${percent(Math.max(residual, 1e-5))} if ${words}.`,
   };
 }

@@ -1,6 +1,9 @@
 import type { CauseCode } from '../types';
 import type { DeclaredParameter, Target } from './problem';
 
+/** A sentence's end; put into words only when it is told, since most slips never are. */
+export type Words = string | (() => string);
+
 /** A slip over a set of declared constants, with how well it brings them back. */
 export interface Item {
   code: CauseCode;
@@ -20,7 +23,7 @@ export interface Item {
   /** Numbers that were fitted to the values themselves. */
   freedom: number;
   /** What is assumed, as it follows "Fits within 0.1 % if". */
-  words: string;
+  words: Words;
 }
 
 /** Log of the chance that people make any one slip in one value. */

@@ -69,12 +69,15 @@ function bestStack(fits: readonly VariantFit[], problem: Problem, cover: Cover):
 function stackOn(fit: VariantFit, problem: Problem, scatter: number): Stack | null {
   const { variant, reach, differences } = fit;
   let direct = 0;
+  let isSpoilt = false;
   const targets = problem.targets.map((target, index) => {
     const isOff = !(Math.abs(differences[index] ?? Infinity) <= TIGHT);
     if (!isOff && target.violated && (reach >> index) & 1) direct |= 1 << index;
-    return { ...target, violated: isOff && (target.violated || reach >> index !== 0) };
+    // A slip over the whole line that spoils an honest value is none.
+    if (isOff && !target.violated && (reach >> index) & 1) isSpoilt = true;
+    return { ...target, violated: isOff && target.violated };
   });
-  if (direct === 0) return null;
+  if (direct === 0 || isSpoilt) return null;
   const shifted: Problem = { ...problem, targets, base: fit.predicted };
   const items = declaredItems(shifted);
   const upper = bestCover(items, targets, differences);

@@ -53,7 +53,8 @@ function countSlips(context: VariantContext, filed: Filed): Variant[] {
     const outcome = solve(context, bundleCount, side);
     if (outcome === null) return [];
     const likely = bundleCount <= 4 ? -Math.log(3) : -Math.log(3) - 1.5;
-    const words = `each phase has ${bundleCount} subconductor${bundleCount === 1 ? '' : 's'}, not ${filed.bundleCount}`;
+    const words = (): string =>
+      `each phase has ${bundleCount} subconductor${bundleCount === 1 ? '' : 's'}, not ${filed.bundleCount}`;
     return [
       {
         ...COMMON,
@@ -74,7 +75,8 @@ function bundleForSingle(context: VariantContext, filed: Filed): Variant[] {
     BUILT_SIDES_M.flatMap((side): Variant[] => {
       const outcome = solve(context, bundleCount, side);
       if (outcome === null) return [];
-      const words = `each phase has ${bundleCount} subconductors ${withUnit(side, 'm', 4)} apart, not one`;
+      const words = (): string =>
+        `each phase has ${bundleCount} subconductors ${withUnit(side, 'm', 4)} apart, not one`;
       return [
         {
           ...COMMON,
@@ -95,7 +97,8 @@ function sideSlips(context: VariantContext, filed: Filed): Variant[] {
   const make = (side: number, freedom: number, prior: number): Variant[] => {
     const outcome = solve(context, filed.bundleCount, side);
     if (outcome === null) return [];
-    const words = `the bundle’s side is ${withUnit(side, 'm', 4)}, not ${withUnit(filed.sideM, 'm', 4)}`;
+    const words = (): string =>
+      `the bundle’s side is ${withUnit(side, 'm', 4)}, not ${withUnit(filed.sideM, 'm', 4)}`;
     return [
       {
         ...COMMON,

@@ -45,6 +45,16 @@ const RECIPES: readonly Recipe[] = [
     words: 'the diameter was used in place of the radius',
   },
   {
+    // A tube's reactance and skin effect follow its diameter.
+    code: 'diameter-for-radius',
+    change: changeConductors((conductor) =>
+      conductor.model === 'tube' ? { ...conductor, diameterMm: 2 * conductor.diameterMm } : null,
+    ),
+    prior: -1,
+    model: ENGINE_MODEL,
+    words: 'the diameter was used in place of the radius',
+  },
+  {
     code: 'gmr-for-radius',
     change: changeConductors((conductor) => ({
       ...conductor,
@@ -114,6 +124,9 @@ export function resistanceSlips({ bench }: VariantContext): Variant[] {
   return recipes.flatMap(({ code, of, words }): Variant[] => {
     const outcome = bench.changed(
       changeConductors((conductor) => {
+        // A tube's resistance follows from its temperature, skin effect and all.
+        if (conductor.model === 'tube' && code === 'resistance-at-20c')
+          return { ...conductor, temperatureC: 20 };
         const resistance = of(conductor);
         if (resistance === null) return null;
         // Only resistance is read from this variant, so a tube may become a handbook conductor of the same size.
@@ -134,8 +147,7 @@ function dcAtTemperature(conductor: ConductorData): number | null {
 }
 
 function acAt20(conductor: ConductorData): number | null {
-  const { acResistanceOhmPerKm: ac, temperatureC, model } = conductor;
-  if (model === 'tube') return conductor.dcResistance20OhmPerKm ?? null;
+  const { acResistanceOhmPerKm: ac, temperatureC } = conductor;
   return ac === undefined || temperatureC === undefined
     ? null
     : ac / temperatureFactor(conductor, temperatureC);

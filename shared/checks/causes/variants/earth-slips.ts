@@ -24,7 +24,7 @@ export function earthSlips(context: VariantContext, violated: ReadonlySet<string
     context.bench.changed((section) => ({ ...section, earthResistivityOhmM: ohmM }));
   const make = (ohmM: number, freedom: number, prior: number): Variant[] => {
     const outcome = solve(ohmM);
-    const words = `the earth resistivity was taken as ${withUnit(ohmM, 'Ω·m')}`;
+    const words = (): string => `the earth resistivity was taken as ${withUnit(ohmM, 'Ω·m')}`;
     const common = { code: 'earth-resistivity', in: 'declared', model: ENGINE_MODEL } as const;
     return outcome === null ? [] : [{ ...common, outcome, prior, freedom, words }];
   };

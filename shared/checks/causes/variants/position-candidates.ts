@@ -14,7 +14,7 @@ export interface Candidate {
   value: number;
   /** Log prior of this kind of slip. */
   prior: number;
-  words: string;
+  words: () => string;
 }
 
 const NAMES: Readonly<Record<Coordinate, string>> = {
@@ -59,7 +59,7 @@ export function candidatesOf(section: OverheadSection): Candidate[] {
         field,
         value,
         prior,
-        words: coordinateWords(position, index, field, value),
+        words: () => coordinateWords(position, index, field, value),
       }));
     }),
   );

@@ -55,7 +55,13 @@ export function fittedPositions(context: VariantContext): Variant[] {
 
 function candidateOf(position: Position, index: number, field: Coordinate, value: number): Candidate {
   const rounded = Number(value.toPrecision(4));
-  return { index, field, value: rounded, prior: 0, words: coordinateWords(position, index, field, rounded) };
+  return {
+    index,
+    field,
+    value: rounded,
+    prior: 0,
+    words: () => coordinateWords(position, index, field, rounded),
+  };
 }
 
 function rootsOf(

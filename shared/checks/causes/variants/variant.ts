@@ -4,6 +4,7 @@ import type { NormalisedLine } from '../../../filing/types';
 import type { LibraryConductor } from '../../../library/types';
 import type { CauseCode } from '../../types';
 import type { Bench, Outcome, SectionChange } from '../bench';
+import type { Words } from '../item';
 import type { DeclaredParameter } from '../problem';
 
 /** Another way in which the values could have been worked out, or the geometry meant. */
@@ -23,7 +24,7 @@ export interface Variant {
   where?: string;
   /** The corrected entries of a slip in the geometry, named from `where`. */
   corrected?: Readonly<Record<string, number>>;
-  words: string;
+  words: Words;
 }
 
 /** What variants are made from. */

@@ -61,11 +61,11 @@ function workedOutOn(change: (section: SectionJson) => void): Plant {
 }
 
 /** Files another structure than the one that the values were worked out on. */
-function filedAs(change: (section: SectionJson, random: Random) => boolean): Plant {
+function filedAs(change: (section: SectionJson, random: Random) => boolean, sections = Infinity): Plant {
   return (structure, random) => {
     const filed = clone(structure);
     let isChanged = true;
-    for (const section of filed.sections) isChanged = change(section, random) && isChanged;
+    for (const section of filed.sections.slice(0, sections)) isChanged = change(section, random) && isChanged;
     return isChanged ? file(filed, solve(structure).circuits) : null;
   };
 }
@@ -219,7 +219,7 @@ const position = (random: Random, kind: 'sign' | 'digits' | 'sibling' | 'lowest'
           Math.hypot(one.horizontalM - two.horizontalM, one.attachmentHeightM - two.attachmentHeightM) < 1.2,
       ),
     );
-  });
+  }, 1);
 
 /** How each slip is planted; the scope or kind is drawn where there are several. */
 const PLANTS: Readonly<Record<CauseCode, Plant>> = {
@@ -317,13 +317,16 @@ const PLANTS: Readonly<Record<CauseCode, Plant>> = {
         temperatureC = 20,
         temperatureCoefficientPerK: rise = 0.00403,
       } = conductor;
-      conductor.acResistanceOhmPerKm = acResistanceOhmPerKm / (1 + rise * (temperatureC - 20));
+      if (conductor.model === 'tube') conductor.temperatureC = 20;
+      else conductor.acResistanceOhmPerKm = acResistanceOhmPerKm / (1 + rise * (temperatureC - 20));
     }),
   ),
   'radius-for-gmr': workedOutOn(onConductors((conductor) => (conductor.gmrMm = conductor.diameterMm / 2))),
   'diameter-for-radius': workedOutOn(onConductors((conductor) => (conductor.diameterMm *= 2))),
   'gmr-for-radius': workedOutOn(
-    onConductors((conductor) => (conductor.diameterMm = 2 * (conductor.gmrMm ?? 1))),
+    onConductors((conductor) => {
+      if (conductor.gmrMm !== undefined) conductor.diameterMm = 2 * conductor.gmrMm;
+    }),
   ),
   'single-conductor': (structure, random) => {
     if (phases(structure.sections[0] as SectionJson).every(({ bundleCount }) => (bundleCount ?? 1) === 1))
@@ -335,21 +338,23 @@ const PLANTS: Readonly<Record<CauseCode, Plant>> = {
       }
     })(structure, random);
   },
-  'bundle-count': filedAs((section, random) => {
-    const [first] = phases(section);
-    const count = first?.bundleCount ?? 1;
-    if (count === 1) return false;
+  'bundle-count': (structure, random) => {
+    const count = structure.sections[0]?.positions[0]?.bundleCount ?? 1;
     const other = random.pick([2, 3, 4, 6].filter((n) => n !== count));
-    for (const spot of phases(section)) spot.bundleCount = other;
-    return true;
-  }),
-  'bundle-spacing': filedAs((section, random) => {
+    return filedAs((section) => {
+      for (const spot of phases(section)) spot.bundleCount = other;
+      return count > 1;
+    })(structure, random);
+  },
+  'bundle-spacing': (structure, random) => {
     const factor = random.pick([0.5, 2, 1.6, 0.62, 1.35]);
-    if (phases(section).every(({ bundleCount }) => (bundleCount ?? 1) === 1)) return false;
-    for (const spot of phases(section))
-      spot.bundleSpacingM = toDigits((spot.bundleSpacingM ?? 0) * factor, 3);
-    return true;
-  }),
+    return filedAs((section) => {
+      if (phases(section).every(({ bundleCount }) => (bundleCount ?? 1) === 1)) return false;
+      for (const spot of phases(section))
+        spot.bundleSpacingM = toDigits((spot.bundleSpacingM ?? 0) * factor, 3);
+      return true;
+    })(structure, random);
+  },
   'arithmetic-spacing': arithmetic,
   'no-ground-wires': (structure, random) => {
     if (structure.sections.every(({ positions }) => positions.every(({ groundWire }) => groundWire !== true)))
@@ -362,12 +367,13 @@ const PLANTS: Readonly<Record<CauseCode, Plant>> = {
   'tower-height': workedOutOn((section) => {
     for (const spot of section.positions) spot.sagM = 0;
   }),
-  'earth-resistivity': (structure, random) =>
-    workedOutOn((section) => {
-      section.earthResistivityOhmM = random.pick(
-        [10, 20, 50, 100, 500, 1000, 2000].filter((rho) => rho !== section.earthResistivityOhmM),
-      );
-    })(structure, random),
+  'earth-resistivity': (structure, random) => {
+    const filed = structure.sections[0]?.earthResistivityOhmM;
+    const assumed = random.pick([10, 20, 50, 100, 500, 1000, 2000].filter((rho) => rho !== filed));
+    return workedOutOn((section) => {
+      section.earthResistivityOhmM = assumed;
+    })(structure, random);
+  },
   'other-conductor': otherConductor,
   'feet-for-metres': (structure, random) => {
     const fields = random.pick([
@@ -385,7 +391,7 @@ const PLANTS: Readonly<Record<CauseCode, Plant>> = {
     const conductor = section.conductors['phase'];
     if (conductor === undefined) return false;
     conductor.diameterMm = toDigits(conductor.diameterMm / 25.4, 5);
-    conductor.gmrMm = toDigits((conductor.gmrMm ?? 0) / 25.4, 5);
+    if (conductor.gmrMm !== undefined) conductor.gmrMm = toDigits(conductor.gmrMm / 25.4, 5);
     if (conductor.coreDiameterMm !== undefined)
       conductor.coreDiameterMm = toDigits(conductor.coreDiameterMm / 25.4, 5);
     return true;
