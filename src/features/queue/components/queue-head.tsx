@@ -1,4 +1,6 @@
 import type { Queue } from '#shared/contracts/api.generated';
+import { formatDay } from '#shared/format/dates';
+import { DueRule } from '../../../components/charts/due-rule';
 import { SegmentLinks } from '../../../components/ui/segment';
 import { useDocumentTitle } from '../../../hooks/use-document-title';
 import type { ListControls } from '../../../hooks/use-list-view';
@@ -38,6 +40,21 @@ export function QueueHead({ overview, controls: { view } }: QueueHeadProps) {
           />
         </div>
       </div>
+      {items.length > 0 && <Dues overview={overview} />}
     </div>
+  );
+}
+
+/** The rule of due days with each application's worst grade standing on its day. */
+function Dues({ overview: { items } }: { overview: Queue }) {
+  const now = new Date();
+  const today = dayOf(now);
+  return (
+    <DueRule
+      days={ruleDays(today)}
+      today={{ date: today, text: `Today, ${formatDay(now)}` }}
+      items={dueItems(items)}
+      label={`Due days of ${items.length} open applications, each with its worst finding. ${queueLead(items.length, items)}`}
+    />
   );
 }
