@@ -40,8 +40,14 @@ function filedBundle(context: VariantContext): Filed | null {
   return null;
 }
 
-function solve(context: VariantContext, bundleCount: number, bundleSpacingM: number): Outcome | null {
-  return context.bench.changed(changePhases((position) => ({ ...position, bundleCount, bundleSpacingM })));
+/** The line with another number of subconductors and its sides scaled; a single conductor gets the side given. */
+function solve(context: VariantContext, filed: Filed, bundleCount: number, side: number): Outcome | null {
+  return context.bench.changed(
+    changePhases((position) => {
+      const own = filed.sideM > 0 ? (position.bundleSpacingM * side) / filed.sideM : side;
+      return { ...position, bundleCount, bundleSpacingM: bundleCount === 1 ? 0 : own };
+    }),
+  );
 }
 
 const COMMON = { in: 'geometry', model: ENGINE_MODEL } as const;
@@ -49,8 +55,7 @@ const COMMON = { in: 'geometry', model: ENGINE_MODEL } as const;
 function countSlips(context: VariantContext, filed: Filed): Variant[] {
   const counts = Array.from({ length: MOST }, (_, index) => index + 1).filter((n) => n !== filed.bundleCount);
   return counts.flatMap((bundleCount): Variant[] => {
-    const side = bundleCount === 1 ? 0 : filed.sideM;
-    const outcome = solve(context, bundleCount, side);
+    const outcome = solve(context, filed, bundleCount, filed.sideM);
     if (outcome === null) return [];
     const likely = bundleCount <= 4 ? -Math.log(3) : -Math.log(3) - 1.5;
     const words = (): string =>
@@ -73,7 +78,7 @@ function countSlips(context: VariantContext, filed: Filed): Variant[] {
 function bundleForSingle(context: VariantContext, filed: Filed): Variant[] {
   return [2, 3, 4].flatMap((bundleCount) =>
     BUILT_SIDES_M.flatMap((side): Variant[] => {
-      const outcome = solve(context, bundleCount, side);
+      const outcome = solve(context, filed, bundleCount, side);
       if (outcome === null) return [];
       const words = (): string =>
         `each phase has ${bundleCount} subconductors ${withUnit(side, 'm', 4)} apart, not one`;
@@ -95,7 +100,7 @@ function bundleForSingle(context: VariantContext, filed: Filed): Variant[] {
 
 function sideSlips(context: VariantContext, filed: Filed): Variant[] {
   const make = (side: number, freedom: number, prior: number): Variant[] => {
-    const outcome = solve(context, filed.bundleCount, side);
+    const outcome = solve(context, filed, filed.bundleCount, side);
     if (outcome === null) return [];
     const words = (): string =>
       `the bundle’s side is ${withUnit(side, 'm', 4)}, not ${withUnit(filed.sideM, 'm', 4)}`;
@@ -142,7 +147,7 @@ function fittedSides(context: VariantContext, filed: Filed): number[] {
   if (wanted === undefined || wanted <= 0) return [];
   const roots = fitOne(
     (side) => {
-      const value = solve(context, filed.bundleCount, side)?.circuits[circuit]?.x1;
+      const value = solve(context, filed, filed.bundleCount, side)?.circuits[circuit]?.x1;
       return value === undefined ? null : value / wanted - 1;
     },
     gridOf(0.05, 3, 5, true),

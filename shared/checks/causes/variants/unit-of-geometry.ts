@@ -4,7 +4,6 @@ import type {
   OverheadSection,
   PhasePosition,
 } from '../../../engine/index';
-import type { CauseCode } from '../../types';
 import type { Variant, VariantContext } from './variant';
 import { ENGINE_MODEL, overheadSections, sectionPointer } from './variant';
 
@@ -30,15 +29,13 @@ const FIELD_SETS: readonly { fields: readonly Field[]; words: string; prior: num
   { fields: ['bundleSpacingM'], words: 'bundle spacings', prior: -1 },
 ];
 
-/** A length in metres beyond which centimetres come to mind; below it nobody has typed them. */
-const BEYOND_METRES: Readonly<Record<Field, number>> = {
-  horizontalM: 60,
-  attachmentHeightM: 150,
-  sagM: 60,
-  bundleSpacingM: 2,
-};
+/** Lengths in metres beyond which another unit comes to mind; below them nobody has typed it. */
+const BEYOND_METRES = {
+  'centimetres-for-metres': { horizontalM: 60, attachmentHeightM: 150, sagM: 60, bundleSpacingM: 2 },
+  'feet-for-metres': { horizontalM: 0, attachmentHeightM: 15, sagM: 0, bundleSpacingM: 0.65 },
+} as const;
 
-const UNITS: readonly { code: CauseCode; factor: number; unit: string }[] = [
+const UNITS: readonly { code: keyof typeof BEYOND_METRES; factor: number; unit: string }[] = [
   { code: 'feet-for-metres', factor: FEET, unit: 'feet' },
   { code: 'centimetres-for-metres', factor: 0.01, unit: 'centimetres' },
 ];
@@ -51,8 +48,8 @@ export function lengthUnitSlips(context: VariantContext): Variant[] {
     UNITS.flatMap(({ code, factor, unit }) =>
       FIELD_SETS.flatMap(({ fields, words, prior }): Variant[] => {
         const indices = new Set(group.map(({ index }) => index));
-        const isLikely =
-          code !== 'centimetres-for-metres' || group.some(({ section }) => isBeyond(section, fields));
+        const limits: Readonly<Record<Field, number>> = BEYOND_METRES[code];
+        const isLikely = group.some(({ section }) => isBeyond(section, fields, limits));
         if (!isLikely) return [];
         const outcome = context.bench.changed((section, index) =>
           indices.has(index) ? scaled(section, fields, factor) : null,
@@ -71,9 +68,13 @@ export function lengthUnitSlips(context: VariantContext): Variant[] {
 }
 
 /** True when every one of the fields is too large somewhere to be in metres. */
-function isBeyond(section: OverheadSection, fields: readonly Field[]): boolean {
+function isBeyond(
+  section: OverheadSection,
+  fields: readonly Field[],
+  limits: Readonly<Record<Field, number>>,
+): boolean {
   return fields.every((field) =>
-    section.positions.some((position) => Math.abs(fieldOf(position, field) ?? 0) > BEYOND_METRES[field]),
+    section.positions.some((position) => Math.abs(fieldOf(position, field) ?? 0) > limits[field]),
   );
 }
 
