@@ -73,13 +73,14 @@ function ApplicationPage({ number }: { number: string }) {
         lead={nextStepSentence(application, draft, discrepancies)}
         actions={
           <>
-            <ApplicantSteps application={application} draft={draft} />
-            {letter && (
-              <a className="button" href={letter.href}>
-                Read the letter
-              </a>
-            )}
-            {open && <ButtonLink to={`/applications/${number}/edit`}>Change the head</ButtonLink>}
+            <ApplicantSteps application={application} draft={draft}>
+              {letter && (
+                <a className="button" href={letter.href}>
+                  Read the letter
+                </a>
+              )}
+              {open && <ButtonLink to={`/applications/${number}/edit`}>Edit</ButtonLink>}
+            </ApplicantSteps>
           </>
         }
         block={<ApplicationTitleBlock application={application} />}
@@ -103,7 +104,7 @@ function ApplicationPage({ number }: { number: string }) {
           <AttachmentsSheet number={number} files={files} open={open} />
         </div>
       </div>
-      <p className="mt-6 text-label text-ink-soft">{application.caution}</p>
+      {application.decision && <p className="mt-6 text-label text-ink-soft">{application.caution}</p>}
     </>
   );
 }

@@ -108,10 +108,23 @@ export function balanceEntry(row: BalanceRow, weighed: WeighedValue): BalanceEnt
   };
 }
 
+const sum = (a: readonly [number, number], b: readonly [number, number]): [number, number] => [
+  a[0] + b[0],
+  a[1] + b[1],
+];
+
+/** R0 has no band of its own: it is drawn on those of R1 and of R0 − R1 added. */
+function withSummedBand(r0: WeighedValue, values: readonly WeighedValue[]): WeighedValue {
+  const r1 = values.find((v) => v.parameter === 'r1');
+  const excess = values.find((v) => v.parameter === 'r0MinusR1');
+  if (r0.typical || !r1?.typical || !r1.outer || !excess?.typical || !excess.outer) return r0;
+  return { ...r0, typical: sum(r1.typical, excess.typical), outer: sum(r1.outer, excess.outer) };
+}
+
 /** The rows of a balance, in their order; values that have no row are left out. */
 export function balanceEntries(values: readonly WeighedValue[]): BalanceEntry[] {
   return BALANCE_ROWS.flatMap((row) => {
     const weighed = values.find((v) => v.parameter === row);
-    return weighed ? [balanceEntry(row, weighed)] : [];
+    return weighed ? [balanceEntry(row, row === 'r0' ? withSummedBand(weighed, values) : weighed)] : [];
   });
 }

@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import type { ReactNode } from 'react';
 import type { Application, Draft, Step } from '#shared/contracts/api.generated';
 import { WordsDialog } from '../../../components/feedback/words-dialog';
 import { Button } from '../../../components/ui/button';
@@ -81,6 +82,8 @@ const DIALOGS = { file: FileDialog, withdraw: WithdrawDialog, amend: AmendDialog
 interface ApplicantStepsProps {
   application: Application;
   draft: Draft | null;
+  /** Places to go, between the steps. */
+  children?: ReactNode;
 }
 
 /** Why filing is closed: the server's reason, else what the draft still lacks. */
@@ -91,7 +94,7 @@ function whyClosed(step: Step, draft: Draft | null): string | null {
 }
 
 /** What the applicant can do with the case now; a closed step says what opens it. */
-export function ApplicantSteps({ application, draft }: ApplicantStepsProps) {
+export function ApplicantSteps({ application, draft, children }: ApplicantStepsProps) {
   const [asking, setAsking] = useState<StepName | null>(null);
   const { steps, nextRevision, state } = application;
   const file = stepOf(steps, 'file');
@@ -111,7 +114,12 @@ export function ApplicantSteps({ application, draft }: ApplicantStepsProps) {
           Amend
         </Button>
       )}
-      {withdraw?.open && <Button onClick={() => setAsking('withdraw')}>Withdraw</Button>}
+      {children}
+      {withdraw?.open && (
+        <Button kind="plain" onClick={() => setAsking('withdraw')}>
+          Withdraw
+        </Button>
+      )}
       {Asked && <Asked application={application} onClose={() => setAsking(null)} />}
     </>
   );

@@ -1,11 +1,11 @@
 import { Link } from 'react-router-dom';
 import type { Application, Draft, DraftLine, LineSummary } from '#shared/contracts/api.generated';
-import { quantity } from '#shared/format/numbers';
 import { ButtonLink } from '../../../components/ui/button';
 import { EmptyState } from '../../../components/feedback/empty-state';
 import { GradeLabel } from '../../../components/ui/grade-mark';
 import { Sheet } from '../../../components/ui/sheet';
 import { Cell, HeadCell, Row, RowHead, Table, TableBody, TableHead } from '../../../components/ui/table';
+import { plainQuantity } from '../../../lib/plain-number';
 import { linesWords } from '../model/words';
 import { RemoveLine } from './remove-line';
 
@@ -29,9 +29,9 @@ function LineRow({ lineKey, name, to, voltageKv, lengthKm, circuits, check, remo
           {name}
         </Link>
       </RowHead>
-      <Cell oneLine>{voltageKv === null ? '' : quantity(voltageKv, 'kV', 4)}</Cell>
+      <Cell oneLine>{voltageKv === null ? '' : plainQuantity(voltageKv, 'kV')}</Cell>
       <Cell oneLine number fold="end">
-        {lengthKm === null ? '' : quantity(lengthKm, 'km', 4)}
+        {lengthKm === null ? '' : plainQuantity(lengthKm, 'km')}
       </Cell>
       <Cell oneLine fold="hide">
         {circuits === 2 ? 'double' : 'single'}
@@ -49,7 +49,8 @@ function FiledMarks({ line, to }: { line: LineSummary; to: string }) {
   const shown = line.marks.slice(0, 4);
   const inBalance = line.marks.every((m) => m.grade === 'note');
   return (
-    <Link to={to} className="inline-flex flex-wrap gap-x-3" aria-label={`What was found in ${line.name}`}>
+    <Link to={to} className="inline-flex flex-wrap gap-x-3">
+      <span className="sr-only">{`What was found in ${line.name}:`}</span>
       {inBalance && <GradeLabel grade="in-balance" />}
       {shown.map((mark) => (
         <GradeLabel key={mark.code + (mark.parameter ?? '')} grade={mark.grade} settled={!mark.stands}>
@@ -85,13 +86,19 @@ function Heads({ removable }: { removable: boolean }) {
   return (
     <TableHead>
       <Row>
-        <HeadCell aria-label="Key" />
+        <HeadCell>
+          <span className="sr-only">Key</span>
+        </HeadCell>
         <HeadCell>Line</HeadCell>
         <HeadCell>Voltage</HeadCell>
         <HeadCell number>Length</HeadCell>
         <HeadCell>Circuits</HeadCell>
         <HeadCell>Check</HeadCell>
-        {removable && <HeadCell aria-label="Remove" />}
+        {removable && (
+          <HeadCell>
+            <span className="sr-only">Remove</span>
+          </HeadCell>
+        )}
       </Row>
     </TableHead>
   );

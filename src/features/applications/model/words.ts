@@ -1,5 +1,5 @@
 import type { Application, ApplicationSummary } from '#shared/contracts/api.generated';
-import { figure, quantity } from '#shared/format/numbers';
+import { plainQuantity } from '../../../lib/plain-number';
 
 export const CONNECTION_KINDS = [
   { value: 'generation', label: 'Generation' },
@@ -13,18 +13,18 @@ type Place = Pick<ApplicationSummary, 'capacityMw' | 'pointOfConnection'>;
 /** "480 MW at Sarn", or "at Sarn" where no capacity is asked for. */
 export function connectionWords({ capacityMw, pointOfConnection }: Place): string {
   if (capacityMw === null) return `at ${pointOfConnection}`;
-  return `${quantity(capacityMw, 'MW', 4)} at ${pointOfConnection}`;
+  return `${plainQuantity(capacityMw, 'MW')} at ${pointOfConnection}`;
 }
 
 /** "5, together 153.9 km". */
 export function linesWords(lineCount: number, totalLengthKm: number): string {
   if (lineCount === 0) return 'none yet';
-  return `${lineCount}, together ${quantity(totalLengthKm, 'km', 4)}`;
+  return `${lineCount}, together ${plainQuantity(totalLengthKm, 'km', 1)}`;
 }
 
 /** "345 kV, 230 kV". */
 export const voltagesWords = (voltagesKv: readonly number[]): string =>
-  voltagesKv.length === 0 ? 'none yet' : voltagesKv.map((kv) => `${figure(kv, 4)}\u2009kV`).join(', ');
+  voltagesKv.length === 0 ? 'none yet' : voltagesKv.map((kv) => plainQuantity(kv, 'kV')).join(', ');
 
 /** Whether the application has a draft that its applicant may change. */
 export const hasDraft = ({ state }: Pick<Application, 'state'>): boolean =>

@@ -1,9 +1,9 @@
 import type { Application } from '#shared/contracts/api.generated';
 import { formatDate } from '#shared/format/dates';
-import { quantity } from '#shared/format/numbers';
 import { RevisionTriangle } from '../../../components/ui/revision-triangle';
 import { Stamp } from '../../../components/ui/stamp';
 import { TitleBlock } from '../../../components/ui/title-block';
+import { plainQuantity } from '../../../lib/plain-number';
 import type { LineForm } from '../model/form-types';
 import { readNumber } from '../model/number-text';
 
@@ -22,7 +22,7 @@ export function LineTitleBlock({ application, lineKey, count, form }: LineTitleB
   const connection =
     capacityMw === null
       ? `at ${pointOfConnection}`
-      : `${quantity(capacityMw, 'MW', 4)} at ${pointOfConnection}`;
+      : `${plainQuantity(capacityMw, 'MW')} at ${pointOfConnection}`;
   return (
     <TitleBlock
       label="Title block"
@@ -45,7 +45,7 @@ export function LineTitleBlock({ application, lineKey, count, form }: LineTitleB
         { label: 'Line', value: `${lineKey}, one of ${count}`, span: 3 },
         {
           label: 'Voltage',
-          value: voltage.kind === 'number' ? quantity(voltage.value, 'kV', 4) : 'not given',
+          value: voltage.kind === 'number' ? plainQuantity(voltage.value, 'kV') : 'not given',
           span: 3,
         },
         { label: 'State', value: <Stamp state={application.state} />, span: 3, fold: 'state' },

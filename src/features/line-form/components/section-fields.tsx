@@ -16,14 +16,33 @@ const KINDS = [
   { value: 'cable', label: 'Cable' },
 ];
 
+/** As many as the filing format takes. */
+const MOST_SECTIONS = 100;
+
 interface SectionsProps {
   /** The section on the table, and in the drawing. */
   shown: number;
   onShow: (index: number) => void;
 }
 
-/** Goes from section to section, adds and removes; a line of one section shows only the way to a second. */
+/** Goes from section to section. */
 function SectionChooser({ shown, onShow }: SectionsProps) {
+  const { form } = useLineFormView();
+  if (form.sections.length === 1) return null;
+  return (
+    <div className="mb-4">
+      <SegmentChoice
+        label="Section"
+        value={String(shown)}
+        onChange={(value) => onShow(Number(value))}
+        options={form.sections.map((_, i) => ({ value: String(i), label: `Section ${i + 1}` }))}
+      />
+    </div>
+  );
+}
+
+/** Adds a section, which begins as the last one is, or takes the shown one away. */
+function SectionCount({ shown, onShow }: SectionsProps) {
   const { form, change } = useLineFormView();
   const count = form.sections.length;
   const add = () => {
@@ -35,25 +54,13 @@ function SectionChooser({ shown, onShow }: SectionsProps) {
     onShow(Math.max(0, shown - 1));
   };
   return (
-    <div className="mb-4 flex flex-wrap items-center gap-3">
-      {count > 1 && (
-        <SegmentChoice
-          label="Section"
-          value={String(shown)}
-          onChange={(value) => onShow(Number(value))}
-          options={form.sections.map((_, i) => ({ value: String(i), label: `Section ${i + 1}` }))}
-        />
-      )}
-      {count < 100 && (
+    <div className="mt-4 flex flex-wrap gap-3">
+      {count < MOST_SECTIONS && (
         <Button small onClick={add}>
           Add a section
         </Button>
       )}
-      {count > 1 && (
-        <Button small onClick={remove}>
-          {`Remove section ${shown + 1}`}
-        </Button>
-      )}
+      {count > 1 && <Button small onClick={remove}>{`Remove section ${shown + 1}`}</Button>}
     </div>
   );
 }
@@ -92,6 +99,7 @@ export function SectionFields({ shown, onShow }: SectionsProps) {
           <TypedField path={[...path, 'lengthKm']} label="Length" units={SPAN_UNITS} />
           <ChoiceField path={[...path, 'kind']} label="Kind" options={KINDS} />
         </FieldGrid>
+        <SectionCount shown={shown} onShow={onShow} />
       </FormPart>
       {section.kind === 'cable' ? (
         <CableValues index={shown} section={section} />

@@ -2,9 +2,11 @@ import type { CircuitReport, LineReport } from '#shared/checks/types';
 import { BalanceTable } from '../../../components/charts/balance-table';
 import type { BalanceEntry, RowFinding } from '../../../components/charts/balance-entry';
 import { CauseLine, LooseFinding } from '../../../components/charts/cause-line';
+import { FindingSays } from '../../../components/charts/finding-says';
 import { Notice } from '../../../components/feedback/notice';
 import { SkeletonLines } from '../../../components/feedback/skeleton';
-import { GradeTally } from '../../../components/ui/grade-counts';
+import { GradeLabel } from '../../../components/ui/grade-mark';
+import { FINDING_GRADES, GRADE_WORDS } from '../../../components/ui/grades';
 import { Sheet } from '../../../components/ui/sheet';
 import { rowOf } from '../../../components/charts/balance-entries';
 import type { LiveCheck } from '../hooks/use-live-check';
@@ -28,7 +30,7 @@ function rowFindings(circuit: CircuitReport, { report, onPut }: PartProps): Map<
       {
         key: `${finding.code}-${i}`,
         grade: finding.grade,
-        says: shared ? `${finding.message} Same cause.` : finding.message,
+        says: <FindingSays message={shared ? `${finding.message} Same cause.` : finding.message} />,
         causes: own,
         acts: <PutButton finding={finding} onPut={onPut} />,
       },
@@ -64,7 +66,11 @@ function LooseFindings({ findings, report, onPut }: PartProps & { findings: Circ
     <LooseFinding
       key={`${finding.code}-${i}`}
       grade={finding.grade}
-      says={sharesCause(finding, report) ? `${finding.message} Same cause.` : finding.message}
+      says={
+        <FindingSays
+          message={sharesCause(finding, report) ? `${finding.message} Same cause.` : finding.message}
+        />
+      }
       acts={<PutButton finding={finding} onPut={onPut} />}
     >
       {finding.causes.map((cause, c) => (
@@ -86,6 +92,22 @@ function Waiting({ count }: { count: number }) {
   );
 }
 
+/** How many findings of each grade, at the head of the sheet. */
+function Counts({ report }: { report: LineReport }) {
+  const counts = countFindings(report);
+  const shown = FINDING_GRADES.filter((grade) => counts[grade] > 0);
+  if (shown.length === 0) return <GradeLabel grade="in-balance" />;
+  return (
+    <span className="flex flex-wrap justify-end gap-x-4">
+      {shown.map((grade) => (
+        <GradeLabel key={grade} grade={grade}>
+          {`${counts[grade]} ${GRADE_WORDS[grade].toLowerCase()}`}
+        </GradeLabel>
+      ))}
+    </span>
+  );
+}
+
 interface LiveCheckPanelProps {
   check: LiveCheck;
   onPut: OnPut;
@@ -96,11 +118,7 @@ export function LiveCheckPanel({ check, onPut }: LiveCheckPanelProps) {
   const { outcome, failed } = check;
   const report = outcome?.kind === 'report' ? outcome.report : null;
   return (
-    <Sheet
-      id="live-check"
-      title="Live check"
-      aside="A preview by the rules in force; the server’s check after filing counts."
-    >
+    <Sheet id="live-check" title="Live check" aside={report && <Counts report={report} />}>
       <div aria-busy={check.pending || undefined}>
         {failed && (
           <Notice grade="explain" className="mx-6 mb-6">
@@ -116,7 +134,6 @@ export function LiveCheckPanel({ check, onPut }: LiveCheckPanelProps) {
         {outcome?.kind === 'faults' && <Waiting count={outcome.faults.length} />}
         {report && (
           <>
-            <GradeTally counts={countFindings(report)} />
             {report.circuits.map((circuit) => (
               <CircuitBalance key={circuit.circuit} circuit={circuit} report={report} onPut={onPut} />
             ))}
@@ -127,6 +144,9 @@ export function LiveCheckPanel({ check, onPut }: LiveCheckPanelProps) {
             />
           </>
         )}
+        <p className="sheet-foot text-ink-soft">
+          A preview by the rules in force; the server’s check after filing counts.
+        </p>
       </div>
     </Sheet>
   );
