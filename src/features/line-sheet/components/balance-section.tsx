@@ -3,10 +3,11 @@ import type { Finding, RevisionLine } from '#shared/contracts/api.generated';
 import { THIN_SPACE } from '#shared/format/numbers';
 import type { BalanceEntry, RowFinding } from '../../../components/charts/balance-entry';
 import { BalanceTable } from '../../../components/charts/balance-table';
+import { FindingSays } from '../../../components/charts/finding-says';
 import { GradeTally } from '../../../components/ui/grade-counts';
 import { balanceEntries, parameterName, rowOf } from '../../../components/charts/balance-entries';
 import { arrangeFindings, countStanding } from '../model/arrange-findings';
-import { causeLines, dispositionWords, settledRemark, splitMessage } from '../model/finding-words';
+import { causeLines, dispositionWords, settledRemark } from '../model/finding-words';
 import { LooseFindings } from './loose-findings';
 
 /** What can be done with a finding, given by the page that the sheet stands on. */
@@ -74,23 +75,13 @@ function withFindings(
 }
 
 function rowFinding(finding: Finding, actions: FindingActions | undefined): RowFinding {
-  const { says, detail } = splitMessage(finding.message);
   const done = dispositionWords(finding);
   return {
     key: finding.fingerprint,
     grade: finding.grade,
     settled: !finding.stands,
-    says: <FindingSays says={says} detail={detail} />,
+    says: <FindingSays message={finding.message} />,
     causes: [...causeLines(finding), ...(done ? [done] : [])],
     acts: actions?.(finding),
   };
-}
-
-function FindingSays({ says, detail }: { says: string; detail: string | null }) {
-  return (
-    <>
-      {says}
-      {detail && <span className="block font-normal text-ink-soft">{detail}</span>}
-    </>
-  );
 }

@@ -1,6 +1,7 @@
 import type { Finding } from '#shared/contracts/api.generated';
 import { CauseLine, LooseFinding } from '../../../components/charts/cause-line';
-import { causeLines, dispositionWords, splitMessage } from '../model/finding-words';
+import { FindingSays } from '../../../components/charts/finding-says';
+import { causeLines, dispositionWords } from '../model/finding-words';
 import type { FindingActions } from './balance-section';
 
 /** Findings that stand in no row: of the drawing, of a section, of the whole line. */
@@ -12,7 +13,6 @@ export function LooseFindings({
   actions?: FindingActions;
 }) {
   return findings.map((finding) => {
-    const { says, detail } = splitMessage(finding.message);
     const done = dispositionWords(finding);
     const grade = finding.stands ? finding.grade : 'settled';
     return (
@@ -20,10 +20,9 @@ export function LooseFindings({
         key={finding.fingerprint}
         grade={finding.grade}
         settled={!finding.stands}
-        says={says}
+        says={<FindingSays message={finding.message} />}
         acts={actions?.(finding)}
       >
-        {detail && <p className="text-ink-soft">{detail}</p>}
         {[...causeLines(finding), ...(done ? [done] : [])].map((line) => (
           <CauseLine key={line} grade={grade}>
             {line}

@@ -2,21 +2,6 @@ import type { Cause, Finding } from '#shared/contracts/api.generated';
 import { PARAMETER_WORDS, type FindingParameter } from '#shared/checks/parameters';
 import { formatDate } from '#shared/format/dates';
 
-/** A finding's sentence in two voices: what it says, and the figures behind it. */
-export interface FindingSentence {
-  says: string;
-  detail: string | null;
-}
-
-/** Splits a finding's message where its first statement ends: at the colon before its figures, or at the full stop. */
-export function splitMessage(message: string): FindingSentence {
-  const at = message.search(/: |\. (?=[A-Z])/);
-  if (at < 0) return { says: message, detail: null };
-  const says = `${message.slice(0, at)}.`;
-  const rest = message.slice(at + 2).trim();
-  return { says, detail: rest === '' ? null : rest.charAt(0).toUpperCase() + rest.slice(1) };
-}
-
 /** The name of a parameter as sentences use it. */
 export function nameOf(parameter: string): string {
   return Object.hasOwn(PARAMETER_WORDS, parameter)

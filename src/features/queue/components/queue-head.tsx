@@ -5,6 +5,7 @@ import { SegmentLinks } from '../../../components/ui/segment';
 import { useDocumentTitle } from '../../../hooks/use-document-title';
 import type { ListControls } from '../../../hooks/use-list-view';
 import { writeListView } from '../../../lib/list-view';
+import { dayOf, dueItems, ruleDays } from '../model/due-days';
 import { QUEUE_LIST, queueLead, whoseOf, withWhose, type QueueFilter, type Whose } from '../model/queue-list';
 
 const WORDS: Readonly<Record<Whose, string>> = {

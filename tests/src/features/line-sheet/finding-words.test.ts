@@ -4,7 +4,6 @@ import {
   causeLines,
   dispositionWords,
   settledRemark,
-  splitMessage,
 } from '../../../../src/features/line-sheet/model/finding-words';
 
 const PER_MILE: Cause = {
@@ -33,18 +32,6 @@ const finding = (over: Partial<Finding>): Finding =>
   }) as Finding;
 
 describe('what a finding says', () => {
-  it('parts the statement from its figures', () => {
-    expect(splitMessage('X1 is 61 % above what the geometry gives: 0.613 Ω/km declared.')).toEqual({
-      says: 'X1 is 61 % above what the geometry gives.',
-      detail: '0.613 Ω/km declared.',
-    });
-    expect(splitMessage('R0 is missing. It is owed.')).toEqual({
-      says: 'R0 is missing.',
-      detail: 'It is owed.',
-    });
-    expect(splitMessage('One sentence of 0.5 m.')).toEqual({ says: 'One sentence of 0.5 m.', detail: null });
-  });
-
   it('names its causes, and what else they explain', () => {
     expect(causeLines(finding({ causes: [PER_MILE] }))).toEqual([
       'Fits within 0.1 % if the value is per mile. It also explains R1.',
