@@ -14,9 +14,9 @@ function PersonItems({ session }: { session: Session }) {
   const navigate = useNavigate();
   const signOut = useSignOut();
   const switchTo = useSwitchOrganisation();
-  const leave = () => signOut.mutate(undefined, { onSettled: () => navigate('/sign-in') });
+  const leave = () => signOut.mutate(undefined, { onSettled: () => void navigate('/sign-in') });
   const change = (organisationId: string) =>
-    switchTo.mutate(organisationId, { onSuccess: (next) => next && navigate(homeOf(next.role)) });
+    switchTo.mutate(organisationId, { onSuccess: (next) => void (next && navigate(homeOf(next.role))) });
   return (
     <>
       {session.memberships.length > 1 && (

@@ -19,7 +19,7 @@ export function SessionOverlay() {
     signOut.mutate(undefined, {
       onSettled: () => {
         leftInstead();
-        navigate('/sign-in');
+        void navigate('/sign-in');
       },
     });
   };

@@ -3,7 +3,8 @@ import { Link, NavLink, useNavigate } from 'react-router-dom';
 import { Brand } from '../components/ui/brand';
 import { IconButton } from '../components/ui/button';
 import { useTheme } from '../hooks/use-theme';
-import type { Session } from '../lib/api/session';
+import type { Role, Session } from '../lib/api/session';
+import { applicationPath } from '../lib/paths';
 import { homeOf, PLACES } from './places';
 import { NarrowMenu, PersonMenu } from './person-menu';
 
@@ -20,7 +21,7 @@ function ThemeSwitch() {
   );
 }
 
-function FindByNumber() {
+function FindByNumber({ role }: { role: Role }) {
   const [text, setText] = useState('');
   const navigate = useNavigate();
   const go = (event: FormEvent) => {
@@ -28,7 +29,7 @@ function FindByNumber() {
     const number = text.trim();
     if (number === '') return;
     setText('');
-    navigate(`/applications/${encodeURIComponent(number)}`);
+    void navigate(applicationPath(role, encodeURIComponent(number)));
   };
   return (
     <form role="search" onSubmit={go}>
@@ -66,7 +67,7 @@ export function TopBar({ session }: { session: Session }) {
           ))}
         </nav>
         <div className="ml-auto flex items-center gap-3">
-          <FindByNumber />
+          <FindByNumber role={session.role} />
           <PersonMenu session={session} />
           <ThemeSwitch />
           <NarrowMenu session={session} places={places} />

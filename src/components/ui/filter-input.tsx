@@ -1,5 +1,4 @@
-import { useEffect, useState } from 'react';
-import { useDebounced } from '../../hooks/use-debounced';
+import { useEffect, useRef, useState } from 'react';
 import { TextInput } from './inputs';
 
 interface FilterInputProps {
@@ -18,18 +17,21 @@ const PAUSE_MS = 250;
 export function FilterInput({ label, id, value, onChange, placeholder, small, type }: FilterInputProps) {
   const [typed, setTyped] = useState(value);
   const [applied, setApplied] = useState(value);
-  const settled = useDebounced(typed, PAUSE_MS);
+  const pause = useRef<ReturnType<typeof setTimeout>>(undefined);
+  useEffect(() => () => clearTimeout(pause.current), []);
   // The view may be changed from elsewhere (a link, "clear the filters"): the field then follows.
   if (value !== applied) {
     setApplied(value);
     setTyped(value);
   }
-  useEffect(() => {
-    if (settled === typed && settled !== applied) {
-      setApplied(settled);
-      onChange(settled);
-    }
-  }, [settled, typed, applied, onChange]);
+  const enter = (text: string) => {
+    setTyped(text);
+    clearTimeout(pause.current);
+    pause.current = setTimeout(() => {
+      setApplied(text);
+      onChange(text);
+    }, PAUSE_MS);
+  };
   return (
     <TextInput
       id={id}
@@ -40,7 +42,7 @@ export function FilterInput({ label, id, value, onChange, placeholder, small, ty
       value={typed}
       autoComplete="off"
       spellCheck={false}
-      onChange={(event) => setTyped(event.target.value)}
+      onChange={(event) => enter(event.target.value)}
     />
   );
 }

@@ -1,4 +1,4 @@
-import { useRef } from 'react';
+import { useState } from 'react';
 import { ConnectionLost } from './problem';
 
 interface Intention {
@@ -26,7 +26,6 @@ export function createIntention(newKey: () => string = () => crypto.randomUUID()
 
 /** An intention that lasts as long as the component. */
 export function useIntention(): ReturnType<typeof createIntention> {
-  const ref = useRef<ReturnType<typeof createIntention> | null>(null);
-  ref.current ??= createIntention();
-  return ref.current;
+  const [intention] = useState(() => createIntention());
+  return intention;
 }
