@@ -25,7 +25,10 @@ export const phaseSpacing: LineRule = {
 };
 
 interface Pair {
+  /** At the structure or at mid-span, whichever is less. */
   spacingM: number;
+  /** At the structure. */
+  atStructureM: number;
   one: number;
   two: number;
 }
@@ -36,7 +39,8 @@ function weighSection(section: NormalisedOverhead, limits: VoltageDimensions, kv
   const [low, high] = limits.plainSpacingM;
   const at = withUnit(kv, 'kV');
   if (all.spacingM < low) {
-    const isLeast = all.spacingM < limits.leastSpacingM;
+    // Sags that differ are drawn for one span; only the structure itself is certain.
+    const isLeast = all.atStructureM < limits.leastSpacingM;
     const limit = isLeast ? limits.leastSpacingM : low;
     return [
       draft(section, all, isLeast, `closer than the ${withUnit(limit, 'm')} that ${at} makes plausible`),
@@ -69,8 +73,9 @@ function pairs(section: NormalisedOverhead, circuit: number | null): Pair[] {
       const acrossM = one.position.horizontalM - two.position.horizontalM;
       const upM = one.position.attachmentHeightM - two.position.attachmentHeightM;
       const midM = upM - one.position.sagM + two.position.sagM;
-      const spacingM = Math.min(Math.hypot(acrossM, upM), Math.hypot(acrossM, midM));
-      return { spacingM, one: one.index, two: two.index };
+      const atStructureM = Math.hypot(acrossM, upM);
+      const spacingM = Math.min(atStructureM, Math.hypot(acrossM, midM));
+      return { spacingM, atStructureM, one: one.index, two: two.index };
     }),
   );
 }
