@@ -4,8 +4,13 @@ import type { ConductorData } from './types';
 
 const bessel = createModifiedBessel();
 
-/** 1 + α(T − 20 °C). */
-function warming(c: ConductorData, temperatureC: number): number {
+/**
+ * Growth of a conductor's d.c. resistance from 20 °C: 1 + α(T − 20 °C).
+ *
+ * @param c conductor, of which only the coefficient counts
+ * @param temperatureC temperature, °C
+ */
+export function resistanceGrowth(c: ConductorData, temperatureC: number): number {
   return (
     1 +
     (c.temperatureCoefficientPerK ?? ALUMINIUM_COEFFICIENT_PER_K) * (temperatureC - RESISTANCE_REFERENCE_C)
@@ -19,7 +24,7 @@ function warming(c: ConductorData, temperatureC: number): number {
  * @returns Ω/km
  */
 export function dcResistanceOhmPerKm(c: ConductorData): number {
-  return (c.dcResistance20OhmPerKm ?? 0) * warming(c, c.temperatureC ?? RESISTANCE_REFERENCE_C);
+  return (c.dcResistance20OhmPerKm ?? 0) * resistanceGrowth(c, c.temperatureC ?? RESISTANCE_REFERENCE_C);
 }
 
 /**
@@ -111,8 +116,8 @@ export function conductorResistanceOhmPerKm(
   frequencyHz: number,
 ): number {
   if (c.model === 'handbook') {
-    const tabled = warming(c, c.temperatureC ?? RESISTANCE_REFERENCE_C);
-    return ((c.acResistanceOhmPerKm ?? 0) * warming(c, temperatureC)) / tabled;
+    const tabled = resistanceGrowth(c, c.temperatureC ?? RESISTANCE_REFERENCE_C);
+    return ((c.acResistanceOhmPerKm ?? 0) * resistanceGrowth(c, temperatureC)) / tabled;
   }
   const out = new Float64Array(2);
   internalImpedance({ ...c, temperatureC }, 2 * Math.PI * frequencyHz, out);

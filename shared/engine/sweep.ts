@@ -102,7 +102,10 @@ export function sweep(
     const bad = checkFrequency(frequenciesHz[k] as number);
     if (bad) return bad;
   }
+  // A copy with skin effect rests on data that the model as filed never looked at.
   const chosen = skinEffect ? withSkinEffect(s) : { section: s, conductors: undefined };
+  const unfit = skinEffect ? checkSection(chosen.section) : null;
+  if (unfit) return unfit;
   const w = sharedWorkspace();
   placeWires(chosen.section, 2 * Math.PI, w);
   const failure = fillGeometry(w) ?? reduceShunt(w);

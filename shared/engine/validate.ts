@@ -1,4 +1,4 @@
-import { dcResistanceOhmPerKm } from './conductor';
+import { resistanceGrowth } from './conductor';
 import { FREQUENCY_RANGE_HZ, MAX_BUNDLE, MAX_CIRCUITS } from './constants';
 import { fail } from './failures';
 import type {
@@ -61,33 +61,37 @@ function requiredField(
   return badNumber(value, low, 1e6, true, where, field);
 }
 
+/** Temperature and its coefficient, where given: in range, and leaving a resistance above zero. */
+function checkTemperature(c: ConductorData, where: Where): Failure | null {
+  const { temperatureC, temperatureCoefficientPerK: alpha } = c;
+  const fault =
+    (temperatureC === undefined
+      ? null
+      : badNumber(temperatureC, -273.15, 2000, true, where, 'temperatureC')) ??
+    (alpha === undefined ? null : badNumber(alpha, 0, 1, false, where, 'temperatureCoefficientPerK'));
+  if (fault) return fault;
+  if (temperatureC === undefined || resistanceGrowth(c, temperatureC) > 0) return null;
+  return fail(
+    'conductor-data',
+    { ...where, field: 'temperatureC' },
+    `at ${temperatureC} °C the resistance would not be positive any more`,
+  );
+}
+
 /** Data that the model `tube` needs; a core as wide as the wire leaves no metal to carry current. */
 function checkTube(c: ConductorData, where: Where): Failure | null {
+  const { coreDiameterMm = 0, diameterMm } = c;
   const fault =
     requiredField(c, 'dcResistance20OhmPerKm', 0, where) ??
     requiredField(c, 'temperatureC', -273.15, where) ??
-    (c.coreDiameterMm === undefined
-      ? null
-      : badNumber(c.coreDiameterMm, 0, 1e4, false, where, 'coreDiameterMm')) ??
-    (c.temperatureCoefficientPerK === undefined
-      ? null
-      : badNumber(c.temperatureCoefficientPerK, 0, 1, false, where, 'temperatureCoefficientPerK'));
-  if (fault) return fault;
-  if (!(dcResistanceOhmPerKm(c) > 0)) {
-    return fail(
-      'conductor-data',
-      { ...where, field: 'temperatureC' },
-      `at ${c.temperatureC} °C the resistance would not be positive any more`,
-    );
-  }
-  if ((c.coreDiameterMm ?? 0) >= c.diameterMm) {
-    return fail(
-      'conductor-data',
-      { ...where, field: 'coreDiameterMm' },
-      `the core (${c.coreDiameterMm} mm) is as wide as the conductor (${c.diameterMm} mm)`,
-    );
-  }
-  return null;
+    checkTemperature(c, where) ??
+    badNumber(coreDiameterMm, 0, 1e4, false, where, 'coreDiameterMm');
+  if (fault || coreDiameterMm < diameterMm) return fault;
+  return fail(
+    'conductor-data',
+    { ...where, field: 'coreDiameterMm' },
+    `the core (${coreDiameterMm} mm) is as wide as the conductor (${diameterMm} mm)`,
+  );
 }
 
 function checkConductor(c: ConductorData | undefined, where: Where): Failure | null {
@@ -97,7 +101,11 @@ function checkConductor(c: ConductorData | undefined, where: Where): Failure | n
   const diameter = badNumber(c.diameterMm, 0, 1e4, true, where, 'diameterMm');
   if (diameter) return diameter;
   if (c.model === 'handbook') {
-    return requiredField(c, 'acResistanceOhmPerKm', 0, where) ?? requiredField(c, 'gmrMm', 0, where);
+    return (
+      requiredField(c, 'acResistanceOhmPerKm', 0, where) ??
+      requiredField(c, 'gmrMm', 0, where) ??
+      checkTemperature(c, where)
+    );
   }
   if (c.model === 'tube') return checkTube(c, where);
   return fail(
