@@ -20,7 +20,10 @@ export function FrontDoor({ title, lead, owner, children, foot }: FrontDoorProps
   return (
     <div className="grid min-h-dvh grid-rows-[1fr_auto]">
       <main className="m-auto grid w-full max-w-[1180px] p-4 field:p-8 table:grid-cols-[minmax(0,1fr)_404px]">
-        <section className="sheet flex flex-col table:min-h-[560px]" aria-label="About">
+        <section
+          className="sheet order-2 !mt-0 flex flex-col table:order-none table:min-h-[560px]"
+          aria-label="About"
+        >
           <div className="grid flex-1 place-items-center px-4 pt-6 field:px-10 field:pt-9">
             <BalancedMark />
           </div>
@@ -36,7 +39,7 @@ export function FrontDoor({ title, lead, owner, children, foot }: FrontDoorProps
           </div>
         </section>
         <section
-          className="sheet !mt-0 flex flex-col border-t-[1.5px] border-t-ink px-6 pt-8 pb-6 field:px-10 field:pt-10 table:border-t table:border-l-[1.5px] table:border-t-rule-strong table:border-l-ink"
+          className="sheet !mt-0 flex flex-col border-b-[1.5px] border-b-ink px-6 pt-8 pb-6 field:px-10 field:pt-10 table:border-b table:border-l-[1.5px] table:border-b-rule-strong table:border-l-ink"
           aria-labelledby="door-title"
         >
           <div className="mb-7">
