@@ -30,6 +30,7 @@ export async function startLocalMailServer(
     authOptional: true,
     disabledCommands: ['AUTH', 'STARTTLS'],
     size: MAX_BYTES,
+    closeTimeout: 1000,
     onData: (stream, session, done) => {
       simpleParser(stream)
         .then((mail) =>

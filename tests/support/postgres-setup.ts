@@ -3,6 +3,8 @@ import { existsSync, readdirSync } from 'node:fs';
 import { join } from 'node:path';
 import type { TestProject } from 'vitest/node';
 import { addressOf, DATA_FOLDER, discard, start } from '../../server/scripts/postgres.mjs';
+import { makeDataSource } from '../../server/database/data-source';
+import { seedBaseline } from '../../server/database/seeds/baseline';
 import { migrate } from '../../server/database/migrate';
 import { createDatabase } from './databases';
 
@@ -40,6 +42,15 @@ async function discardOrphans(): Promise<void> {
   }
 }
 
+/** What every installation begins with: rules, conductors, a calendar. */
+async function layBaseline(url: string): Promise<void> {
+  const owner = makeDataSource(url, 'owner');
+  await owner.initialize();
+  const now = new Date('2027-01-04T08:00:00.000Z');
+  await owner.transaction((manager) => seedBaseline(manager, { now, timeZone: 'UTC' }));
+  await owner.destroy();
+}
+
 /** A throw-away cluster for this run, with one migrated database to clone. Durability is off: nothing is kept. */
 export default async function setup(project: TestProject): Promise<() => Promise<void>> {
   await discardOrphans();
@@ -50,6 +61,7 @@ export default async function setup(project: TestProject): Promise<() => Promise
   const secret = randomBytes(32).toString('base64url');
   await createDatabase(ownerUrl, template);
   await migrate(addressOf(cluster, template), secret);
+  await layBaseline(addressOf(cluster, template));
   project.provide('postgres', { ownerUrl, template, secret });
   return () => discard({ folder });
 }
