@@ -29,7 +29,7 @@ export function FormFaults({ items, asked, onGo }: FormFaultsProps) {
             ? 'One field stands in the way of filing'
             : `${fixed(count, 0)} fields stand in the way of filing`
         }
-        items={items.map((i) => ({ fieldId: fieldId(i.pointer), message: `${i.label}: ${i.message}` }))}
+        items={items.map((i) => ({ fieldId: fieldId(i.pointer), message: i.message }))}
         takesFocus={asked}
       />
     </div>

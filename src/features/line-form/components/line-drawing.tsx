@@ -38,6 +38,7 @@ export function LineDrawing({ shown, clearanceM = null, bad }: LineDrawingProps)
             unit={unit}
             clearanceM={clearanceM}
             conductorName={name}
+            tallest={400}
             onMove={(id, to) => change((f) => changeSection(f, shown, (s) => movePosition(s, id, to)))}
           />
         )}

@@ -88,7 +88,7 @@ export function LineForm({ editor, notes, view, backTo, clearanceM, badPositions
             <FormFoot missing={notes.all.length - notes.shown.length} backTo={backTo} onAsk={notes.showAll} />
           </div>
         </form>
-        <div className="stays-in-view grid min-w-0 gap-6">
+        <div className="stays-in-view grid min-w-0 grid-cols-[minmax(0,1fr)] gap-6 cols:max-h-[calc(100dvh-32px)] cols:overflow-y-auto [&>.sheet]:mt-0">
           <LineDrawing shown={section} clearanceM={clearanceM} bad={badPositions(section)} />
           {children}
         </div>

@@ -37,12 +37,17 @@ function CoordinateInput({ path, name, unit }: { path: FormPath; name: string; u
 /** What is wrong with a position, under its row, each sentence once. */
 function PositionErrors({ path }: { path: FormPath }) {
   const { noteAt } = useLineFormView();
-  const notes = COORDINATES.flatMap(({ key }) => {
+  const notes = COORDINATES.flatMap(({ key, head }) => {
     const pointer = pointerOf([...path, key]);
     const note = noteAt(pointer);
-    return note ? [{ id: `${fieldId(pointer)}-error`, message: note.message }] : [];
+    return note ? [{ id: `${fieldId(pointer)}-error`, head, ...note }] : [];
   });
-  const distinct = notes.filter((n, i) => notes.findIndex((m) => m.message === n.message) === i);
+  const lacking = notes.filter((n) => n.missing).map((n) => n.head.toLowerCase());
+  const [firstLacking] = notes.filter((n) => n.missing);
+  const distinct = [
+    ...notes.filter((n, i) => !n.missing && notes.findIndex((m) => m.message === n.message) === i),
+    ...(firstLacking ? [{ id: firstLacking.id, message: `Still needed: ${lacking.join(' and ')}.` }] : []),
+  ];
   if (distinct.length === 0) return null;
   return (
     <Row>
@@ -77,7 +82,10 @@ function PositionRow({
       <RowHead className="!pr-1 font-semibold">
         <span className="inline-flex items-center gap-2">
           <PositionMark position={position} />
-          <span>{words}</span>
+          <span className="sr-only field:not-sr-only">{words}</span>
+          <span aria-hidden="true" className="text-label field:hidden">
+            {name.replace(/\D/g, '')}
+          </span>
         </span>
       </RowHead>
       {COORDINATES.map(({ key, head }) => (
@@ -104,7 +112,9 @@ export function PositionsTable({ section }: { section: number }) {
     <Table label="Positions at the structure" flush className="mt-4">
       <TableHead>
         <Row>
-          <HeadCell>Position</HeadCell>
+          <HeadCell>
+            <span className="sr-only field:not-sr-only">Position</span>
+          </HeadCell>
           {COORDINATES.map(({ key, head }) => (
             <HeadCell key={key} number>
               {head}

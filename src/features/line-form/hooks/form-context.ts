@@ -7,6 +7,8 @@ export interface FieldNote {
   /** A fault stands in the way of filing; the other grades are findings. */
   grade: 'must-answer' | 'explain' | 'note';
   message: string;
+  /** Nothing stands there yet. */
+  missing?: boolean;
 }
 
 /** Everything that a field of the form needs to know about the form it stands in. */

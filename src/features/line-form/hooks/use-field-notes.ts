@@ -1,7 +1,7 @@
 import { useCallback, useMemo, useState } from 'react';
 import type { LineForm } from '../model/form-types';
 import { getAt } from '../model/edit';
-import { fieldLabel, fieldPointer } from '../model/pointers';
+import { faultSentence, fieldPointer, inFormOrder } from '../model/pointers';
 import type { FieldNote } from './form-context';
 
 /** A fault or a finding at a place of the line. */
@@ -11,7 +11,6 @@ export interface PlacedNote extends FieldNote {
 
 export interface NoteItem {
   pointer: string;
-  label: string;
   message: string;
 }
 
@@ -56,9 +55,10 @@ export function useFieldNotes(
     const first = new Map<string, NoteItem>();
     for (const { pointer, message } of faults) {
       const field = fieldPointer(form, pointer);
-      if (!first.has(field)) first.set(field, { pointer: field, label: fieldLabel(form, field), message });
+      if (!first.has(field))
+        first.set(field, { pointer: field, message: faultSentence(form, field, message) });
     }
-    return [...first.values()];
+    return [...first.values()].sort((a, b) => inFormOrder(a.pointer, b.pointer));
   }, [form, faults]);
 
   return {

@@ -1,7 +1,8 @@
 import type { Conductor } from '#shared/contracts/api.generated';
-import { figure, THIN_SPACE } from '#shared/format/numbers';
+import { quantity } from '#shared/format/numbers';
 import { handbookData } from '#shared/library/handbook-data';
 import type { LibraryConductor } from '#shared/library/types';
+import { plainQuantity } from '../../../lib/plain-number';
 import type { ConductorForm } from './form-types';
 import { fieldOf } from './leaf';
 import { readNumber, writeNumber } from './number-text';
@@ -66,8 +67,7 @@ export function ownData(form: ConductorForm, before: Conductor | undefined): Con
 export function conductorWords(form: ConductorForm, conductor: Conductor | undefined): string | undefined {
   const data = form.source === 'library' ? dataOf(form, conductor) : null;
   if (!data) return undefined;
-  const t = THIN_SPACE;
-  const diameter = `${figure(data.diameterMm, 4)}${t}mm`;
-  const gmr = `GMR ${figure(data.gmrMm, 4)}${t}mm`;
-  return `${diameter}, ${gmr}, ${figure(data.acResistanceOhmPerKm, 4)}${t}Ω/km at ${figure(data.temperatureC, 4)}${t}°C`;
+  const shown = (value: number, unit: string) => plainQuantity(value, unit, 4);
+  const geometry = `${shown(data.diameterMm, 'mm')}, GMR ${shown(data.gmrMm, 'mm')}`;
+  return `${geometry}, ${quantity(data.acResistanceOhmPerKm, 'Ω/km')} at ${shown(data.temperatureC, '°C')}`;
 }

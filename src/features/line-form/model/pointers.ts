@@ -103,19 +103,90 @@ export function positionName(form: LineForm, section: number, position: number):
   return several ? `ground wire ${ground}` : 'the ground wire';
 }
 
-/** The name of a field as the error summary says it: "Height of c", "X1", "GMR of phase". */
-export function fieldLabel(form: LineForm, pointer: string): string {
-  const path = steps(placeInForm(pointer));
-  const last = path.at(-1) ?? '';
-  const name = SEQUENCE.test(last) ? last.toUpperCase().replace('M', 'm') : (LABELS[last] ?? last);
+/** Where a field stands when its own name does not say it: "Height of c", "Section 2", "Circuit 2". */
+function placeWords(form: LineForm, path: readonly string[]): string {
   const section = path[0] === 'sections' ? Number(path[1]) : null;
-  const inSection = section !== null && form.sections.length > 1 ? `, section ${section + 1}` : '';
-  if (section !== null && path[2] === 'positions')
-    return `${name} of ${positionName(form, section, Number(path[3]))}${inSection}`;
-  if (section !== null && path[2] === 'conductors') return `${name} of ${path[3] ?? ''}${inSection}`;
+  const inSection = section !== null && form.sections.length > 1 ? `Section ${section + 1}` : '';
+  if (section !== null && path[2] === 'positions') {
+    const name = positionName(form, section, Number(path[3]));
+    const words = /^(the )?ground/.test(name) ? name.replace(/^(the )?g/, 'G') : `Phase ${name}`;
+    return inSection ? `${inSection}, ${words.charAt(0).toLowerCase()}${words.slice(1)}` : words;
+  }
+  if (section !== null && path[2] === 'conductors') {
+    const words = `Conductor “${path[3] ?? ''}”`;
+    return inSection ? `${inSection}, ${words.toLowerCase()}` : words;
+  }
   if (path[0] === 'declared' && form.circuits === 2) {
     const circuit = form.declared[Number(path[1])]?.circuit ?? Number(path[1]) + 1;
-    return `${name} of circuit ${circuit}`;
+    return `Circuit ${circuit}`;
   }
-  return `${name}${inSection}`;
+  return inSection;
+}
+
+/** The name of a field as sentences use it: "Height", "X1", "GMR". */
+function fieldName(path: readonly string[]): string {
+  const last = path.at(-1) ?? '';
+  return SEQUENCE.test(last) ? last.toUpperCase().replace('M', 'm') : (LABELS[last] ?? last);
+}
+
+/** The name of a field with its place: "Phase c: Height", "X1". */
+export function fieldLabel(form: LineForm, pointer: string): string {
+  const path = steps(placeInForm(pointer));
+  const place = placeWords(form, path);
+  const name = fieldName(path);
+  return place ? `${place}: ${name}` : name;
+}
+
+/** A fault as the error summary says it: its sentence, after its place where the sentence does not name one. */
+export function faultSentence(form: LineForm, pointer: string, message: string): string {
+  const path = steps(placeInForm(pointer));
+  const place = placeWords(form, path);
+  if (place) return `${place}: ${message}`;
+  const name = fieldName(path);
+  return message.startsWith(name) ? message : `${name}: ${message}`;
+}
+
+/** In which order the form's parts stand on the page. */
+const ORDER = [
+  'name',
+  'from',
+  'to',
+  'nominalVoltageKv',
+  'frequencyHz',
+  'declared',
+  'declaredMutual',
+  'sections',
+  'kind',
+  'lengthKm',
+  'perLength',
+  'positions',
+  'horizontalM',
+  'attachmentHeightM',
+  'sagM',
+  'conductors',
+  'library',
+  'model',
+  'diameterMm',
+  'r1',
+  'r0',
+  'x1',
+  'x0',
+  'b1',
+  'b0',
+];
+
+function rank(step: string): number {
+  if (/^\d+$/.test(step)) return Number(step);
+  const at = ORDER.indexOf(step);
+  return at < 0 ? ORDER.length : at;
+}
+
+/** Sorts pointers as their fields stand on the page. */
+export function inFormOrder(a: string, b: string): number {
+  const [left, right] = [steps(a), steps(b)];
+  for (let i = 0; i < Math.max(left.length, right.length); i += 1) {
+    const difference = rank(left[i] ?? '') - rank(right[i] ?? '');
+    if (difference !== 0) return difference;
+  }
+  return 0;
 }

@@ -8,6 +8,8 @@ export interface Placed {
   pointer: string;
   grade: 'must-answer' | 'explain' | 'note';
   message: string;
+  /** Nothing stands there yet. */
+  missing?: boolean;
 }
 
 /** The place of a finding within its line; of a whole position, its height. */
@@ -25,10 +27,11 @@ const placed = ({ where, grade, message }: Finding): Placed => ({ pointer: place
 export function blockersOf(outcome: CheckOutcome | null): Placed[] {
   if (!outcome) return [];
   if (outcome.kind === 'faults')
-    return outcome.faults.map(({ pointer, message }: PointerFault) => ({
+    return outcome.faults.map(({ pointer, value, message }: PointerFault) => ({
       pointer: pointer.replace(/^\/lines\/\d+/, ''),
       grade: 'must-answer',
       message,
+      missing: value === null,
     }));
   const { report } = outcome;
   if (!isUncomputed(report)) return [];

@@ -6,7 +6,13 @@ import {
   changeSection,
   addSection,
 } from '../../../../src/features/line-form/model/edit';
-import { fieldId, fieldLabel, fieldPointer } from '../../../../src/features/line-form/model/pointers';
+import {
+  faultSentence,
+  fieldId,
+  fieldLabel,
+  fieldPointer,
+  inFormOrder,
+} from '../../../../src/features/line-form/model/pointers';
 
 const oneWire = changeSection(blankLine(), 0, (s) => setGroundWires(s, 1));
 const twoWires = changeSection(setCircuits(blankLine(), 2), 0, (s) => setGroundWires(s, 2));
@@ -39,15 +45,51 @@ describe('a fault finds its field', () => {
 
 describe('a field has the name that people use', () => {
   it.each([
-    [oneWire, '/sections/0/positions/2/attachmentHeightM', 'Height of c'],
-    [oneWire, '/sections/0/positions/3/sagM', 'Sag of the ground wire'],
-    [twoWires, '/sections/0/positions/4/horizontalM', 'Across of b2'],
-    [twoWires, '/sections/0/positions/7/horizontalM', 'Across of ground wire 2'],
-    [twoWires, '/declared/1/x0/value', 'X0 of circuit 2'],
+    [oneWire, '/sections/0/positions/2/attachmentHeightM', 'Phase c: Height'],
+    [oneWire, '/sections/0/positions/3/sagM', 'Ground wire: Sag'],
+    [twoWires, '/sections/0/positions/4/horizontalM', 'Phase b2: Across'],
+    [twoWires, '/sections/0/positions/7/horizontalM', 'Ground wire 2: Across'],
+    [twoWires, '/declared/1/x0/value', 'Circuit 2: X0'],
     [oneWire, '/declared/0/b1/value', 'B1'],
-    [addSection(oneWire), '/sections/1/lengthKm', 'Length, section 2'],
+    [addSection(oneWire), '/sections/1/lengthKm', 'Section 2: Length'],
     [oneWire, '/declaredMutual/0/x0m/value', 'X0m'],
   ])('%# %s', (form, pointer, label) => {
     expect(fieldLabel(form, pointer)).toBe(label);
+  });
+});
+
+describe('the error summary', () => {
+  it('names the place of a fault once', () => {
+    expect(faultSentence(oneWire, '/declared/0/x1', 'X1 is missing.')).toBe('X1 is missing.');
+    expect(faultSentence(oneWire, '/declared/0/x1', 'Write it with a point.')).toBe(
+      'X1: Write it with a point.',
+    );
+    expect(faultSentence(oneWire, '/sections/0/positions/2/sagM', 'Sag is missing.')).toBe(
+      'Phase c: Sag is missing.',
+    );
+  });
+
+  it('lists faults as their fields stand on the page', () => {
+    const pointers = [
+      '/sections/1/lengthKm',
+      '/sections/0/conductors/phase/library',
+      '/sections/0/positions/2/attachmentHeightM',
+      '/sections/0/positions/2/horizontalM',
+      '/declared/0/b1',
+      '/declared/0/x1',
+      '/to',
+      '/name',
+    ];
+    expect([...pointers].sort(inFormOrder)).toEqual([...pointers].reverse().sort(inFormOrder));
+    expect([...pointers].sort(inFormOrder)).toEqual([
+      '/name',
+      '/to',
+      '/declared/0/x1',
+      '/declared/0/b1',
+      '/sections/0/positions/2/horizontalM',
+      '/sections/0/positions/2/attachmentHeightM',
+      '/sections/0/conductors/phase/library',
+      '/sections/1/lengthKm',
+    ]);
   });
 });
