@@ -98,7 +98,7 @@ function ApplicationPage({ number }: { number: string }) {
           <LinesSheet application={application} draft={draft} filed={filed} />
           {draft && <DraftFaults number={number} draft={draft} />}
         </div>
-        <div className="grid min-w-0 gap-6 [&>.sheet]:mt-0">
+        <div className="grid min-w-0 grid-cols-[minmax(0,1fr)] gap-6 [&>.sheet]:mt-0">
           {draft && <ImportPanel number={number} hasLines={draft.lines.length > 0} />}
           <LettersAndRevisions letters={letters} revisions={revisions} />
           <AttachmentsSheet number={number} files={files} open={open} />
