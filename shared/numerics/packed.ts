@@ -22,18 +22,21 @@ export function packedLength(n: number): number {
  * @param im imaginary parts, packed
  * @param n order of the matrix
  * @param keep number of leading rows that stay
- * @returns largest ÷ smallest pivot modulus met (a cheap estimate of the condition), Infinity when singular
+ * @returns largest diagonal element ÷ smallest pivot (a cheap estimate of the condition), Infinity when singular
  */
 export function eliminateComplex(re: Float64Array, im: Float64Array, n: number, keep: number): number {
   let low = Infinity;
   let high = 0;
+  for (let i = 0, e = 0; i < n; i++, e += i + 1) {
+    const size = (re[e] as number) * (re[e] as number) + (im[e] as number) * (im[e] as number);
+    high = size > high ? size : high;
+  }
   for (let k = n - 1; k >= keep; k--) {
     const rowK = rowStart(k);
     const pr = re[rowK + k] as number;
     const pi = im[rowK + k] as number;
     const size = pr * pr + pi * pi;
     low = size < low ? size : low;
-    high = size > high ? size : high;
     if (!(size > 0)) return Infinity;
     const qr = pr / size;
     const qi = -pi / size;
@@ -51,22 +54,22 @@ export function eliminateComplex(re: Float64Array, im: Float64Array, n: number, 
       }
     }
   }
-  return high > 0 ? Math.sqrt(high / low) : 1;
+  return keep < n ? Math.sqrt(high / low) : 1;
 }
 
 /**
  * The same elimination for a symmetric real matrix.
  *
- * @returns largest ÷ smallest pivot met, Infinity when a pivot is not positive (the matrix is not positive definite)
+ * @returns largest diagonal element ÷ smallest pivot, Infinity when a pivot is not positive (not positive definite)
  */
 export function eliminateReal(a: Float64Array, n: number, keep: number): number {
   let low = Infinity;
   let high = 0;
+  for (let i = 0, e = 0; i < n; i++, e += i + 1) high = (a[e] as number) > high ? (a[e] as number) : high;
   for (let k = n - 1; k >= keep; k--) {
     const rowK = rowStart(k);
     const pivot = a[rowK + k] as number;
     low = pivot < low ? pivot : low;
-    high = pivot > high ? pivot : high;
     if (!(pivot > 0)) return Infinity;
     const inverse = 1 / pivot;
     for (let i = 0; i < k; i++) {
@@ -75,7 +78,7 @@ export function eliminateReal(a: Float64Array, n: number, keep: number): number 
       for (let j = 0; j <= i; j++) a[rowI + j] = (a[rowI + j] as number) - f * (a[rowK + j] as number);
     }
   }
-  return high > 0 ? high / low : 1;
+  return keep < n ? high / low : 1;
 }
 
 /**
