@@ -5,6 +5,7 @@ import { prepareDatabase, setUpTokenOf } from './app/prepare-database';
 import { assemble, closeServer, Closing, openDoor } from './app/server';
 import type { Parts } from './app/server';
 import { problemOf } from './middleware/problems';
+import { demoAccounts } from './services/accounts/demo-accounts';
 import { makeLogger } from './logging/logger';
 
 const RETRY_MS = 2000;
@@ -13,6 +14,7 @@ const RETRY_MS = 2000;
 interface Ready {
   ready: true;
   setUpToken: string | null;
+  accounts: ReturnType<typeof demoAccounts>;
 }
 
 function configOrExit() {
@@ -69,6 +71,7 @@ async function main(): Promise<void> {
   const ready: Ready = {
     ready: true,
     setUpToken: empty && !config.demo ? setUpTokenOf(config.sessionSecret) : null,
+    accounts: config.demo ? demoAccounts() : [],
   };
   process.send?.(ready);
 }

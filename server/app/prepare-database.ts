@@ -3,6 +3,7 @@ import type { Config } from '../config/config';
 import { migrate } from '../database/migrate';
 import { makeDataSource } from '../database/data-source';
 import { seedBaseline } from '../database/seeds/baseline';
+import { seedDemo } from '../database/seeds/demo';
 import { User } from '../entities/people.entities';
 
 /** The owner's calendar until an administrator sets another. */
@@ -13,13 +14,15 @@ export interface Prepared {
   empty: boolean;
 }
 
-/** Migrates and lays what every installation begins with: rules, conductors, a calendar. */
-export async function prepareDatabase({ databaseUrl, sessionSecret }: Config, now: Date): Promise<Prepared> {
+/** Migrates, lays what every installation begins with (rules, conductors, a calendar), and plays the demo once. */
+export async function prepareDatabase(config: Config, now: Date): Promise<Prepared> {
+  const { databaseUrl, sessionSecret, demo, publicUrl } = config;
   await migrate(databaseUrl, sessionSecret);
   const owner = makeDataSource(databaseUrl, 'owner');
   await owner.initialize();
   try {
     await owner.transaction((manager) => seedBaseline(manager, { now, timeZone: FIRST_TIME_ZONE }));
+    if (demo) await seedDemo(owner, publicUrl, now);
     return { empty: !(await owner.manager.exists(User)) };
   } finally {
     await owner.destroy();
