@@ -34,18 +34,31 @@ function utf8(bytes: Uint8Array): string | null {
   }
 }
 
+/** What the bytes 0x80 to 0x9F are in Windows-1252; the five that it leaves free stay control characters. */
+const C1 =
+  '\u20ac\u0081\u201a\u0192\u201e\u2026\u2020\u2021\u02c6\u2030\u0160\u2039\u0152\u008d\u017d\u008f' +
+  '\u0090\u2018\u2019\u201c\u201d\u2022\u2013\u2014\u02dc\u2122\u0161\u203a\u0153\u009d\u017e\u0178';
+
+/** Node 20's own decoder of that name reads Latin-1, which has control characters in that place. */
+function windows1252(bytes: Uint8Array): string {
+  const latin1 = Buffer.from(bytes.buffer, bytes.byteOffset, bytes.byteLength).toString('latin1');
+  return latin1.replace(/[\u0080-\u009f]/g, (c) => C1[c.charCodeAt(0) - 0x80] ?? c);
+}
+
 /**
  * UTF-8 with or without a byte order mark, else Windows-1252, in which every byte has a meaning.
+ * @param told the encoding, when somebody said it
  * @returns the text; or what the file seems to be, as a sentence
  */
-export function decodeText(bytes: Uint8Array): Decoded {
+export function decodeText(bytes: Uint8Array, told?: Encoding): Decoded {
   const other = SIGNATURES.find(([signature]) => begins(bytes, signature));
   if (other) return { ok: false, message: `This is ${other[1]}, whatever its name says. ${other[2]}` };
   if (isUtf16(bytes)) return { ok: false, message: 'The file is UTF-16. Save it as UTF-8.' };
-  const text = utf8(bytes);
+  const text = told === 'windows-1252' ? null : utf8(bytes);
+  if (text === null && told === 'utf-8') return { ok: false, message: 'The file is not UTF-8.' };
   const decoded: Decoded =
     text === null
-      ? { ok: true, text: new TextDecoder('windows-1252').decode(bytes), encoding: 'windows-1252' }
+      ? { ok: true, text: windows1252(bytes), encoding: 'windows-1252' }
       : { ok: true, text, encoding: 'utf-8' };
   if (/^\s*<(!doctype|html|\?xml)/i.test(decoded.text.slice(0, 200)))
     return {

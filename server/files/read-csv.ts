@@ -8,14 +8,19 @@ import { readHeader } from './csv-header';
 import type { CsvHeader } from './csv-header';
 import type { Encoding } from './decode-text';
 import { decimalOf, delimiterOf, DELIMITERS, firstLine, lineEndsOf, normalised } from './sniff-dialect';
-import type { Delimiter, Dialect } from './sniff-dialect';
+import type { CorrectedDialect, Delimiter, Dialect } from './sniff-dialect';
 
 /** Most fields in a row: the list of columns has fewer than half as many. */
 const MAX_FIELDS = 1000;
 
+/** Longest line of text: a row of all columns has some thousands of characters. */
+const MAX_LINE = 200_000;
+
 export interface CsvOptions {
   /** Most data rows. */
   maxRows: number;
+  /** What somebody corrected of the dialect. */
+  told?: CorrectedDialect;
 }
 
 export interface CsvFile {
@@ -36,6 +41,21 @@ const whole = (row: number, expected: string, message: string): CellFault => ({
   message,
 });
 
+/** Records that are parsed: data rows, and about as many blank ones. */
+const mostRecords = (maxRows: number) => 2 * maxRows + 1000;
+
+/** Number of the first line that is too long among those that will be parsed; null when there is none. */
+function endlessLine(text: string, lines: number): number | null {
+  let start = 0;
+  for (let n = 1; n <= lines && start < text.length; n++) {
+    const found = text.indexOf('\n', start);
+    const end = found < 0 ? text.length : found;
+    if (end - start > MAX_LINE) return n;
+    start = end + 1;
+  }
+  return null;
+}
+
 interface Parsed {
   records: string[][];
   fault: CellFault | null;
@@ -43,7 +63,7 @@ interface Parsed {
 
 /** Parses with everything fixed beforehand; an error of the parser ends it, since what follows it is out of joint. */
 function parse(text: string, delimiter: Delimiter, maxRows: number): Parsed {
-  const most = 2 * maxRows + 1000;
+  const most = mostRecords(maxRows);
   const { data, errors, meta } = Papa.parse<string[]>(text, {
     delimiter: DELIMITERS[delimiter],
     newline: '\n',
@@ -123,9 +143,9 @@ function* numberCells(rows: readonly CsvRow[]): Iterable<string> {
  * @param raw decoded text, with whatever line ends it has
  * @param encoding the encoding that it was decoded from
  */
-export function readCsv(raw: string, encoding: Encoding, { maxRows }: CsvOptions): CsvFile {
+export function readCsv(raw: string, encoding: Encoding, { maxRows, told = {} }: CsvOptions): CsvFile {
   const { text, sep } = normalised(raw);
-  const delimiter = delimiterOf(text, sep);
+  const delimiter = told.delimiter ?? delimiterOf(text, sep);
   const dialect: Dialect = { delimiter, decimal: 'point', encoding, lineEnds: lineEndsOf(raw) };
   const nothing = (fault: CellFault): CsvFile => ({
     table: { columns: new Set(), rows: [], decimal: 'point' },
@@ -139,6 +159,11 @@ export function readCsv(raw: string, encoding: Encoding, { maxRows }: CsvOptions
     return nothing(
       whole(1, `at most ${MAX_FIELDS} columns`, `The header has more than ${MAX_FIELDS} columns.`),
     );
+  const endless = endlessLine(text, mostRecords(maxRows));
+  if (endless !== null) {
+    const expected = `rows of at most ${MAX_LINE} characters`;
+    return nothing(whole(endless, expected, `Row ${endless} is longer than ${MAX_LINE} characters.`));
+  }
   const parsed = parse(text, delimiter, maxRows);
   if (parsed.fault) return nothing(parsed.fault);
   const header = readHeader(parsed.records[0] ?? []);
@@ -153,7 +178,7 @@ export function readCsv(raw: string, encoding: Encoding, { maxRows }: CsvOptions
         `The file has ${body.count} rows; at most ${maxRows} are taken.`,
       ),
     );
-  dialect.decimal = decimalOf(delimiter, numberCells(body.rows));
+  dialect.decimal = told.decimal ?? decimalOf(delimiter, numberCells(body.rows));
   const columns = new Set(header.names.filter((n): n is string => n !== null));
   const rows =
     body.count > maxRows ? [] : body.rows.filter((r) => !body.broken.has(r.cells.get('name')?.trim() ?? ''));

@@ -11,7 +11,7 @@ import type { NormalisedFiling, NormalisedLine, Notice } from '../../shared/fili
 import { decodeText } from './decode-text';
 import type { Encoding } from './decode-text';
 import { readCsv } from './read-csv';
-import type { Dialect } from './sniff-dialect';
+import type { CorrectedDialect, Dialect } from './sniff-dialect';
 
 /** Largest file that is read, in bytes. */
 export const MAX_FILE_BYTES = 25 * 1024 * 1024;
@@ -25,6 +25,8 @@ export interface FileOptions extends Omit<ReadContext, 'written'> {
   maxRows?: number;
   /** Largest file, in bytes. */
   maxBytes?: number;
+  /** What somebody corrected of the dialect that was found. */
+  dialect?: CorrectedDialect;
 }
 
 export interface FilingFile {
@@ -50,7 +52,7 @@ export const DEFAULT_MAX_ROWS = 500;
  */
 export function formatOf(name: string, bytes: Uint8Array): FileFormat {
   if (/\.json$/i.test(name)) return 'json';
-  if (/\.(csv|tsv|txt)$/i.test(name)) return 'csv';
+  if (/\.(csv|tsv)$/i.test(name)) return 'csv';
   const start = new TextDecoder().decode(bytes.subarray(0, 4096)).trimStart();
   return start.startsWith('{') || start.startsWith('[') ? 'json' : 'csv';
 }
@@ -109,7 +111,10 @@ function dialectNotice(d: Dialect): Notice {
 }
 
 function readRows(text: string, encoding: Encoding, options: FileOptions): FilingFile {
-  const file = readCsv(text, encoding, { maxRows: options.maxRows ?? DEFAULT_MAX_ROWS });
+  const file = readCsv(text, encoding, {
+    maxRows: options.maxRows ?? DEFAULT_MAX_ROWS,
+    told: options.dialect ?? {},
+  });
   const notices = [...encodingNotice(encoding), dialectNotice(file.dialect)];
   const base = { format: 'csv', notices, dialect: file.dialect, rowCount: file.rowCount } as const;
   if (file.table.rows.length === 0)
@@ -167,7 +172,7 @@ export function readFilingFile(bytes: Uint8Array, name: string, options: FileOpt
       `The file is larger than is taken: ${most}.`,
     );
   }
-  const decoded = decodeText(bytes);
+  const decoded = decodeText(bytes, options.dialect?.encoding);
   if (!decoded.ok) return unusable(format, shown(name), 'a JSON or CSV file', decoded.message);
   if (format === 'csv') return readRows(decoded.text, decoded.encoding, options);
   return readJson(decoded.text, encodingNotice(decoded.encoding), options);

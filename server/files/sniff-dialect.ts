@@ -14,6 +14,9 @@ export interface Dialect {
   lineEnds: LineEnds;
 }
 
+/** What somebody says of a dialect against what was found; line ends are taken as they come. */
+export type CorrectedDialect = Partial<Omit<Dialect, 'lineEnds'>>;
+
 export const DELIMITERS: Readonly<Record<Delimiter, string>> = { comma: ',', semicolon: ';', tab: '\t' };
 
 /** Which line ends a text has. A text of one line counts as LF. */
@@ -32,10 +35,11 @@ export function normalised(text: string): { text: string; sep: string | null } {
   return m ? { text: lf.slice(m[0].length), sep: m[1] ?? null } : { text: lf, sep: null };
 }
 
-/** The text up to its first line end. */
+/** The text up to its first line end, as far as a header can reach. */
 export function firstLine(text: string): string {
-  const end = text.indexOf('\n');
-  return end < 0 ? text : text.slice(0, end);
+  const start = text.slice(0, 200_000);
+  const end = start.indexOf('\n');
+  return end < 0 ? start : start.slice(0, end);
 }
 
 /** The delimiter that cuts the header into the most columns that are known; comma when none does. */

@@ -132,7 +132,7 @@ export interface Position {
   sagM?: number;
   /** Subconductors in the bundle. Unit: none (count). */
   bundleCount?: number;
-  /** Side of the bundle's polygon. Unit: m. */
+  /** Side of the bundle's polygon; more than 0 from two subconductors on. Unit: m. */
   bundleSpacingM?: number;
 }
 

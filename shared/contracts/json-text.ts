@@ -17,6 +17,9 @@ export interface JsonText {
   faults: PointerFault[];
 }
 
+/** Entries of one list and names of one object: what is longer is no filing, and reading it would only take time. */
+const MOST = { entries: 50_000, names: 1000 };
+
 /** Thrown inside this file only: the text cannot be read past this place. */
 class Stop {
   constructor(
@@ -45,6 +48,7 @@ const ESCAPES: Readonly<Record<string, string>> = {
 
 class Reader {
   private at = 0;
+  private lineStarts: number[] | undefined;
   private readonly path: (string | number)[] = [];
   readonly faults: PointerFault[] = [];
   readonly written: Record<string, string> = {};
@@ -77,16 +81,10 @@ class Reader {
   }
 
   private value(): unknown {
-    switch (this.text[this.at]) {
-      case '{':
-        return this.nested(() => this.object());
-      case '[':
-        return this.nested(() => this.list());
-      case '"':
-        return this.string();
-      default:
-        return this.word();
-    }
+    const c = this.text[this.at];
+    if (c === '{') return this.nested(() => this.object());
+    if (c === '[') return this.nested(() => this.list());
+    return c === '"' ? this.string() : this.word();
   }
 
   private nested<T>(read: () => T): T {
@@ -99,6 +97,7 @@ class Reader {
 
   private object(): Record<string, unknown> {
     const out: Record<string, unknown> = {};
+    let count = 0;
     this.at += 1;
     this.blanks();
     if (this.text[this.at] === '}') {
@@ -117,6 +116,8 @@ class Reader {
       const value = this.value();
       this.keep(out, key, value);
       this.path.pop();
+      count += 1;
+      if (count > MOST.names) throw new Stop(`An object has more than ${MOST.names} names.`, this.at);
     } while (this.more('}'));
     return out;
   }
@@ -146,6 +147,7 @@ class Reader {
       this.path.push(out.length);
       out.push(this.value());
       this.path.pop();
+      if (out.length > MOST.entries) throw new Stop(`A list has more than ${MOST.entries} entries.`, this.at);
     } while (this.more(']'));
     return out;
   }
@@ -232,9 +234,11 @@ class Reader {
   }
 
   place(at: number): string {
-    const before = this.text.slice(0, at);
-    const line = before.split('\n').length;
-    return `line ${line}, column ${at - before.lastIndexOf('\n')}`;
+    // Counted once: a text full of faults would otherwise be walked for each of them.
+    this.lineStarts ??= [0, ...Array.from(this.text.matchAll(/\n/g), (m) => m.index + 1)];
+    let line = this.lineStarts.findIndex((start) => start > at);
+    if (line < 0) line = this.lineStarts.length;
+    return `line ${line}, column ${at - (this.lineStarts[line - 1] ?? 0) + 1}`;
   }
 }
 

@@ -129,8 +129,7 @@ export interface Notice {
     | 'base-default'
     | 'library-copied'
     | 'encoding-windows-1252'
-    | 'dialect'
-    | 'blank-rows';
+    | 'dialect';
   /** JSON Pointer of what it is about, where there is one. */
   pointer?: string;
   /** One sentence. */

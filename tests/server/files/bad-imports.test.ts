@@ -122,10 +122,25 @@ describe('form of the file', () => {
     ]);
   });
 
+  it('7: what the applicant says of the dialect holds against what was found', () => {
+    const points = csv({ x1: '0.4846' });
+    expect(cellFaults(points, { dialect: { delimiter: 'semicolon' } })[0]).toMatch(/is not known/);
+    const semicolons = inDialect(points, ';', '.');
+    expect(cellFaults(semicolons, { dialect: { decimal: 'comma' } })).toContain(
+      '2 x1: “0.4846” is not a number. Write it as 1234,5, with no thousands sign.',
+    );
+    const accents = readCsvFile(csv({ from: 'Østrø' }), { dialect: { encoding: 'windows-1252' } });
+    expect(accents.filing?.lines[0]?.from).toBe('Ã˜strÃ¸');
+    const latin = Uint8Array.from(csv({ from: 'Østrø' }), (c) => c.charCodeAt(0));
+    expect(cellFaults(latin, { dialect: { encoding: 'utf-8' } })).toEqual(['1 : The file is not UTF-8.']);
+  });
+
   it('8: Windows-1252 is taken with a notice, UTF-16 is not', () => {
-    const latin = Uint8Array.from(csv({ from: 'Østrø' }).replaceAll('–', '-'), (c) => c.charCodeAt(0));
+    // 0x96 is a dash and 0x80 the euro sign there; in Latin-1 both are control characters.
+    const text = csv({ from: 'Østrø', to: 'A\u0096B\u0080' }).replaceAll('–', '-');
+    const latin = Uint8Array.from(text, (c) => c.charCodeAt(0));
     const read = readCsvFile(latin);
-    expect(read.filing?.lines[0]?.from).toBe('Østrø');
+    expect(read.filing?.lines[0]).toMatchObject({ from: 'Østrø', to: 'A–B€' });
     expect(read.dialect?.encoding).toBe('windows-1252');
     expect(read.notices.map((n) => n.code)).toContain('encoding-windows-1252');
     const utf16 = Uint8Array.from(`\ufeff${csv({})}`, (c) => c.charCodeAt(0));
@@ -142,6 +157,9 @@ describe('form of the file', () => {
     expect(cellFaults(many, { maxRows: 501 })).toEqual([]);
     expect(cellFaults(`${HEADER}\n${'\n'.repeat(2_000_000)}x`)[0]).toContain('more than 500 rows');
     expect(cellFaults(csv({}), { maxBytes: 100 })[0]).toContain('larger than is taken');
+    expect(cellFaults(`${csv({})}${'x'.repeat(200_001)}`)).toEqual([
+      '3 : Row 3 is longer than 200000 characters.',
+    ]);
     expect(cellFaults(','.repeat(1_000_001))[0]).toContain('more than 1000 columns');
     for (const [start, words] of [
       ['PK\u0003\u0004', /Save it as CSV/],
@@ -290,6 +308,14 @@ describe('JSON files', () => {
     expect(jsonFaults('['.repeat(5000))[0]).toContain('nested more than 32');
     expect(jsonFaults(EXAMPLE_TEXT.replace('"transposed"', '"__proto__"'))[0]).toMatch(
       /^\/lines\/0\/__proto__: /,
+    );
+  });
+
+  it('23: longer than any filing, answered without reading it all', () => {
+    expect(jsonFaults(`{"lines":[${'1,'.repeat(5_000_000)}1]}`)[0]).toContain('more than 50000 entries');
+    expect(jsonFaults(`{"lines":[${'NaN,'.repeat(60_000)}1]}`).length).toBeGreaterThan(1000);
+    expect(jsonFaults(`{"lines":[{${'"a":1,'.repeat(100_000)}"b":1}]}`).at(-1)).toContain(
+      'more than 1000 names',
     );
   });
 

@@ -12,13 +12,13 @@ function textOf(json: unknown): string {
 
 describe('canonical JSON', () => {
   it('of RFC 8785, section 3.2.2: numbers and escapes', () => {
-    const value = {
-      numbers: [333333333.33333329, 1e30, 4.5, 2e-3, 0.000000000000000000000000001],
-      string: '€$\u000F\u000aA\'\u0042\u0022\u005c\\"/',
-      literals: [null, true, false],
-    };
-    expect(canonicalJson(value)).toBe(
-      '{"literals":[null,true,false],"numbers":[333333333.3333333,1e+30,4.5,0.002,1e-27],"string":"€$\\u000f\\nA\'B\\"\\\\\\\\\\"/"}',
+    const source = String.raw`{
+      "numbers": [333333333.33333329, 1E30, 4.50, 2e-3, 0.000000000000000000000000001],
+      "string": "\u20ac$\u000F\u000aA'\u0042\u0022\u005c\\\"\/",
+      "literals": [null, true, false]
+    }`;
+    expect(canonicalJson(JSON.parse(source))).toBe(
+      String.raw`{"literals":[null,true,false],"numbers":[333333333.3333333,1e+30,4.5,0.002,1e-27],"string":"€$\u000f\nA'B\"\\\\\"/"}`,
     );
   });
 
@@ -28,7 +28,7 @@ describe('canonical JSON', () => {
   });
 
   it('has no minus nought, and refuses what is no number', () => {
-    expect(canonicalJson([-0, undefined === undefined])).toBe('[0,true]');
+    expect(canonicalJson([-0, { a: undefined }])).toBe('[0,{}]');
     expect(() => canonicalJson(NaN)).toThrow();
   });
 });

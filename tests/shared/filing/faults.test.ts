@@ -67,6 +67,12 @@ const BREAKS: [name: string, change: (l: Line) => void, pointer: string, words: 
     /Bundle spacing is missing\. Give it in.m\./,
   ],
   [
+    'a bundle of nought',
+    (l) => (section(l).positions[2].bundleSpacingM = 0),
+    `${at}/positions/2/bundleSpacingM`,
+    /more than 0/,
+  ],
+  [
     'an unknown unit',
     (l) => (l['declared'][0].x1.unit = 'ohms/km'),
     '/lines/0/declared/0/x1/unit',
@@ -309,6 +315,11 @@ describe('each fault stands where it is to be mended', () => {
 
   it('and the example before it was broken has none', () => {
     expect(faultsOf(example())).toEqual([]);
+  });
+
+  it('takes a spacing of nought for a single conductor', () => {
+    const single = { bundleCount: 1, bundleSpacingM: 0 };
+    expect(faultsOf(changed((l) => Object.assign(section(l).positions[0], single)))).toEqual([]);
   });
 
   it('refuses a key that would be a prototype', () => {
