@@ -1,6 +1,6 @@
 import PgBoss from 'pg-boss';
-import { QUEUES } from '../database/queue-names';
-import type { QueueName } from '../database/queue-names';
+import { QUEUES } from '../integrations/queue-names';
+import type { QueueName } from '../integrations/queue-names';
 import type { Mailer } from '../integrations/mail';
 import type { Surroundings } from '../integrations/surroundings';
 import type { Logger } from '../logging/logger';
