@@ -5,7 +5,7 @@ import { RevisionTriangle } from '../../../components/ui/revision-triangle';
 import { Stamp } from '../../../components/ui/stamp';
 import { TitleBlock } from '../../../components/ui/title-block';
 import type { TitleBlockCell } from '../../../components/ui/title-block';
-import { connectionWords, dueWords, linesWords, voltagesWords } from '../model/words';
+import { besideTitle, dueWords, linesWords, voltagesWords } from '../model/words';
 
 function filedCell({ filedAt, filedBy }: Application): TitleBlockCell {
   if (!filedAt) return { label: 'Filed', value: 'not yet', span: 4 };
@@ -41,7 +41,7 @@ export function ApplicationTitleBlock({ application }: { application: Applicatio
         {
           label: 'Application',
           value: title,
-          aside: connectionWords(application),
+          aside: besideTitle(application),
           span: 8,
           lead: true,
           fold: 'name',

@@ -12,7 +12,7 @@ import type { Role } from '../../../lib/api/session';
 import { sortedBy } from '../../../lib/list-view';
 import { applicationPath } from '../../../lib/paths';
 import type { ApplicationFilter } from '../model/applications-list';
-import { connectionWords, voltagesWords } from '../model/words';
+import { besideTitle, voltagesWords } from '../model/words';
 
 const STATES = Object.entries(STATE_WORDS).map(([value, label]) => ({ value, label }));
 const GRADES = [
@@ -40,7 +40,7 @@ function Heads({ controls: { view, setSort }, role }: Omit<ApplicationsTableProp
       <HeadCell>Rev.</HeadCell>
       <HeadCell {...sorts('state')}>State</HeadCell>
       <HeadCell>Findings</HeadCell>
-      <HeadCell {...sorts('due')} colSpan={2}>
+      <HeadCell {...sorts('due')} colSpan={3}>
         Due
       </HeadCell>
     </Row>
@@ -98,7 +98,7 @@ function Filters({ controls, role }: Omit<ApplicationsTableProps, 'items'>) {
       <th role="cell" className="w-[132px]">
         <ApplicationFilterControl small name="grade" controls={controls} />
       </th>
-      <th role="cell" colSpan={2} />
+      <th role="cell" colSpan={3} />
     </Row>
   );
 }
@@ -125,10 +125,10 @@ function ApplicationRow({ item, role }: { item: ApplicationSummary; role: Role }
         <Link to={applicationPath(role, item.number)} className="link-ink font-semibold">
           {item.title}
         </Link>{' '}
-        <span className="font-normal text-ink-soft">{connectionWords(item)}</span>
+        <span className="font-normal text-ink-soft">{besideTitle(item)}</span>
       </RowHead>
       {role !== 'applicant' && <Cell fold="row">{item.applicant.name}</Cell>}
-      <Cell fold="hide">{item.lineCount > 0 ? voltagesWords(item.voltagesKv) : ''}</Cell>
+      <Cell fold="hide">{item.voltagesKv.length > 0 ? voltagesWords(item.voltagesKv) : ''}</Cell>
       <Cell number foldLabel="Lines">
         {item.lineCount}
       </Cell>
@@ -142,13 +142,15 @@ function ApplicationRow({ item, role }: { item: ApplicationSummary; role: Role }
         <Findings item={item} />
       </Cell>
       <Cell oneLine>{item.dueAt ? formatDate(item.dueAt) : ''}</Cell>
-      <Cell oneLine fold="end">
-        {item.window && left !== undefined && (
-          <span className="inline-flex items-center gap-3">
-            <WindowMeter used={item.window.used} total={item.window.total} />
-            <span className={left < 0 ? 'font-semibold text-vermilion' : undefined}>{leftInTable(left)}</span>
-          </span>
-        )}
+      <Cell fold="hide">
+        {item.window && <WindowMeter used={item.window.used} total={item.window.total} />}
+      </Cell>
+      <Cell
+        oneLine
+        fold="end"
+        className={left !== undefined && left < 0 ? 'font-semibold text-vermilion' : undefined}
+      >
+        {left === undefined ? '' : leftInTable(left)}
       </Cell>
     </Row>
   );

@@ -3,9 +3,10 @@ import type { Application, Discrepancy, DiscrepancyEntry } from '#shared/contrac
 import { formatDay } from '#shared/format/dates';
 import { Disclosure } from '../../../components/ui/disclosure';
 import { GradeLabel } from '../../../components/ui/grade-mark';
+import { mattersOf } from '../model/matters';
 import { hasDraft } from '../model/words';
 import { AnswerForm } from './answer-form';
-import { CauseOffer } from './cause-offer';
+import { CauseOffer, PlainFindings } from './cause-offer';
 import { Thread } from './thread';
 
 /** The owner's last words that are still to be answered. */
@@ -35,6 +36,8 @@ export function DiscrepancyPart({ application, discrepancy, attach, files }: Dis
   const asked = askedIn(discrepancy);
   const answered = discrepancy.state === 'answered';
   const open = hasDraft(application);
+  const matters = mattersOf(discrepancy.findings);
+  const explained = matters.filter((m) => m.causes.length > 0);
   const lastAnswer = discrepancy.entries.filter((e) => e.kind === 'answered').at(-1);
   return (
     <div className="sheet-cut px-4 py-5 field:px-6" id={`D-${discrepancy.number}`}>
@@ -51,9 +54,10 @@ export function DiscrepancyPart({ application, discrepancy, attach, files }: Dis
       {discrepancy.wanted && (
         <p className="mt-1 text-table text-ink-soft">{`What would settle it: ${discrepancy.wanted}`}</p>
       )}
-      {discrepancy.findings.map((finding) => (
-        <CauseOffer key={finding.fingerprint} number={application.number} finding={finding} open={open} />
+      {explained.map((matter) => (
+        <CauseOffer key={matter.key} number={application.number} matter={matter} open={open} />
       ))}
+      <PlainFindings matters={matters.filter((m) => m.causes.length === 0)} />
       {files}
       {answered && lastAnswer && (
         <p className="mt-3 max-w-prose border-l-2 border-copper pl-3">

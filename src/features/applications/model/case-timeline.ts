@@ -55,8 +55,11 @@ const DUE_WORDS = {
 } as const;
 
 /** The stretches of a case: whose turn it was and for how many working days, and what is due. */
-export function caseTimeline(application: Application, now: number): TimelineInput {
+export function caseTimeline(application: Application, today: number): TimelineInput {
   const { windows, window, state } = application;
+  // A closed case ends with its last step: nothing has happened since.
+  const over = windows.at(-1)?.closedAt ?? application.updatedAt;
+  const now = isOpen(state) || state === 'draft' ? today : at(over);
   const stretches = windows.map((w) => stretchOf(w, now));
   const first = stretches[0]?.from ?? now;
   const all = [draftStretch(application, first, now), ...stretches];

@@ -23,6 +23,8 @@ function returnedSentence(application: Application, discrepancies: readonly Disc
   const what = counted(asked, 'discrepancy', 'discrepancies');
   const head = `${owner.name} returned revision ${revision ?? ''}${on} with ${what}.`;
   if (left === 0) return `${head} All are answered: file revision ${nextRevision}.`;
+  if (left < asked)
+    return `${head} ${left === 1 ? 'One is' : `${left} are`} left to answer, then file revision ${nextRevision}.`;
   return `${head} Answer ${left === 1 ? 'it' : left === 2 ? 'both' : `the ${left}`}, then file revision ${nextRevision}.`;
 }
 

@@ -9,12 +9,17 @@ export const CONNECTION_KINDS = [
 ] as const;
 
 type Place = Pick<ApplicationSummary, 'capacityMw' | 'pointOfConnection'>;
+type Titled = Place & Pick<ApplicationSummary, 'title'>;
 
 /** "480 MW at Sarn", or "at Sarn" where no capacity is asked for. */
 export function connectionWords({ capacityMw, pointOfConnection }: Place): string {
   if (capacityMw === null) return `at ${pointOfConnection}`;
   return `${plainQuantity(capacityMw, 'MW')} at ${pointOfConnection}`;
 }
+
+/** What is to be said behind a title: nothing where the title names the place itself. */
+export const besideTitle = (application: Titled): string | undefined =>
+  application.title.includes(application.pointOfConnection) ? undefined : connectionWords(application);
 
 /** "5, together 153.9 km". */
 export function linesWords(lineCount: number, totalLengthKm: number): string {

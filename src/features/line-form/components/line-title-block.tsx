@@ -19,10 +19,11 @@ interface LineTitleBlockProps {
 export function LineTitleBlock({ application, lineKey, count, form }: LineTitleBlockProps) {
   const voltage = readNumber(form.nominalVoltageKv.text);
   const { capacityMw, pointOfConnection } = application;
-  const connection =
+  const place =
     capacityMw === null
       ? `at ${pointOfConnection}`
       : `${plainQuantity(capacityMw, 'MW')} at ${pointOfConnection}`;
+  const connection = application.title.includes(pointOfConnection) ? undefined : place;
   return (
     <TitleBlock
       label="Title block"

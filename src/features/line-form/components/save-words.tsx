@@ -1,4 +1,4 @@
-import { formatTime } from '#shared/format/dates';
+import { formatDate, formatInstant, formatTime } from '#shared/format/dates';
 import type { SaveState } from '../model/autosaver';
 
 /** Where saving stands, in a few words: "Saved at 10:42". */
@@ -6,10 +6,15 @@ export function SaveWords({ state }: { state: SaveState }) {
   return <span aria-live="polite">{words(state)}</span>;
 }
 
+function savedWords(at: Date): string {
+  const today = formatDate(at) === formatDate(new Date());
+  return today ? `Saved at ${formatTime(at)}.` : `Saved on ${formatInstant(at)}.`;
+}
+
 function words(state: SaveState): string {
   switch (state.kind) {
     case 'saved':
-      return state.at ? `Saved at ${formatTime(state.at)}.` : 'Not saved yet.';
+      return state.at ? savedWords(state.at) : 'Not saved yet.';
     case 'waiting':
     case 'saving':
       return 'Saving.';

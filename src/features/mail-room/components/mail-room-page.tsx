@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import { Link } from 'react-router-dom';
 import type { ReceivedMail } from '#shared/contracts/api.generated';
 import { formatInstant } from '#shared/format/dates';
 import { EmptyState } from '../../../components/feedback/empty-state';
@@ -34,6 +35,19 @@ function MailList({ mails, shown, onShow }: MailListProps) {
   );
 }
 
+/** The words of a mail; addresses of this product become links. */
+function MailBody({ text }: { text: string }) {
+  return text.split(/(https?:\/\/\S+)/).map((part, i) => {
+    const ours = part.startsWith(`${window.location.origin}/`);
+    if (!ours) return part;
+    return (
+      <Link key={i} className="link" to={part.slice(window.location.origin.length)}>
+        {part}
+      </Link>
+    );
+  });
+}
+
 function MailSheet({ mail }: { mail: ReceivedMail }) {
   return (
     <Sheet main title={mail.subject || 'no subject'} aside={formatInstant(mail.receivedAt)}>
@@ -44,7 +58,9 @@ function MailSheet({ mail }: { mail: ReceivedMail }) {
           <dt className="text-ink-soft">To</dt>
           <dd className="[overflow-wrap:anywhere]">{mail.to}</dd>
         </dl>
-        <p className="max-w-prose whitespace-pre-wrap [overflow-wrap:anywhere]">{mail.body}</p>
+        <p className="max-w-prose whitespace-pre-wrap [overflow-wrap:anywhere]">
+          <MailBody text={mail.body} />
+        </p>
         {mail.attachments.length > 0 && (
           <ul className="mt-4 border-t border-rule pt-3 text-table">
             {mail.attachments.map((file) => (
@@ -73,7 +89,9 @@ export function MailRoomPage() {
           <Sheet side title="Mails" aside={String(mails.length)} className="max-h-[80vh] overflow-y-auto">
             <MailList mails={mails} shown={shown.id} onShow={setChosen} />
           </Sheet>
-          <MailSheet mail={shown} />
+          <div className="min-w-0">
+            <MailSheet mail={shown} />
+          </div>
         </div>
       ) : (
         <Sheet main label="Mails">
