@@ -21,11 +21,13 @@ export interface CellFault {
   message: string;
 }
 
+/** A fault of whatever was sent: of JSON by pointer, of a table by row and column. */
 export type Fault = PointerFault | CellFault;
 
 /** Faults that are listed of one thing that was sent; beyond it one last fault says that there are more. */
 export const MAX_FAULTS = 5000;
 
+/** Characters of a text that a fault repeats: enough to find it again, too few to fill a page. */
 const SHOWN_LENGTH = 80;
 
 /**

@@ -1,5 +1,6 @@
 /** How the fields of the formats are called in a sentence, and the unit that a number of theirs is in. */
 
+/** Words for one field. */
 export interface FieldWords {
   /** Name of the field at the head of a sentence. */
   label: string;

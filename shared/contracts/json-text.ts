@@ -28,8 +28,10 @@ class Stop {
   ) {}
 }
 
+/** A number after RFC 8259, and whatever stands where a value should: words, numbers in other notations. */
 const NUMBER = /-?(?:0|[1-9]\d*)(?:\.\d+)?(?:[eE][+-]?\d+)?/y;
 const WORD = /[+-]?[\w.#]+/y;
+/** A map and not an object: a text may hold any word, also one that objects inherit. */
 const LITERALS = new Map<string, boolean | null>([
   ['true', true],
   ['false', false],
@@ -46,6 +48,7 @@ const ESCAPES: Readonly<Record<string, string>> = {
   t: '\t',
 };
 
+/** One pass over the text, with the path to where it is. */
 class Reader {
   private at = 0;
   private lineStarts: number[] | undefined;
@@ -55,6 +58,7 @@ class Reader {
 
   constructor(private readonly text: string) {}
 
+  /** The value of the whole text. */
   whole(): unknown {
     this.blanks();
     if (this.at >= this.text.length) throw new Stop('There is nothing in it.', this.at);
@@ -64,6 +68,7 @@ class Reader {
     return value;
   }
 
+  /** JSON Pointer of where reading stands. */
   pointer(): string {
     return this.path.map((p) => `/${pointerToken(p)}`).join('');
   }
@@ -87,6 +92,7 @@ class Reader {
     return c === '"' ? this.string() : this.word();
   }
 
+  /** Reads what nests, unless it nests too deeply: the call stack is the reader's own. */
   private nested<T>(read: () => T): T {
     if (this.path.length >= MAX_DEPTH) {
       this.fault(tooDeep(this.pointer()));
@@ -122,6 +128,7 @@ class Reader {
     return out;
   }
 
+  /** Puts a member into its object; a name that was there before, or may not be there, is a fault. */
   private keep(out: Record<string, unknown>, key: string, value: unknown): void {
     if (key === FORBIDDEN_KEY) this.fault(forbiddenKey(this.pointer()));
     else if (Object.hasOwn(out, key))
@@ -197,6 +204,7 @@ class Reader {
     return [char, i + 2];
   }
 
+  /** A number, true, false or null. NaN and Infinity are told and read as null, so that reading can go on. */
   private word(): unknown {
     WORD.lastIndex = this.at;
     const word = WORD.exec(this.text)?.[0] ?? '';
@@ -215,6 +223,7 @@ class Reader {
     return null;
   }
 
+  /** A number, its digits kept where they are not its shortest form. */
   private number(digits: string): number {
     const value = Number(digits);
     const vanished = value === 0 && /[1-9]/.test(digits.replace(/e.*$/i, ''));
@@ -223,6 +232,7 @@ class Reader {
     return Number.isFinite(value) ? value : 0;
   }
 
+  /** What is wanted and what is there, with a hint for the slips that are seen most. */
   private instead(wanted: string, found = this.text[this.at] ?? ''): string {
     const hint = found.startsWith('/')
       ? ' JSON has no comments.'
@@ -233,6 +243,7 @@ class Reader {
     return `Here ${wanted} is wanted, ${found === '' ? 'and the text ends' : `and ${inWords(found)} is there`}.${hint}${isNumber}`;
   }
 
+  /** Line and column of a place, both from 1. */
   place(at: number): string {
     // Counted once: a text full of faults would otherwise be walked for each of them.
     this.lineStarts ??= [0, ...Array.from(this.text.matchAll(/\n/g), (m) => m.index + 1)];

@@ -22,6 +22,7 @@ interface Case {
   data: unknown;
 }
 
+/** Types of JSON Schema in words. */
 const TYPE_WORDS: Readonly<Record<string, string>> = {
   number: 'a number',
   integer: 'a whole number',
@@ -47,11 +48,13 @@ const PLURAL = new Set([
 /** Wrappers that only say that something inside them is wrong. */
 const NOISE = new Set(['if', 'anyOf', 'oneOf', 'allOf', 'propertyNames', '$ref']);
 
+/** The plainest wish: what must be there, and what is. */
 const must = (c: Case, expected: string): Wish => ({
   expected,
   message: `${c.label} must be ${expected}; ${inWords(c.value)} is there.`,
 });
 
+/** Comparisons of Ajv's limit keywords in words. */
 const limitWords: Readonly<Record<string, string>> = {
   '>': 'more than',
   '>=': 'at least',
@@ -59,11 +62,13 @@ const limitWords: Readonly<Record<string, string>> = {
   '<=': 'at most',
 };
 
+/** A number beyond a limit of its range. */
 function limit(c: Case): Wish {
   const words = limitWords[String(c.params['comparison'])] ?? '';
   return must(c, `${words} ${numberInWords(Number(c.params['limit']))}${c.unit}`);
 }
 
+/** A list or an object with too few or too many in it. */
 const count = (what: string, words: string) => (c: Case) => {
   const n = Number(c.params['limit']);
   return {
@@ -72,6 +77,7 @@ const count = (what: string, words: string) => (c: Case) => {
   };
 };
 
+/** A value that is none of a closed list; the nearest of the list are named. */
 function choice(c: Case): Wish {
   const allowed = (c.params['allowedValues'] as unknown[]) ?? [];
   const list = allowed.map((v) => (typeof v === 'number' ? numberInWords(v) : String(v))).join(', ');
@@ -82,6 +88,7 @@ function choice(c: Case): Wish {
   };
 }
 
+/** A value of another type. A number in quotes is the slip that is seen most, and gets its own hint. */
 function typeWish(c: Case): Wish {
   const types = [c.params['type']].flat().map((t) => TYPE_WORDS[String(t)] ?? String(t));
   const expected = types.join(' or ');
@@ -90,6 +97,7 @@ function typeWish(c: Case): Wish {
   return { ...must(c, expected + (c.unit ? ` in${c.unit}` : '')), message: must(c, expected).message + hint };
 }
 
+/** A field that is not there, with the unit that it is wanted in. */
 function missing(c: Case): Wish {
   const named = c.unit ? ` Give it in${c.unit}.` : '';
   return {
@@ -98,6 +106,7 @@ function missing(c: Case): Wish {
   };
 }
 
+/** A field that the format does not have. */
 function unknownField(c: Case): Wish {
   const name = String(c.params['additionalProperty']);
   return {
@@ -132,6 +141,7 @@ function misplaced(c: Case): Wish {
   return { expected, message: `${c.label} cannot stand here.` };
 }
 
+/** What each keyword of a schema wants; a keyword that is not here falls back on Ajv's own words. */
 const WISHES: Readonly<Record<string, (c: Case) => Wish>> = {
   type: typeWish,
   required: missing,
@@ -183,6 +193,7 @@ function placeOf(e: ErrorObject): string {
   return typeof name === 'string' ? `${e.instancePath}/${pointerToken(name)}` : e.instancePath;
 }
 
+/** One error of Ajv as one fault. */
 function toFault(e: ErrorObject, data: unknown): PointerFault {
   const pointer = placeOf(e);
   const tokens = pointerTokens(pointer);

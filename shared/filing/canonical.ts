@@ -47,6 +47,7 @@ function inOrder(positions: readonly Position[], conductors: Readonly<Record<str
   return ranked.map((r) => r.value);
 }
 
+/** A section: geometry with its data in place, a cable by its values in SI. */
 function section(s: Section, normalised: NormalisedSection | undefined): Record<string, unknown> {
   const { conductors, positions, perLength: _perLength, ...rest } = s;
   if (normalised?.kind === 'cable') return { ...rest, perLength: normalised.input.perLength };
@@ -54,6 +55,7 @@ function section(s: Section, normalised: NormalisedSection | undefined): Record<
   return { ...rest, positions: inOrder(positions, conductors) };
 }
 
+/** A line as it is hashed: declared values in SI and in the order of their circuits. */
 function canonicalLine(line: NormalisedLine): Record<string, unknown> {
   const filed: FilingLine = line.sheet.line;
   const { sections, declared: _declared, declaredMutual: _mutual, ...rest } = filed;

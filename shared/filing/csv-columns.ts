@@ -19,11 +19,13 @@ export interface CsvColumn {
   alias?: string;
 }
 
+/** A column as it is listed below; its scope follows from the list. */
 type Row = readonly [name: string, kind: CellKind, meaning: string];
 
 const columns = (scope: CsvColumn['scope'], rows: readonly Row[]): CsvColumn[] =>
   rows.map(([name, kind, meaning]) => ({ name, kind, meaning, scope }));
 
+/** The six declared values of a circuit, and the three of a coupling. */
 const SIX = ['r1', 'x1', 'b1', 'r0', 'x0', 'b0'] as const;
 const COUPLING = ['r0m', 'x0m', 'b0m'] as const;
 
@@ -66,6 +68,7 @@ export const CSV_POSITION_FIELDS = [
   ['sag_m', 'sagM', 'sag at mid-span, m'],
 ] as const;
 
+/** Columns of a conductor: its name and each of its data. */
 function conductorColumns(prefix: string, who: string): CsvColumn[] {
   const fields = CSV_CONDUCTOR_FIELDS.map(([end, , kind, meaning]): Row => [
     `${prefix}_${end}`,
@@ -80,6 +83,7 @@ function conductorColumns(prefix: string, who: string): CsvColumn[] {
   );
 }
 
+/** Columns of a place on the structure. */
 function positionColumns(place: string, who: string): CsvColumn[] {
   return columns(
     'section',
@@ -91,6 +95,7 @@ const phaseColumns = CSV_CIRCUITS.flatMap(({ circuit, prefix }) =>
   ['a', 'b', 'c'].flatMap((p) => positionColumns(`${prefix}${p}`, `circuit ${circuit}, phase ${p}`)),
 );
 
+/** Columns of what is declared of a circuit. */
 function declaredColumns(prefix: string, circuit: number): CsvColumn[] {
   const who = `circuit ${circuit}`;
   return columns('line', [
@@ -111,6 +116,7 @@ function declaredColumns(prefix: string, circuit: number): CsvColumn[] {
   ]);
 }
 
+/** Columns of a cable's values for a circuit. */
 function cableColumns(prefix: string, circuit: number): CsvColumn[] {
   const who = `cable section, circuit ${circuit}`;
   return columns('section', [

@@ -28,6 +28,7 @@ interface Quantity {
 
 const SIX = ['r1', 'x1', 'b1', 'r0', 'x0', 'b0'] as const;
 const COUPLING = ['r0m', 'x0m', 'b0m'] as const;
+/** Susceptances have a unit column of their own. */
 const isSusceptance = (key: string) => key.startsWith('b');
 
 /** Writes one line; what does not fit goes to `reasons`. */
@@ -45,6 +46,7 @@ class LineWriter {
     row[column] = (typeof value === 'number' && this.sheet.written[pointer]) || String(value);
   }
 
+  /** A conductor's name and data in the columns of its prefix. */
   private conductor(row: CsvRowTexts, prefix: string, c: Conductor, pointer: string): void {
     this.put(row, prefix, c.name);
     for (const [end, field] of CSV_CONDUCTOR_FIELDS)
@@ -58,11 +60,13 @@ class LineWriter {
     return values[0];
   }
 
+  /** Offset, height and sag of one place. */
   private position(row: CsvRowTexts, place: string, p: Position, pointer: string): void {
     for (const [end, field] of CSV_POSITION_FIELDS)
       this.put(row, `${place}_${end}`, p[field], `${pointer}/${field}`);
   }
 
+  /** Conductors, bundle and places of an overhead section. */
   private geometry(row: CsvRowTexts, s: Section, index: number): void {
     const { conductors, positions } = s;
     if (!conductors || !positions) return;
@@ -124,6 +128,7 @@ class LineWriter {
     }
   }
 
+  /** A cable's values, in one set or one a circuit. */
   private cable(row: CsvRowTexts, s: Section, index: number): void {
     const at = `/sections/${index}/perLength`;
     const write = (values: object, prefix: string, base: string) => {
@@ -140,6 +145,7 @@ class LineWriter {
       this.reasons.push(`section ${index + 1} lists its cable’s values for a single circuit`);
   }
 
+  /** What is declared of the circuits and their coupling: on the line's first row. */
   private declared(row: CsvRowTexts): void {
     const line = this.line;
     line.declared.forEach((d, i) => {
@@ -171,6 +177,7 @@ class LineWriter {
     });
   }
 
+  /** The line's rows, one a section. */
   rows(): CsvRowTexts[] {
     const { name, from, to, nominalVoltageKv, frequencyHz, transposed, sections } = this.line;
     return sections.map((s, i) => {

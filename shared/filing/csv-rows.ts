@@ -6,8 +6,10 @@ import { CSV_COLUMNS } from './csv-columns';
 import { sectionFromRow } from './csv-section';
 import { declaredCoupling, declaredEntries } from './csv-values';
 
+/** Part of a filing that is still being put together. */
 type Draft = Record<string, unknown>;
 
+/** Plain fields of a line: column → field. */
 const LINE_FIELDS = [
   ['name', 'name'],
   ['from', 'from'],
@@ -88,6 +90,7 @@ function repeats(cells: CellReader, rows: readonly CsvRow[]): void {
   }
 }
 
+/** One line from its rows. */
 function line(cells: CellReader, rows: readonly CsvRow[], at: string): Draft {
   const first = rows[0];
   if (!first) return {};

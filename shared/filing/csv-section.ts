@@ -3,10 +3,12 @@ import type { CellReader, CsvRow } from './csv-cells';
 import { CSV_CIRCUITS, CSV_CONDUCTOR_FIELDS, CSV_GROUND_WIRES, CSV_POSITION_FIELDS } from './csv-columns';
 import { cableValues } from './csv-values';
 
+/** Part of a filing that is still being put together. */
 type Draft = Record<string, unknown>;
 
 const PHASES = ['a', 'b', 'c'] as const;
 
+/** Plain fields of a section: column → field. */
 const SECTION_FIELDS = [
   ['kind', 'kind'],
   ['length_km', 'lengthKm'],
@@ -69,6 +71,7 @@ function position(
   return out;
 }
 
+/** The phases of both circuits. A circuit with some of its phases is told which it lacks, at their own columns. */
 function phasePositions(cells: CellReader, row: CsvRow, at: string, out: Draft[]): void {
   for (const { circuit, prefix } of CSV_CIRCUITS) {
     const lacking: string[] = [];
@@ -95,6 +98,7 @@ function phasePositions(cells: CellReader, row: CsvRow, at: string, out: Draft[]
   }
 }
 
+/** The ground wires, as many as have a place. */
 function groundPositions(cells: CellReader, row: CsvRow, at: string, out: Draft[]): void {
   for (const n of CSV_GROUND_WIRES) {
     const base = `${at}/positions/${out.length}`;

@@ -4,6 +4,7 @@ import type { CellReader, CsvRow } from './csv-cells';
 import { CSV_CIRCUITS, CSV_RATINGS } from './csv-columns';
 import { DECLARED_KINDS } from './defaults';
 
+/** Part of a filing that is still being put together. */
 type Draft = Record<string, unknown>;
 
 const SIX = ['r1', 'x1', 'b1', 'r0', 'x0', 'b0'] as const;
@@ -53,8 +54,10 @@ function quantity(g: Group, key: string, target: Draft, base: string): void {
   target[key] = out;
 }
 
+/** Columns of the unit that a row's values have in common. */
 const units = (susceptance: boolean) => (susceptance ? ['susceptance_unit'] : ['impedance_unit']);
 
+/** The seasonal ratings, as many as have something in their columns. */
 function ratings(cells: CellReader, row: CsvRow, prefix: string, base: string): Draft[] {
   const out: Draft[] = [];
   for (const n of CSV_RATINGS) {
@@ -70,6 +73,7 @@ function ratings(cells: CellReader, row: CsvRow, prefix: string, base: string): 
   return out;
 }
 
+/** How the values were come by; nothing where its columns are empty. */
 function basis(cells: CellReader, row: CsvRow, prefix: string, base: string): Draft | undefined {
   const ends = ['kind', 'status', 'engineer', 'date'] as const;
   if (

@@ -18,6 +18,7 @@ export interface DeclaredContext {
   written: WrittenDigits;
 }
 
+/** A declared value in whatever unit. */
 interface Quantity {
   value: number;
   unit: string;
@@ -28,6 +29,7 @@ interface Quantity {
 /** Largest value in SI that is reckoned with; beyond it sums of squares would overflow. */
 const MAX_SI = 1e100;
 
+/** One value in SI; null when it is beyond reckoning. */
 function convert(key: string, q: Quantity, pointer: string, c: DeclaredContext): DeclaredValue | null {
   const kind = DECLARED_KINDS[key];
   // pu and % carry their base once the defaults are filled in.

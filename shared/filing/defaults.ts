@@ -42,6 +42,7 @@ export interface Filled {
   notices: Notice[];
 }
 
+/** A declared value in whatever unit. */
 interface Quantity {
   value: number;
   unit: string;
@@ -49,16 +50,19 @@ interface Quantity {
   baseKv?: number;
 }
 
+/** A conductor's own defaults: aluminium's coefficient, a solid wire for a tube. */
 function conductor(c: Conductor): Conductor {
   const tube = c.model === 'tube' ? { coreDiameterMm: 0 } : {};
   return { ...tube, temperatureCoefficientPerK: DEFAULTS.temperatureCoefficientPerK, ...c };
 }
 
+/** A position's defaults: no sag, one conductor. */
 function position(p: Position): Position {
   const sag = { sagM: DEFAULTS.sagM };
   return p.groundWire ? { ...sag, ...p } : { ...sag, bundleCount: DEFAULTS.bundleCount, ...p };
 }
 
+/** Fills in one line and remembers what it took from the owner's settings. */
 class Filler {
   readonly assumed: string[] = [];
   readonly notices: Notice[] = [];
@@ -68,11 +72,13 @@ class Filler {
     private readonly owner: OwnerDefaults,
   ) {}
 
+  /** Notes that a value is the owner's and not the applicant's. */
   private assume(pointer: string, code: Notice['code'], message: string): void {
     this.assumed.push(pointer);
     this.notices.push({ code, pointer, message });
   }
 
+  /** A section with its defaults; a cable has none but the base of its values. */
   section(s: Section, at: string): Section {
     if (s.kind === 'cable') return { ...s, perLength: this.cable(s.perLength, `${at}/perLength`) };
     const filled: Section = {
@@ -102,6 +108,7 @@ class Filler {
     return Object.fromEntries(rows) as T;
   }
 
+  /** A value with its base, where its unit stands on one. */
   private quantity(q: Quantity, kind: QuantityKind, at: string): Quantity {
     if (!isOnBase(kind, q.unit)) return q;
     const filled = { baseMva: this.owner.baseMva, baseKv: this.line.nominalVoltageKv, ...q };
@@ -116,6 +123,7 @@ class Filler {
     return filled;
   }
 
+  /** A cable's values, one set or one a circuit. */
   private cable(values: Section['perLength'], at: string): Section['perLength'] {
     if (Array.isArray(values)) return values.map((v, i) => this.values(v, `${at}/${i}`));
     return values && this.values(values, at);

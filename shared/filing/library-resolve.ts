@@ -25,10 +25,12 @@ function indexOf(library: ConductorLibrary): Map<string, LibraryConductor> {
   return index;
 }
 
+/** Names that a filing may use: rows that lack data are no help as a suggestion. */
 function choosableNames(library: ConductorLibrary): string[] {
   return library.conductors.filter(isChoosable).map((c) => c.name);
 }
 
+/** The fault of a name that the library does not have, with the nearest that it has. */
 function unknown(name: string, pointer: string, library: ConductorLibrary): PointerFault {
   const near = nearestNames(name, choosableNames(library));
   const hint = near.length ? ` The nearest are: ${near.join(', ')}.` : ' Give its data instead.';
@@ -43,6 +45,7 @@ function unknown(name: string, pointer: string, library: ConductorLibrary): Poin
   };
 }
 
+/** The fault of a row that lacks what the model needs. */
 function incomplete(row: LibraryConductor, pointer: string): PointerFault {
   const lacks = handbookLacks(row).join(' and ');
   return {

@@ -27,6 +27,7 @@ import type {
   WrittenDigits,
 } from './types';
 
+/** The values of a coupling, in the order in which they are always listed. */
 const MUTUAL_KEYS = ['r0m', 'x0m', 'b0m'] as const;
 
 /** What a line is normalised with. */
@@ -50,6 +51,7 @@ function conductorData(conductors: Readonly<Record<string, Conductor>>): Record<
   return Object.fromEntries(rows);
 }
 
+/** A position as the engine takes it: what the schema leaves open is filled in, a single conductor has no spacing. */
 function enginePosition(
   p: Position,
   conductors: Readonly<Record<string, ConductorData>>,
@@ -73,6 +75,7 @@ function enginePosition(
   };
 }
 
+/** Normalises one line; the faults that it meets are of values beyond reckoning only. */
 class LineNormaliser {
   readonly faults: PointerFault[] = [];
   private readonly circuits: number[];
@@ -86,6 +89,7 @@ class LineNormaliser {
     this.lengthKm = line.sections.reduce((sum, s) => sum + s.lengthKm, 0);
   }
 
+  /** What declared values are converted with, whole-line ones over the given length in km. */
   private values(lengthKm: number): DeclaredContext {
     const { frequencyHz, nominalVoltageKv } = this.line;
     const { pointer, written } = this.context;
@@ -109,6 +113,7 @@ class LineNormaliser {
     });
   }
 
+  /** A section by its kind: cable, without geometry, or overhead with it. */
   private section(s: Section, index: number): NormalisedSection {
     const pointer = `${this.context.pointer}/sections/${index}`;
     const { lengthKm } = s;
@@ -138,6 +143,7 @@ class LineNormaliser {
     };
   }
 
+  /** A declared circuit with its values in SI. */
   private circuit(d: DeclaredCircuit, index: number): NormalisedCircuit {
     const pointer = `${this.context.pointer}/declared/${index}`;
     const { circuit, circuitId, ratingA, maxTemperatureC, ratings, basis } = d;
@@ -153,6 +159,7 @@ class LineNormaliser {
     };
   }
 
+  /** The declared coupling, its circuits in ascending order: they have no direction. */
   private mutual(): NormalisedMutual[] {
     return (this.line.declaredMutual ?? []).map((m, i) => {
       const pointer = `${this.context.pointer}/declaredMutual/${i}`;
@@ -165,6 +172,7 @@ class LineNormaliser {
     });
   }
 
+  /** The whole line. The engine gets it only when no section owes its geometry. */
   whole(): NormalisedLine {
     const { name, from, to, nominalVoltageKv, frequencyHz, transposed, sections, declared } = this.line;
     const normalised = sections.map((s, i) => this.section(s, i));

@@ -6,6 +6,7 @@ import type { ConductorLibrary } from '../library/types';
 import { libraryFaults } from './library-resolve';
 import { sectionRuleFaults } from './line-rules';
 
+/** A JSON object and no list. */
 const isObject = (value: unknown): value is Record<string, unknown> =>
   typeof value === 'object' && value !== null && !Array.isArray(value);
 
@@ -14,6 +15,7 @@ function holds(pointer: string, faults: readonly PointerFault[]): boolean {
   return !faults.some((f) => f.pointer === pointer || f.pointer.startsWith(`${pointer}/`));
 }
 
+/** Library names of a section, each looked up whatever else is wrong. */
 function conductorFaults(
   section: Record<string, unknown>,
   at: string,
@@ -31,6 +33,7 @@ function conductorFaults(
   });
 }
 
+/** Phases and conductors of a section's positions, when each of them says what it is. */
 function geometryFaults(
   section: Record<string, unknown>,
   at: string,

@@ -41,6 +41,7 @@ export type ReadFiling =
 export type ReadLine =
   { ok: true; line: NormalisedLine; notices: Notice[] } | { ok: false; faults: PointerFault[] };
 
+/** Pointers from the line turned into pointers from the filing. */
 const moved = <T extends { pointer?: string }>(items: readonly T[], by: string): T[] =>
   items.map((item) => ({ ...item, pointer: `${by}${item.pointer ?? ''}` }));
 
@@ -99,6 +100,7 @@ function frameFaults(json: unknown): PointerFault[] {
 /** Lines in one filing. */
 const MAX_LINES = 20_000;
 
+/** The fault of a filing with more lines than are read. */
 function tooMany(count: number): PointerFault {
   return {
     pointer: '/lines',

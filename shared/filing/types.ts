@@ -56,6 +56,7 @@ export interface NormalisedMutual {
   declared: Partial<Record<MutualKey, DeclaredValue>>;
 }
 
+/** What every section has. */
 interface SectionBase {
   /** JSON Pointer of the section. */
   pointer: string;
@@ -84,6 +85,7 @@ export interface NormalisedCable extends SectionBase {
   input: CableSection;
 }
 
+/** A section of whatever kind; `kind` tells them apart. */
 export type NormalisedSection = NormalisedOverhead | NormalisedGeometryMissing | NormalisedCable;
 
 /** One line of a filing that has been read. */
@@ -124,12 +126,7 @@ export interface LineSheet {
 
 /** Something assumed or done in reading that is worth knowing; it is no fault. */
 export interface Notice {
-  code:
-    | 'earth-resistivity-default'
-    | 'base-default'
-    | 'library-copied'
-    | 'encoding-windows-1252'
-    | 'dialect';
+  code: 'earth-resistivity-default' | 'base-default' | 'library-copied' | 'encoding-windows-1252' | 'dialect';
   /** JSON Pointer of what it is about, where there is one. */
   pointer?: string;
   /** One sentence. */
