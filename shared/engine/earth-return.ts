@@ -6,7 +6,7 @@ import { MU_0 } from './constants';
  *
  * Left out is the displacement current in the earth, which is fair while ωε ≪ 1/ρ: with ε_r = 10 the neglected
  * share ωερ is 1 % at f = 18 MHz ÷ (ρ/Ωm) — 180 kHz at 100 Ω·m, 18 kHz at 1,000 Ω·m, 1.8 kHz at 10,000 Ω·m — and
- * stops being fair an order of magnitude above. At power frequency it is below 1e-4 for every soil in range. The
+ * stops being fair an order of magnitude above. At power frequency it is below 4e-4 for every soil up to 10,000 Ω·m. The
  * wave along the line is also taken as quasi-TEM, which wants heights far below a quarter wavelength (1 MHz: 75 m).
  */
 
@@ -101,7 +101,7 @@ export function earthMean(h: number, x: number, logD: number, out: Float64Array)
     const oddS = cosR * x + sinR * h;
     cosR = oddC * h - oddS * x;
     sinR = oddC * x + oddS * h;
-    if ((Math.abs(cosR) + Math.abs(sinR)) * Math.abs(e) < 1e-16) break;
+    if ((Math.abs(cosR) + Math.abs(sinR)) * Math.abs(e) < 1e-13) break;
   }
   out[0] = re;
   out[1] = im;

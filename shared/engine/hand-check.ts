@@ -62,7 +62,8 @@ export function bundleProduct(count: number, spacingM: number): number {
 
 /** GMR of one conductor in m, by table or as a solid wire's r·e^(−¼). */
 function conductorGmr(c: ConductorData): { gmrM: number; source: 'tabled' | 'solid-wire' } {
-  if (c.gmrMm !== undefined && c.gmrMm > 0) return { gmrM: c.gmrMm / 1000, source: 'tabled' };
+  if (c.gmrMm !== undefined && c.gmrMm > 1e-9 && c.gmrMm < 1e6)
+    return { gmrM: c.gmrMm / 1000, source: 'tabled' };
   return { gmrM: (c.diameterMm / 2000) * Math.exp(-0.25), source: 'solid-wire' };
 }
 

@@ -14,7 +14,11 @@ type Position = PhasePosition | GroundWirePosition;
 
 /** Outer limits of what can be meant at all; the filing's schema is narrower. */
 const MAX_LENGTH_M = 1e5;
+/** Metals have 1e−8 Ω·m; far below that the earth is the ideal plane of a limit test. */
+const MIN_RESISTIVITY = 1e-20;
 const MAX_RESISTIVITY = 1e9;
+/** Below this a measure is a slip of the keyboard, and its logarithm or reciprocal would run away. */
+const TINY = 1e-9;
 
 /** A number that is missing, not finite or outside [low, high] (low itself excluded when `open`). */
 function badNumber(
@@ -82,7 +86,7 @@ function checkTemperature(c: ConductorData, where: Where): Failure | null {
 function checkTube(c: ConductorData, where: Where): Failure | null {
   const { coreDiameterMm = 0, diameterMm } = c;
   const fault =
-    requiredField(c, 'dcResistance20OhmPerKm', 0, where) ??
+    requiredField(c, 'dcResistance20OhmPerKm', TINY, where) ??
     requiredField(c, 'temperatureC', -273.15, where) ??
     checkTemperature(c, where) ??
     badNumber(coreDiameterMm, 0, 1e4, false, where, 'coreDiameterMm');
@@ -98,12 +102,12 @@ function checkConductor(c: ConductorData | undefined, where: Where): Failure | n
   if (c === undefined || c === null || typeof c !== 'object') {
     return fail('conductor-data', { ...where, field: 'conductor' }, 'the position names no conductor');
   }
-  const diameter = badNumber(c.diameterMm, 0, 1e4, true, where, 'diameterMm');
+  const diameter = badNumber(c.diameterMm, TINY, 1e4, true, where, 'diameterMm');
   if (diameter) return diameter;
   if (c.model === 'handbook') {
     return (
       requiredField(c, 'acResistanceOhmPerKm', 0, where) ??
-      requiredField(c, 'gmrMm', 0, where) ??
+      requiredField(c, 'gmrMm', TINY, where) ??
       checkTemperature(c, where)
     );
   }
@@ -126,7 +130,7 @@ function checkBundle(p: PhasePosition, where: Where): Failure | null {
         )
       : badNumber(p.bundleCount, 1, MAX_BUNDLE, false, where, 'bundleCount');
   }
-  return p.bundleCount === 1 ? null : badNumber(p.bundleSpacingM, 0, 100, true, where, 'bundleSpacingM');
+  return p.bundleCount === 1 ? null : badNumber(p.bundleSpacingM, TINY, 100, true, where, 'bundleSpacingM');
 }
 
 /** Circumradius of the bundle's polygon, m: how far below its centre a subconductor may hang. */
@@ -216,8 +220,8 @@ function checkPhases(positions: readonly Position[]): Failure | null {
 export function checkSection(s: OverheadSection): Failure | null {
   if (s === null || typeof s !== 'object') return fail('empty-section', {}, 'there is no section');
   const earth =
-    badNumber(s.lengthKm, 0, 1e5, true, {}, 'lengthKm') ??
-    badNumber(s.earthResistivityOhmM, 0, MAX_RESISTIVITY, true, {}, 'earthResistivityOhmM');
+    badNumber(s.lengthKm, TINY, 1e5, true, {}, 'lengthKm') ??
+    badNumber(s.earthResistivityOhmM, MIN_RESISTIVITY, MAX_RESISTIVITY, true, {}, 'earthResistivityOhmM');
   if (earth) return earth;
   if (!Array.isArray(s.positions) || s.positions.length === 0) {
     return fail('empty-section', {}, 'the section has no positions');

@@ -428,7 +428,7 @@ describe('whatever comes in, no exception and no NaN comes out', () => {
           }
         },
       ),
-      { numRuns: 600 },
+      { numRuns: 600, seed: 41 },
     );
   });
 
@@ -440,7 +440,7 @@ describe('whatever comes in, no exception and no NaN comes out', () => {
           if (result.ok) expect(hasHole(result.value)).toBe(false);
         }
       }),
-      { numRuns: 300 },
+      { numRuns: 300, seed: 42 },
     );
   });
 });

@@ -31,7 +31,8 @@ const dice: fc.Arbitrary<LineDice> = fc.record({
   skew: unit,
 });
 
-const RUNS = { numRuns: 200 };
+/** A fixed seed: the same lines on every machine; change it to look at others. */
+const RUNS = { numRuns: 200, seed: 20_260 };
 
 function holds(property: (s: OverheadSection, d: LineDice) => void, runs = RUNS): void {
   fc.assert(
@@ -268,7 +269,7 @@ describe('limits', () => {
           expectComplex([c.r0, c.x0], image[i]?.z0 ?? [], 1e-6);
         });
       },
-      { numRuns: 25 },
+      { ...RUNS, numRuns: 25 },
     );
   });
 
@@ -325,7 +326,7 @@ describe('sections in series', () => {
             expectReal(q?.[key] ?? NaN, p?.[key] ?? NaN, 1e-11, key);
         }
       }),
-      { numRuns: 100 },
+      { ...RUNS, numRuns: 100 },
     );
   });
 

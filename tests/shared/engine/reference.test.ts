@@ -1,4 +1,4 @@
-import { describe, it } from 'vitest';
+import { describe, expect, it } from 'vitest';
 import { solveSection } from '#shared/engine/index';
 import { goldenLines } from './golden-lines';
 import { buildLine, rollDice, seededRandom } from './random-lines';
@@ -31,6 +31,22 @@ describe('independent reference (mathjs matrices, numerical quadrature)', () => 
     agree(section, 40_000);
   });
   it.each(lines.slice(3, 5))('random line $k at 1 MHz', ({ section }) => agree(section, 1e6));
+  it('two double circuits side by side: four circuits on one earth', () => {
+    const left = buildLine({ ...rollDice(random), circuits: 2, bundleCount: 2, tube: false });
+    const right = buildLine({ ...rollDice(random), circuits: 2, bundleCount: 1, tube: false });
+    const moved = right.positions.map((p) => ({
+      ...p,
+      horizontalM: p.horizontalM + 45,
+      ...(p.kind === 'phase' && { circuit: p.circuit + 2 }),
+    }));
+    const section = { ...left, positions: [...left.positions, ...moved] };
+    agree(section, 60);
+    const result = solveSection(section, 60);
+    if (!result.ok) throw new Error(result.detail);
+    expect(result.value.circuits).toHaveLength(4);
+    expect(result.value.mutual.map((m) => m.circuits.join(''))).toEqual(['12', '13', '14', '23', '24', '34']);
+  });
+
   it('reproduces a golden line too, so that the reference itself is checked', () => {
     const line = goldenLines[8];
     if (!line) throw new Error('no line');

@@ -106,6 +106,15 @@ const roomy = goldenLines.map((line) => ({
   })),
 }));
 
+/** A single circuit of twin bundles with one ground wire. */
+const fifth = sectionOf('R005');
+
+function sectionOf(name: string): OverheadSection {
+  const line = roomy.find((l) => l.name === name);
+  if (!line) throw new Error(`no line ${name}`);
+  return line.section;
+}
+
 describe('first-order sensitivities', () => {
   it.each(roomy)('are the limits of differences: $name', ({ section, frequencyHz }) => {
     const scale = flat(solved(section, frequencyHz)).map(Math.abs);
@@ -122,7 +131,7 @@ describe('first-order sensitivities', () => {
   });
 
   it.each([500, 20_000, 1e6])('hold where the earth return leaves its small-argument series: %i Hz', (f) => {
-    const section = { ...(roomy[4]?.section ?? roomy[0]!.section), earthResistivityOhmM: 8 };
+    const section = { ...fifth, earthResistivityOhmM: 8 };
     const scale = flat(solved(section, f)).map(Math.abs);
     for (const row of rows(section, f)) {
       const wanted = difference(section, f, row);
@@ -146,7 +155,7 @@ describe('first-order sensitivities', () => {
 });
 
 describe('plausible ranges', () => {
-  const line = { frequencyHz: 60, sections: [roomy[4]?.section ?? roomy[0]!.section] };
+  const line = { frequencyHz: 60, sections: [fifth] };
 
   function range(sections: OverheadSection[]) {
     const result = uncertainty({ frequencyHz: 60, sections }, DEFAULT_INPUT_UNCERTAINTIES);
@@ -154,8 +163,13 @@ describe('plausible ranges', () => {
     return result.value;
   }
 
+  function first(sections: OverheadSection[]) {
+    const circuit = range(sections).circuits[0];
+    if (!circuit) throw new Error('no circuit');
+    return circuit;
+  }
+
   it('combine the inputs in quadrature and name the largest', () => {
-    const section = line.sections[0]!;
     const u = DEFAULT_INPUT_UNCERTAINTIES;
     const steps: Record<Sensitivity['input'], number> = {
       height: u.heightM,
@@ -168,12 +182,12 @@ describe('plausible ranges', () => {
       'ground-wire-resistance': u.groundWireResistanceRelative,
       'earth-resistivity': Math.log(u.earthResistivityFactor),
     };
-    const moves = rows(section, 60).map((row) => ({
+    const moves = rows(fifth, 60).map((row) => ({
       input: row.input,
       move: steps[row.input] * (row.circuits[0]?.x0 ?? 0),
     }));
     const largest = moves.reduce((a, b) => (Math.abs(b.move) > Math.abs(a.move) ? b : a));
-    const got = range([section]).circuits[0]!.x0;
+    const got = first([fifth]).x0;
     expect(got.halfRange).toBeCloseTo(Math.hypot(...moves.map((m) => m.move)), 12);
     expect(got.dominant).toBe(largest.input);
     expect(got.dominant).toBe('earth-resistivity');
@@ -187,9 +201,8 @@ describe('plausible ranges', () => {
   });
 
   it('shrink when sections move independently, and not where they share a conductor', () => {
-    const section = line.sections[0]!;
-    const one = range([section]).circuits[0]!;
-    const two = range([section, section]).circuits[0]!;
+    const one = first([fifth]);
+    const two = first([fifth, fifth]);
     // R1 hangs on the conductor alone, B0 mostly on heights.
     expect(two.r1.halfRange / one.r1.halfRange).toBeCloseTo(1, 3);
     expect(two.b0.halfRange / one.b0.halfRange).toBeLessThan(0.75);
