@@ -151,7 +151,7 @@ describe('form of the file', () => {
     expect(readCsvFile(`\ufeff${csv({})}`).faults).toEqual([]);
   });
 
-  it('23: too many rows or bytes, and files of another kind', () => {
+  it('23: too many rows or bytes, and files of another kind', { timeout: 30_000 }, () => {
     const many = csv(...Array.from({ length: 501 }, () => ({})));
     expect(cellFaults(many)).toEqual(['502 : The file has 501 rows; at most 500 are taken.']);
     expect(cellFaults(many, { maxRows: 501 })).toEqual([]);
@@ -311,7 +311,7 @@ describe('JSON files', () => {
     );
   });
 
-  it('23: longer than any filing, answered without reading it all', () => {
+  it('23: longer than any filing, answered without reading it all', { timeout: 30_000 }, () => {
     expect(jsonFaults(`{"lines":[${'1,'.repeat(5_000_000)}1]}`)[0]).toContain('more than 50000 entries');
     expect(jsonFaults(`{"lines":[${'NaN,'.repeat(60_000)}1]}`).length).toBeGreaterThan(1000);
     expect(jsonFaults(`{"lines":[{${'"a":1,'.repeat(100_000)}"b":1}]}`).at(-1)).toContain(
@@ -350,7 +350,7 @@ describe('whatever is sent', () => {
     }
   };
 
-  it('is taken or answered with listed faults: any bytes, any text', () => {
+  it('is taken or answered with listed faults: any bytes, any text', { timeout: 30_000 }, () => {
     fc.assert(
       fc.property(fc.uint8Array({ maxLength: 300 }), fc.constantFrom('a.csv', 'a.json'), isAnswered),
       { numRuns: 300 },
@@ -361,7 +361,7 @@ describe('whatever is sent', () => {
     );
   });
 
-  it('also any cell of a sound file', () => {
+  it('also any cell of a sound file', { timeout: 30_000 }, () => {
     const cell = fc.oneof(
       fc.string(),
       fc.string({ unit: fc.constantFrom(',', ';', '"', '\n', '\r', '\t', '1', '.', '-', 'e', ' ') }),

@@ -4,7 +4,7 @@ import { validatorOf } from '#shared/contracts/validators-by-name';
 import { filingValidator } from '#shared/contracts/validators';
 
 describe('what is made from something else', () => {
-  it('is what its sources give: types, unit factors, list of columns', { timeout: 30_000 }, () => {
+  it('is what its sources give: types, unit factors, list of columns', { timeout: 90_000 }, () => {
     const run = spawnSync(process.execPath, ['server/scripts/generate.mjs', '--check'], { encoding: 'utf8' });
     expect(run.stderr).toBe('');
     expect(run.status).toBe(0);

@@ -9,7 +9,7 @@ const messages = (text: string) =>
     .join(' ');
 
 describe('JSON read strictly', () => {
-  it('gives what JSON.parse gives, for any JSON', () => {
+  it('gives what JSON.parse gives, for any JSON', { timeout: 30_000 }, () => {
     fc.assert(
       fc.property(fc.json({ maxDepth: 6 }), (text) => {
         fc.pre(!text.includes('__proto__'));
@@ -20,7 +20,7 @@ describe('JSON read strictly', () => {
     );
   });
 
-  it('never throws, and refuses what JSON.parse refuses', () => {
+  it('never throws, and refuses what JSON.parse refuses', { timeout: 30_000 }, () => {
     const text = fc.oneof(
       fc.string(),
       fc.string({

@@ -361,7 +361,7 @@ describe('whatever is sent', () => {
     }
   };
 
-  it('is taken or answered with listed faults', () => {
+  it('is taken or answered with listed faults', { timeout: 30_000 }, () => {
     fc.assert(fc.property(fc.jsonValue({ maxDepth: 6 }), isListed), { numRuns: 300 });
     fc.assert(
       fc.property(fc.array(fc.jsonValue(), { maxLength: 3 }), (lines) => isListed({ lines })),
@@ -369,7 +369,7 @@ describe('whatever is sent', () => {
     );
   });
 
-  it('also in any one field of a sound filing', () => {
+  it('also in any one field of a sound filing', { timeout: 30_000 }, () => {
     const leaves: string[][] = [];
     const walk = (value: unknown, path: string[]) => {
       leaves.push(path);
@@ -400,7 +400,7 @@ describe('whatever is sent', () => {
     expect(faultsOf(changed((l) => (l['declared'] = deep)))[0]).toContain('nested more than 32 levels');
   });
 
-  it('is not listed without end', () => {
+  it('is not listed without end', { timeout: 30_000 }, () => {
     const read = readFiling({ lines: Array.from({ length: 12_000 }, () => 1) }, CONTEXT);
     expect(!read.ok && read.faults.length).toBe(5001);
     expect(!read.ok && read.faults.at(-1)?.message).toContain('more faults than the 5000');
