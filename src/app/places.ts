@@ -10,7 +10,8 @@ export const PLACES: Readonly<Record<Role, readonly Place[]>> = {
   applicant: [
     { label: 'Applications', to: '/applications' },
     { label: 'Lines', to: '/lines' },
-    { label: 'Organisation', to: '/organisation' },
+    { label: 'Letters', to: '/letters' },
+    { label: 'Rules', to: '/rules' },
   ],
   reviewer: [
     { label: 'Queue', to: '/queue' },
@@ -20,7 +21,7 @@ export const PLACES: Readonly<Record<Role, readonly Place[]>> = {
   ],
   administrator: [
     { label: 'Bands', to: '/bands' },
-    { label: 'Applications', to: '/applications' },
+    { label: 'Rules', to: '/rules' },
     { label: 'People', to: '/people' },
     { label: 'Record', to: '/record' },
   ],

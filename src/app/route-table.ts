@@ -43,6 +43,7 @@ export const ROUTES: readonly RouteEntry[] = [
     path: '/applications/:number/revisions/:letter/lines/:lineKey',
     lazy: () => import('./routes/filed-line'),
   },
+  { path: '/account', lazy: () => import('./routes/account') },
   { path: '/mail-room', lazy: () => import('./routes/mail-room') },
   { path: '/applications/:number/compare', lazy: () => import('./routes/compare') },
   { path: '/applications/:number/record', lazy: () => import('./routes/case-record') },

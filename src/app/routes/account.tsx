@@ -1,0 +1,5 @@
+import { AccountPage } from '../../features/session/components/account-page';
+
+export function Component() {
+  return <AccountPage />;
+}
