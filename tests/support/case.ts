@@ -13,7 +13,7 @@ const KV = 345;
 const HZ = 60;
 
 /** A flat 345 kV line of two conductors a phase, with the values that its own geometry gives. */
-export function aLine(name: string, { x1Factor = 1, lengthKm = 40 } = {}): Json {
+export function aLine(name: string, { x1Factor = 1, lengthKm = 40, earthGiven = true } = {}): Json {
   const heightM = 24;
   const phase = (letter: string, horizontalM: number) => ({
     circuit: 1,
@@ -35,7 +35,7 @@ export function aLine(name: string, { x1Factor = 1, lengthKm = 40 } = {}): Json 
       {
         kind: 'overhead',
         lengthKm,
-        earthResistivityOhmM: 100,
+        ...(earthGiven ? { earthResistivityOhmM: 100 } : {}),
         conductors: {
           phase: { library: 'Drake', temperatureC: 50 },
           ground: { name: 'steel', model: 'handbook', diameterMm: 9.14, gmrMm: 1, acResistanceOhmPerKm: 4 },
