@@ -7,6 +7,18 @@ export const CLASS_REACH = 0.15;
 /** Voltages that one class stands for besides its own name, kV. */
 const ALIASES_KV: Readonly<Record<number, readonly number[]>> = { 400: [380] };
 
+/**
+ * Every nominal voltage that the class table names, at any frequency: the voltages that a base may have been taken from.
+ *
+ * @param bands all bands
+ * @returns kV in rising order
+ */
+export function nominalVoltages(bands: readonly Band[]): number[] {
+  const classes = new Set(bands.map(({ classKv }) => classKv));
+  const aliases = [...classes].flatMap((classKv) => ALIASES_KV[classKv] ?? []);
+  return [...new Set([...classes, ...aliases])].sort((a, b) => a - b);
+}
+
 /** The bands that a line is weighed against. */
 export interface ClassMatch {
   classKv: number;

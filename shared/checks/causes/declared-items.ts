@@ -6,6 +6,9 @@ import { swapItems } from './swaps';
 import { factorSlips } from './unit-slips';
 import type { FactorSlip } from './unit-slips';
 
+/** Log price of a slip between per-length and whole-line values in one field alone. */
+const LONE_WHOLE = -3.5;
+
 interface Fit {
   slip: FactorSlip;
   index: number;
@@ -42,9 +45,10 @@ function itemsOf(fits: readonly Fit[], targets: readonly Target[]): Item[] {
   return scopesWithin(reach, targets, UNIT_SCOPES).flatMap(({ mask, prior }) => {
     const inside = fits.filter(({ index }) => (mask >> index) & 1);
     const first = inside[0];
-    if (first === undefined) return [];
+    if (first === undefined || !isCoherent(first.slip, inside, targets)) return [];
     // A slip in several fields is one act: its own price counts once, at the most natural of them.
     const own = Math.max(...inside.map(({ slip }) => slip.prior));
+    const price = first.slip.isWhole === true && inside.length === 1 ? LONE_WHOLE : 0;
     const item: Item = {
       code: first.slip.code,
       in: 'declared',
@@ -54,7 +58,7 @@ function itemsOf(fits: readonly Fit[], targets: readonly Target[]): Item[] {
       corrected: Object.fromEntries(
         inside.map(({ index, value }) => [targets[index]?.parameter ?? '', value]),
       ),
-      prior: own + prior,
+      prior: own + prior + price,
       model: 0,
       freedom: 0,
       words: first.slip.words,
@@ -62,3 +66,15 @@ function itemsOf(fits: readonly Fit[], targets: readonly Target[]): Item[] {
     return [item];
   });
 }
+
+/**
+ * A base slip shows in one field only where that field is in per unit; in Ω and µS it was made before the values were
+ * converted, and so in several.
+ */
+function isCoherent(slip: FactorSlip, inside: readonly Fit[], targets: readonly Target[]): boolean {
+  if (!BASE_SLIPS.has(slip.code) || inside.length > 1) return true;
+  const unit = targets[inside[0]?.index ?? -1]?.value.unit;
+  return unit === 'pu' || unit === '%' || unit === 'Mvar';
+}
+
+const BASE_SLIPS: ReadonlySet<string> = new Set(['base-mva', 'base-kv', 'phase-to-neutral-base']);

@@ -1,6 +1,7 @@
 import type { LineConstants } from '../../engine/index';
 import type { DeclaredValue, NormalisedLine } from '../../filing/types';
 import type { LibraryConductor } from '../../library/types';
+import { nominalVoltages } from '../bands/match-class';
 import type { CircuitContext, LineContext, PairContext } from '../context';
 import type { LineParameter } from '../parameters';
 import type { Weighing } from '../weigh';
@@ -127,14 +128,13 @@ export function makeProblem(
       formRatio: value.form === 'whole-line' ? formRatio(parameter) : 1,
     }),
   );
-  const atFrequency = rules.bands.filter(({ frequencyHz }) => frequencyHz === line.frequencyHz);
   return {
     targets,
     base,
     lengthKm: line.lengthKm,
     frequencyHz: line.frequencyHz,
     nominalVoltageKv: line.nominalVoltageKv,
-    classesKv: [...new Set(atFrequency.map(({ classKv }) => classKv))],
+    classesKv: nominalVoltages(rules.bands),
   };
 }
 

@@ -1,4 +1,4 @@
-import { matchClass } from '../bands/match-class';
+import { matchClass, nominalVoltages } from '../bands/match-class';
 import type { CircuitContext } from '../context';
 import { waveSpeed } from '../derive';
 import type { Band } from '../rule-set';
@@ -60,14 +60,13 @@ function problemOf({ circuit, lineContext }: CircuitContext): Problem {
       ? []
       : [{ parameter, value, declared: value.perKm, violated: true, rounding: 0, formRatio: 1 }];
   });
-  const atFrequency = rules.bands.filter(({ frequencyHz }) => frequencyHz === line.frequencyHz);
   return {
     targets,
     base: {},
     lengthKm: line.lengthKm,
     frequencyHz: line.frequencyHz,
     nominalVoltageKv: line.nominalVoltageKv,
-    classesKv: [...new Set(atFrequency.map(({ classKv }) => classKv))],
+    classesKv: nominalVoltages(rules.bands),
   };
 }
 

@@ -32,7 +32,7 @@ export interface Problem {
   lengthKm: number;
   frequencyHz: number;
   nominalVoltageKv: number;
-  /** Nominal voltages of the class table at this frequency, kV. */
+  /** Nominal voltages of the class table, kV. */
   classesKv: readonly number[];
 }
 

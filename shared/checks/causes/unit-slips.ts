@@ -12,6 +12,8 @@ export interface FactorSlip {
   factor: number;
   /** Log prior beside that of any slip. */
   prior: number;
+  /** Made for a whole set of values at once, hardly ever for one. */
+  isWhole?: true;
   /** What is assumed, as it follows "Fits within 0.1 % if". */
   words: string;
 }
@@ -59,6 +61,7 @@ function lengthSlips(target: Target, { lengthKm }: Problem): FactorSlip[] {
     {
       code: 'total',
       key: '',
+      isWhole: true,
       // A total read as per mile has been divided by 1.609 on its way to per km already.
       factor: isPerMile ? KM_PER_MILE / lengthKm : 1 / lengthKm,
       prior: isPerLength ? 0 : ODD,
@@ -67,6 +70,7 @@ function lengthSlips(target: Target, { lengthKm }: Problem): FactorSlip[] {
     {
       code: 'per-length',
       key: '',
+      isWhole: true,
       factor: lengthKm,
       prior: isPerLength ? -1 : 0,
       words: `the value is per kilometre and was taken as that of the whole line of ${total}`,

@@ -1,5 +1,5 @@
 import { figure, withUnit } from '../../words';
-import type { PhasePosition } from '../../../engine/index';
+import type { OverheadSection, PhasePosition } from '../../../engine/index';
 import type { Outcome } from '../bench';
 import { fitOne, gridOf } from './fit-one';
 import type { Variant, VariantContext } from './variant';
@@ -27,6 +27,8 @@ interface Filed {
   where: string;
   bundleCount: number;
   sideM: number;
+  /** Phases of one section have different sides: none of them is to be trusted. */
+  isMixed: boolean;
 }
 
 function filedBundle(context: VariantContext): Filed | null {
@@ -35,16 +37,31 @@ function filedBundle(context: VariantContext): Filed | null {
     const position = section.positions[at];
     if (position?.kind !== 'phase') continue;
     const where = `${sectionPointer(context, index)}/positions/${at}`;
-    return { position, where, bundleCount: position.bundleCount, sideM: position.bundleSpacingM };
+    return {
+      position,
+      where,
+      bundleCount: position.bundleCount,
+      sideM: position.bundleSpacingM,
+      isMixed: hasMixedSides(section),
+    };
   }
   return null;
 }
 
-/** The line with another number of subconductors and its sides scaled; a single conductor gets the side given. */
+function hasMixedSides({ positions }: OverheadSection): boolean {
+  const sides = new Set(positions.flatMap((one) => (one.kind === 'phase' ? [one.bundleSpacingM] : [])));
+  return sides.size > 1;
+}
+
+/**
+ * The line with another number of subconductors and its sides scaled; a single conductor, and phases of one section
+ * whose sides differ, get the side given.
+ */
 function solve(context: VariantContext, filed: Filed, bundleCount: number, side: number): Outcome | null {
   return context.bench.changed(
     changePhases((position) => {
-      const own = filed.sideM > 0 ? (position.bundleSpacingM * side) / filed.sideM : side;
+      const isScaled = filed.sideM > 0 && !filed.isMixed;
+      const own = isScaled ? (position.bundleSpacingM * side) / filed.sideM : side;
       return { ...position, bundleCount, bundleSpacingM: bundleCount === 1 ? 0 : own };
     }),
   );
@@ -103,7 +120,9 @@ function sideSlips(context: VariantContext, filed: Filed): Variant[] {
     const outcome = solve(context, filed, filed.bundleCount, side);
     if (outcome === null) return [];
     const words = (): string =>
-      `the bundle’s side is ${withUnit(side, 'm', 4)}, not ${withUnit(filed.sideM, 'm', 4)}`;
+      filed.isMixed
+        ? `every bundle’s side is ${withUnit(side, 'm', 4)}`
+        : `the bundle’s side is ${withUnit(side, 'm', 4)}, not ${withUnit(filed.sideM, 'm', 4)}`;
     return [
       {
         ...COMMON,
@@ -119,7 +138,9 @@ function sideSlips(context: VariantContext, filed: Filed): Variant[] {
   };
   const known = [...BUILT_SIDES_M, ...SIDE_FACTORS.map((factor) => factor * filed.sideM)];
   const isOther = (side: number): boolean =>
-    Math.abs(side / filed.sideM - 1) > 0.01 && !isOtherUnit(side / filed.sideM) && side > 0.02 && side < 5;
+    (filed.isMixed || (Math.abs(side / filed.sideM - 1) > 0.01 && !isOtherUnit(side / filed.sideM))) &&
+    side > 0.02 &&
+    side < 5;
   const others = known.filter(isOther);
   return [
     ...others.flatMap((side) => make(side, 0, -1 - Math.log(others.length) + likelihood(side, filed.sideM))),

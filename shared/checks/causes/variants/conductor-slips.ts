@@ -1,5 +1,5 @@
-import type { ConductorData } from '../../../engine/index';
-import type { SectionChange } from '../bench';
+import type { ConductorData, OverheadSection } from '../../../engine/index';
+import type { Outcome, SectionChange } from '../bench';
 import type { DeclaredParameter } from '../problem';
 import { isResistance, isShunt } from '../problem';
 import { gmrOf } from './gmr-of';
@@ -109,34 +109,70 @@ export function conductorSlips({ bench }: VariantContext): Variant[] {
   });
 }
 
-/** Resistance slips: d.c. for a.c., 20 °C for the operating temperature. */
+interface ResistanceRecipe {
+  code: 'dc-resistance' | 'resistance-at-20c';
+  of: (conductor: ConductorData) => number | null;
+  words: string;
+}
+
+const RESISTANCES: readonly ResistanceRecipe[] = [
+  { code: 'dc-resistance', of: dcAtTemperature, words: 'it is the d.c. resistance' },
+  { code: 'resistance-at-20c', of: acAt20, words: 'it is the resistance at 20\u2009°C' },
+  {
+    code: 'resistance-at-20c',
+    of: (conductor) => conductor.dcResistance20OhmPerKm ?? null,
+    words: 'it is the d.c. resistance at 20\u2009°C',
+  },
+];
+
+/**
+ * Resistance slips: d.c. for a.c., 20 °C for the operating temperature; each with what the ground wires add, and as the
+ * catalogue value divided by the number of subconductors.
+ */
 export function resistanceSlips({ bench }: VariantContext): Variant[] {
-  const recipes: { code: Variant['code']; of: (conductor: ConductorData) => number | null; words: string }[] =
-    [
-      { code: 'dc-resistance', of: dcAtTemperature, words: 'it is the d.c. resistance' },
-      { code: 'resistance-at-20c', of: acAt20, words: 'it is the resistance at 20\u2009°C' },
-      {
-        code: 'resistance-at-20c',
-        of: (conductor) => conductor.dcResistance20OhmPerKm ?? null,
-        words: 'it is the d.c. resistance at 20\u2009°C',
-      },
+  return RESISTANCES.flatMap((recipe) => {
+    const alone = (section: OverheadSection): OverheadSection => ({
+      ...section,
+      positions: section.positions.filter(({ kind }) => kind === 'phase'),
+    });
+    const change = withResistance(recipe);
+    return [
+      ...resistanceVariant(recipe, bench.changed(change), 0),
+      ...resistanceVariant(
+        recipe,
+        bench.changed((section, index) => {
+          const other = change(section, index);
+          return other === null || other.positions.every(({ kind }) => kind === 'phase')
+            ? null
+            : alone(other);
+        }),
+        -0.7,
+      ),
     ];
-  return recipes.flatMap(({ code, of, words }): Variant[] => {
-    const outcome = bench.changed(
-      changeConductors((conductor) => {
-        // A tube's resistance follows from its temperature, skin effect and all.
-        if (conductor.model === 'tube' && code === 'resistance-at-20c')
-          return { ...conductor, temperatureC: 20 };
-        const resistance = of(conductor);
-        if (resistance === null) return null;
-        // Only resistance is read from this variant, so a tube may become a handbook conductor of the same size.
-        return { ...conductor, model: 'handbook', gmrMm: gmrOf(conductor), acResistanceOhmPerKm: resistance };
-      }),
-    );
-    if (outcome === null) return [];
-    const model = code === 'dc-resistance' ? SHORTCUT_MODEL : ENGINE_MODEL;
-    return [{ code, in: 'declared', outcome, reach: isResistance, prior: -0.6, model, freedom: 0, words }];
   });
+}
+
+function withResistance({ code, of }: ResistanceRecipe): SectionChange {
+  return changeConductors((conductor) => {
+    // A tube's resistance follows from its temperature, skin effect and all.
+    if (conductor.model === 'tube' && code === 'resistance-at-20c') return { ...conductor, temperatureC: 20 };
+    const resistance = of(conductor);
+    if (resistance === null) return null;
+    // Only resistance is read from this variant, so a tube may become a handbook conductor of the same size.
+    return { ...conductor, model: 'handbook', gmrMm: gmrOf(conductor), acResistanceOhmPerKm: resistance };
+  });
+}
+
+function resistanceVariant(
+  { code, words }: ResistanceRecipe,
+  outcome: Outcome | null,
+  price: number,
+): Variant[] {
+  if (outcome === null) return [];
+  const model = code === 'dc-resistance' ? SHORTCUT_MODEL : ENGINE_MODEL;
+  return [
+    { code, in: 'declared', outcome, reach: isResistance, prior: -0.6 + price, model, freedom: 0, words },
+  ];
 }
 
 function dcAtTemperature(conductor: ConductorData): number | null {
