@@ -29,6 +29,7 @@ export interface AmpacityInput {
   weather: WeatherAssumptions;
 }
 
+/** 0 °C in kelvin as the standard rounds it. */
 const KELVIN = 273;
 
 /** Ranges that the standard's formulas are meant for, wide enough for any real line. */
@@ -45,6 +46,7 @@ const WEATHER_RANGES: Record<Exclude<keyof WeatherAssumptions, 'atmosphere'>, re
   solarHour: [0, 24],
 };
 
+/** Numbers of the input against the ranges; the first that is out is told. */
 function checkInput(input: AmpacityInput): Failure | null {
   if (!input.weather) return fail('non-finite', { field: 'weather' }, 'the weather assumptions are missing');
   const numbers: [string, number, number, number][] = [
@@ -83,6 +85,7 @@ function convectionOf(input: AmpacityInput, film: Ampacity['film']): Ampacity['c
   // The wind's angle folded into the first quadrant: only its slant counts.
   const slant = Math.acos(Math.min(1, Math.abs(Math.cos(angle))));
   const direction = 1.194 - Math.cos(slant) + 0.194 * Math.cos(2 * slant) + 0.368 * Math.sin(2 * slant);
+  // A conductor cooler than the air takes heat up, which the formulas are not made for: no cooling then.
   const rise = Math.max(0, input.conductorTemperatureC - input.weather.airTemperatureC);
   const d = input.diameterMm / 1000;
   const lowWind = direction * (1.01 + 1.35 * film.reynolds ** 0.52) * film.conductivity * rise;

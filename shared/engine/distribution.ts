@@ -37,7 +37,10 @@ export class Distribution {
     this.splitLeaders(w, seriesWires);
   }
 
-  /** Phase currents are the pattern itself. */
+  /**
+   * Phase currents are the pattern itself: the impedance form is mᵀZm for currents imposed on the phases, whatever
+   * voltages they need.
+   */
   private startCurrents(phases: number): void {
     this.currentR.fill(0, 0, phases * this.columns);
     this.currentI.fill(0, 0, phases * this.columns);
@@ -48,7 +51,10 @@ export class Distribution {
     }
   }
 
-  /** Phase charges are C times the pattern of voltages. */
+  /**
+   * Phase charges are C times the pattern of voltages: the susceptance form is for voltages imposed on the phases, and
+   * dC = −C·dP·C makes the charges the weights, with a minus sign that `Slopes` adds.
+   */
   private startCharges(w: Workspace): void {
     for (let i = 0; i < w.phases; i++) {
       for (let c = 0; c < w.phases; c += 3) {
@@ -64,7 +70,10 @@ export class Distribution {
     }
   }
 
-  /** Eliminated rows in the order of their indices: pivot·I_k = −Σ_(j<k) a_kj·I_j. */
+  /**
+   * Currents of the eliminated wires. Elimination went from the last row up and left each row as it was at its step, so
+   * rows are taken in the order of their indices: pivot·I_k = −Σ_(j<k) a_kj·I_j.
+   */
   private substituteCurrents(w: Workspace, seriesWires: number): void {
     const { zr, zi, phases } = w;
     const { columns, currentR, currentI } = this;
@@ -97,6 +106,7 @@ export class Distribution {
     currentI.fill(0, seriesWires * columns, w.wires * columns);
   }
 
+  /** The same for charges; segmented ground wires carry charge although they carry no current. */
   private substituteCharges(w: Workspace): void {
     const { columns, charge } = this;
     for (let k = w.phases; k < w.wires; k++) {

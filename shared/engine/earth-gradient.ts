@@ -33,6 +33,10 @@ function closedForm(h: number, x: number, d2: number, out: Float64Array): void {
   out[3] = c * (pr - qr - pi + qi);
 }
 
+/**
+ * Carson's series derived term by term: with θ = arg(h + jx), both arguments together make the powers Dⁿ·cos nθ for ∂h
+ * and Dⁿ·sin nθ for ∂x, all real, and the phases are those of √j.
+ */
 function carsonSeries(h: number, x: number, logD: number, out: Float64Array): void {
   const theta = x === 0 ? 0 : Math.atan2(x, h);
   const log = logD - Math.LN2;
@@ -60,6 +64,7 @@ function carsonSeries(h: number, x: number, logD: number, out: Float64Array): vo
     const qh = a * evenC + vh;
     const px = -a * evenS + ux;
     const qx = -a * evenS + vx;
+    // Multiply by j^k without multiplying: swap parts on odd k, signs every second time.
     const flip = (k & 2) === 0 ? 1 : -1;
     if ((k & 1) === 0) {
       hr += flip * ph;

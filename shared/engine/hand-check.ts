@@ -67,6 +67,7 @@ function conductorGmr(c: ConductorData): { gmrM: number; source: 'tabled' | 'sol
   return { gmrM: (c.diameterMm / 2000) * Math.exp(-0.25), source: 'solid-wire' };
 }
 
+/** Distance of two bundles' centres at average height, m. */
 function distance(p: PhasePosition, q: PhasePosition): number {
   const dy = p.attachmentHeightM - q.attachmentHeightM - SAG_SHARE * (p.sagM - q.sagM);
   return Math.hypot(p.horizontalM - q.horizontalM, dy);
@@ -95,6 +96,7 @@ function variant(
 /** The circuit alone, lifted far away from the earth; alone above it; with the ground wires. */
 function variants(s: OverheadSection, phases: readonly PhasePosition[]): OverheadSection[] {
   const alone = phases.map((p) => ({ ...p, circuit: 1 }));
+  // So high up the images are felt with (spacing/2h)², some 1e−9, and an earth that conducts well adds nothing.
   const lifted = alone.map((p) => ({ ...p, attachmentHeightM: p.attachmentHeightM + FAR_AWAY_M }));
   const wires = s.positions.filter((p) => p.kind === 'ground-wire');
   return [
@@ -104,6 +106,7 @@ function variants(s: OverheadSection, phases: readonly PhasePosition[]): Overhea
   ];
 }
 
+/** The chain's steps: each variant differs from the one before by one cause. */
 const CAUSES: readonly ShortcutCause[] = ['bundle', 'earth', 'ground-wires', 'other-circuits'];
 
 /** Splits full − shortcut along the chain of variants. */

@@ -51,11 +51,13 @@ export function solveCable(s: CableSection, ratio: number): Result<SectionConsta
   return succeed({ circuits, mutual: [] });
 }
 
+/** One section, of either kind; `ratio` is the frequency asked for ÷ the line's own. */
 function solveAny(s: LineSection, frequencyHz: number, ratio: number): Result<SectionConstants> {
   if (s === null || typeof s !== 'object') return fail('empty-section', {}, 'there is no section');
   return s.kind === 'cable' ? solveCable(s, ratio) : solveSection(s, frequencyHz);
 }
 
+/** Six zeros to sum into. */
 function zeroConstants(): SequenceConstants {
   return { r1: 0, x1: 0, b1: 0, r0: 0, x0: 0, b0: 0 };
 }
@@ -70,6 +72,7 @@ function accumulate(sum: SequenceConstants, values: SequenceConstants, weight: n
   sum.b0 += values.b0 * weight;
 }
 
+/** Zero mutuals of all pairs of circuits, in the order in which sections list theirs: (1,2), (1,3) … (2,3) … */
 function emptyMutuals(count: number): Mutual[] {
   const mutual: Mutual[] = [];
   for (let a = 1; a <= count; a++) {
@@ -86,6 +89,7 @@ function weightedMeans(l: LineInput, parts: readonly SectionConstants[], lengthK
   const mutual = emptyMutuals(count);
   for (let s = 0; s < parts.length; s++) {
     const part = parts[s] as SectionConstants;
+    // A line of one section keeps its section's digits: no division by its own length.
     const weight = parts.length === 1 ? 1 : (l.sections[s] as LineSection).lengthKm / lengthKm;
     for (let c = 0; c < count; c++) {
       accumulate(circuits[c] as SequenceConstants, part.circuits[c] as SequenceConstants, weight);
@@ -108,6 +112,7 @@ function circuitPi(l: LineInput, parts: readonly SectionConstants[], circuit: nu
   for (let s = 0; s < parts.length; s++) {
     const v = (parts[s] as SectionConstants).circuits[circuit] as SequenceConstants;
     const length = (l.sections[s] as LineSection).lengthKm;
+    // b comes in µS; half of the line's charging sits at either end only in the pi, the two-port holds it distributed.
     const portOne = uniformTwoPort([v.r1 * length, v.x1 * length], [0, v.b1 * length * 1e-6]);
     const portZero = uniformTwoPort([v.r0 * length, v.x0 * length], [0, v.b0 * length * 1e-6]);
     one = s === 0 ? portOne : cascade(one, portOne);
@@ -159,6 +164,7 @@ export function checkLine(l: LineInput, frequencyHz: number): Failure | null {
  */
 export function combineSections(l: LineInput, parts: readonly SectionConstants[]): Result<LineConstants> {
   const count = parts[0]?.circuits.length ?? 0;
+  // Sections in series carry the same circuits; a stretch with fewer is a line of its own.
   const odd = parts.length === 1 ? -1 : parts.findIndex((part) => part.circuits.length !== count);
   if (odd >= 0) {
     const seen = parts[odd]?.circuits.length ?? 0;

@@ -45,6 +45,7 @@ function balancedBlocks(circuits: readonly SequenceConstants[]): PhaseConstants 
   };
 }
 
+/** A section's matrices, its own for overhead ones, balanced blocks for cables. */
 function phaseConstants(s: LineSection, frequencyHz: number, ratio: number): Result<PhaseConstants> {
   if (s === null || typeof s !== 'object') return fail('empty-section', {}, 'there is no section');
   if (s.kind === 'cable') {
@@ -63,6 +64,7 @@ function phaseConstants(s: LineSection, frequencyHz: number, ratio: number): Res
 /** exp of [0 Zl; Yl 0] less the unit matrix: the section's exact two-port of double order. */
 function sectionPort(c: PhaseConstants, lengthKm: number): DenseMatrix {
   const { n } = c.z;
+  // d(V, I)/dx = −[0 Z; Y 0]·(V, I), walked from the receiving end: exp of the generator times the length.
   const generator = denseFrom(2 * n, (i, j) => {
     if (i < n === j < n) return [0, 0];
     const m = i < n ? c.z : c.y;
@@ -81,6 +83,7 @@ function block(port: DenseMatrix, row: number, column: number, unit: boolean): D
   });
 }
 
+/** The matrix as rows of [re, im]. */
 function pairs(m: DenseMatrix): Pair[][] {
   return Array.from({ length: m.n }, (_, i) =>
     Array.from({ length: m.n }, (__, j): Pair => [m.re[i * m.n + j] as number, m.im[i * m.n + j] as number]),
@@ -137,6 +140,7 @@ export function phaseCascade(l: LineInput, frequencyHz: number = l?.frequencyHz)
   });
 }
 
+/** The transpose. */
 function transpose(m: DenseMatrix): DenseMatrix {
   return denseFrom(m.n, (i, j) => [m.re[j * m.n + i] as number, m.im[j * m.n + i] as number]);
 }

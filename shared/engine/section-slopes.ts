@@ -45,6 +45,7 @@ function visitConductor(
   length: number,
   visit: SlopeVisitor,
 ): void {
+  // Z_ii and P_ii of every wire with this conductor move alike, so the summed self weights are all that is needed.
   const slope = conductorSlopes(c, omega);
   // P_ii = ln(2h/r) falls by one a unit of ln r, so B grows.
   fillRow(length, slope.byLogDiameter, susceptanceFactor(omega));
@@ -74,6 +75,7 @@ function seenBefore(s: OverheadSection, index: number): boolean {
 /** Sums the self weights of all positions that share the conductor of the one at `index`. */
 function gatherWeights(s: OverheadSection, index: number, length: number): void {
   const p = s.positions[index];
+  // Earlier positions were ruled out by `seenBefore`, so the search starts at the first of the kind.
   weight.fill(0);
   for (let i = index; i < s.positions.length; i++) {
     const q = s.positions[i];
@@ -104,6 +106,7 @@ export function visitSlopes(
   slopes.fill(s, w, frequencyHz);
   const length = slopes.length;
   visit('height', slopes.height, 0, 1, -1, null);
+  // The average height falls by two thirds of the sag, on all wires of the section alike.
   visit('sag', slopes.height, 0, -SAG_SHARE, -1, null);
   visit('earth-resistivity', slopes.logResistivity, 0, 1, -1, null);
   if (weight.length < length) {

@@ -62,6 +62,10 @@ export class Slopes {
     toValues(this.offset, this.length * positions, series, shunt);
   }
 
+  /**
+   * Makes room for a section and clears the sums. Arrays only grow, so a run over many lines of like size allocates
+   * once; all loops run to the section's own size, never to the arrays' length.
+   */
   private reserve(w: Workspace, positions: number): void {
     const circuits = w.phases / 3;
     this.quantities = 2 * circuits + (circuits * (circuits - 1)) / 2;
@@ -94,6 +98,10 @@ export class Slopes {
     this.asideB.fill(0, 0, w.wires * w.phases);
   }
 
+  /**
+   * The pass itself. Row i holds the pairs with all wires before it and the wire's own element last, as the triangles
+   * do, so e runs through the packed pairs in order.
+   */
   private passPairs(w: Workspace, scale: number): void {
     const { currentR, currentI, charge } = this.distribution;
     const { sum, offset, logFar } = w;
@@ -123,6 +131,7 @@ export class Slopes {
     }
   }
 
+  /** Starts the row sums of the next wire; a loop, since `fill` costs more than it saves on three or six columns. */
   private clearColumns(): void {
     for (let k = 0; k < this.distribution.columns; k++) {
       this.raisedR[k] = 0;
@@ -141,12 +150,14 @@ export class Slopes {
     const x = w.offset[e] as number;
     const dh = (w.height[i] as number) - (w.height[j] as number);
     // Every height sum grows by two metres a metre raised; ln ρ moves u by −½ a unit.
+    // The gradient is in scaled coordinates: one factor √(ωμ₀/ρ) brings it back to metres.
     const ghr = 2 * scale * (gradient[0] as number);
     const ghi = 2 * scale * (gradient[1] as number);
     const gxr = scale * (gradient[2] as number);
     const gxi = scale * (gradient[3] as number);
     const ger = -0.5 * (0.5 * h * ghr + x * gxr - 1);
     const gei = -0.5 * (0.5 * h * ghi + x * gxi);
+    // Moving sideways also changes the distance between the wires themselves, −ln d; raising both does not.
     const gar = gxr - x / (x * x + dh * dh);
     let at = i * columns;
     let to = j * columns;
@@ -161,6 +172,7 @@ export class Slopes {
       earthI[k] = (earthI[k] as number) + ger * mi + gei * mr;
       asideR[at] = (asideR[at] as number) + gar * mr - gxi * mi;
       asideI[at] = (asideI[at] as number) + gar * mi + gxi * mr;
+      // Seen from wire j the same move goes the other way.
       asideR[to] = (asideR[to] as number) - gar * or + gxi * oi;
       asideI[to] = (asideI[to] as number) - gar * oi - gxi * or;
     }
@@ -173,6 +185,7 @@ export class Slopes {
     const h = w.sum[e] as number;
     const x = w.offset[e] as number;
     const dh = (w.height[i] as number) - (w.height[j] as number);
+    // P = ln(D/d): the image's distance D grows with height, both D and d change with a sideways move.
     const far = 1 / (h * h + x * x);
     const raised = 2 * h * far;
     const aside = x * far - x / (x * x + dh * dh);
@@ -191,6 +204,7 @@ export class Slopes {
     const { columns, currentR, currentI } = this.distribution;
     const ghr = scale * (gradient[0] as number);
     const ghi = scale * (gradient[1] as number);
+    // A wire's height sum is 2h: its slope per metre raised is two gradients, of which half is taken here.
     const ger = -0.25 * (h * ghr - 1);
     const gei = -0.25 * h * ghi;
     for (let k = 0, at = i * columns; k < columns; k++, at++) {
@@ -263,6 +277,10 @@ export class Slopes {
     into[e + 2] = (into[e + 2] as number) + share * (charge[k] as number) * (b[l] as number);
   }
 
+  /**
+   * Sums the sideways products by position. Within one position they cancel in pairs, since its wires move together:
+   * nothing has to be left out for it.
+   */
   private gatherOffsets(w: Workspace): void {
     for (let i = 0; i < w.wires; i++) {
       const start = (w.position[i] as number) * this.length;

@@ -63,6 +63,7 @@ interface SharedInput {
 
 /** Sum in quadrature of what each input moves, entry by entry, with the largest mover of each. */
 export class SpreadSum {
+  /** Sum of squared moves, the largest move, and whose it is. */
   private readonly squares: Float64Array;
   private readonly most: Float64Array;
   private readonly topInput: (UncertainInput | null)[];
@@ -91,6 +92,7 @@ export class SpreadSum {
     section: number,
     position: number,
   ): void {
+    // A slope times the full step: the step is a bound and not a deviation, and bounds are combined as if deviations.
     const step = factor * stepOf(input, this.u);
     for (let e = 0; e < this.length; e++) {
       const move = Math.abs(step * (values[start + e] as number));
@@ -140,6 +142,7 @@ export class SpreadSum {
     };
   }
 
+  /** Place of the input that moves entry e most. */
   private whereOf(e: number): Where {
     const section = this.topSection[e] as number;
     const position = this.topPosition[e] as number;

@@ -2,6 +2,7 @@ import { createModifiedBessel, modifiedBessel } from '../numerics/bessel';
 import { add, divide, multiply, scale, subtract, type Complex } from '../numerics/complex';
 import { MU_0 } from './constants';
 
+/** Room for the values at the outer and the inner radius. */
 const outer = createModifiedBessel();
 const inner = createModifiedBessel();
 
@@ -19,6 +20,7 @@ function logDerivatives(x: Complex, y: Complex): { value: Complex; byX: Complex;
   const decay: Complex = [Math.exp(-gap) * Math.cos(gap), -Math.exp(-gap) * Math.sin(gap)];
   const k0 = multiply(outer.k0, decay);
   const k1 = multiply(outer.k1, decay);
+  // Wronskian relations among I₀, I₁, K₀, K₁ make every derivative of N and D one of these four combinations.
   const n = add(multiply(outer.i0, inner.k1), multiply(k0, inner.i1));
   const d = subtract(multiply(outer.i1, inner.k1), multiply(k1, inner.i1));
   const s = subtract(multiply(outer.i0, inner.k0), multiply(k0, inner.i0));

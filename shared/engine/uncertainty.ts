@@ -44,16 +44,19 @@ function addOverhead(
   alone: boolean,
 ): SectionConstants | Failure {
   return visitSlopes(s, frequencyHz, (input, values, start, factor, position, conductor) => {
+    // Over several sections a conductor's data move together; alone, its moves can be squared at once.
     if (conductor && !alone) sum.addShared(input, values, factor * weight, section, position, conductor);
     else sum.add(input, values, start, factor * weight, section, position);
   });
 }
 
+/** A cable has values but no slopes. */
 function solveCablePart(s: CableSection): SectionConstants | Failure {
   const cable = solveCable(s, 1);
   return cable.ok ? cable.value : cable;
 }
 
+/** Spreads in the order of the slope vectors: six a circuit, then three a pair of circuits. */
 function readSpreads(constants: LineConstants, sum: SpreadSum): LineUncertainty {
   const circuits: LineUncertainty['circuits'] = [];
   const mutual: LineUncertainty['mutual'] = [];
@@ -122,6 +125,7 @@ export function uncertainty(l: LineInput, inputs: InputUncertainties): Result<Li
   return succeed(readSpreads(combined.value, sum));
 }
 
+/** Unit of each input's slope; `relative` ones are per unit of the natural logarithm. */
 const UNITS: Record<UncertainInput, Sensitivity['unit']> = {
   height: 'm',
   sag: 'm',
@@ -151,6 +155,7 @@ export function sensitivities(s: OverheadSection, frequencyHz: number): Result<S
   return 'ok' in solved ? solved : succeed(rows);
 }
 
+/** A slope vector with its names back on. */
 function toSensitivity(
   input: UncertainInput,
   vector: Float64Array,

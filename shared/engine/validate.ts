@@ -29,6 +29,7 @@ function badNumber(
   where: Where,
   field: string,
 ): Failure | null {
+  // NaN fails both comparisons, so the quick exit is only taken by real numbers in range.
   if (typeof value === 'number' && value <= high && (open ? value > low : value >= low)) return null;
   const place = { ...where, field };
   if (typeof value !== 'number' || !Number.isFinite(value)) {
@@ -59,6 +60,7 @@ function requiredField(
   where: Where,
 ): Failure | null {
   const value = c[field];
+  // A gap in the data and a wrong number want different answers from whoever fills in the form.
   if (value === undefined || value === null) {
     return fail('conductor-data', { ...where, field }, `a ${c.model} conductor needs ${field}`);
   }
@@ -98,6 +100,7 @@ function checkTube(c: ConductorData, where: Where): Failure | null {
   );
 }
 
+/** A conductor's data against what its model needs; data that the model does not use are not looked at. */
 function checkConductor(c: ConductorData | undefined, where: Where): Failure | null {
   if (c === undefined || c === null || typeof c !== 'object') {
     return fail('conductor-data', { ...where, field: 'conductor' }, 'the position names no conductor');
@@ -140,6 +143,7 @@ function bundleRadius(p: Position): number {
     : 0;
 }
 
+/** Numbers, conductor and bundle of one position, and that its lowest point clears the ground. */
 function checkPosition(p: Position, where: Where): Failure | null {
   const fault =
     badNumber(p.horizontalM, -MAX_LENGTH_M, MAX_LENGTH_M, false, where, 'horizontalM') ??
@@ -148,6 +152,7 @@ function checkPosition(p: Position, where: Where): Failure | null {
     checkConductor(p.conductor, where) ??
     (p.kind === 'phase' ? checkBundle(p, where) : null);
   if (fault) return fault;
+  // The sag counts in full here: the wire's lowest point, not its average, must hang above the ground.
   const lowest = p.attachmentHeightM - p.sagM - bundleRadius(p) - p.conductor.diameterMm / 2000;
   if (lowest > 0) return null;
   return fail(
@@ -157,6 +162,7 @@ function checkPosition(p: Position, where: Where): Failure | null {
   );
 }
 
+/** Order of the phases within a circuit's three rows. */
 const PHASE_INDEX = { a: 0, b: 1, c: 2 } as const;
 
 /**
@@ -173,6 +179,7 @@ export function phaseSlot(p: PhasePosition): number {
 
 /** Every circuit from 1 to the highest has its phases a, b, c exactly once. */
 function checkPhases(positions: readonly Position[]): Failure | null {
+  // Position by slot, −1 for none: finds both a phase that comes twice and one that is missing.
   const seen = new Int32Array(3 * MAX_CIRCUITS).fill(-1);
   let slots = 0;
   for (let i = 0; i < positions.length; i++) {

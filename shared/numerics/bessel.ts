@@ -27,6 +27,7 @@ const K_SERIES_LIMIT = 2;
 function seriesI(zr: number, zi: number, out: ModifiedBessel): void {
   const wr = (zr * zr - zi * zi) / 4;
   const wi = (zr * zi) / 2;
+  // t_k = (z²/4)^k/(k!)²; I₀ sums them, I₁ sums t_k/(k+1) and carries z/2.
   let tr = 1;
   let ti = 0;
   let a = 1;
@@ -65,6 +66,7 @@ function hankelSum(fourNuSquared: number, sign: number, vr: number, vi: number, 
     const factor = (sign * (fourNuSquared - (2 * k - 1) * (2 * k - 1))) / (8 * k);
     const nr = (tr * vr - ti * vi) * factor;
     const ni = (tr * vi + ti * vr) * factor;
+    // An asymptotic series is cut at its smallest term.
     if (Math.abs(nr) + Math.abs(ni) > Math.abs(tr) + Math.abs(ti)) break;
     tr = nr;
     ti = ni;
@@ -83,12 +85,14 @@ function asymptoticI(zr: number, zi: number, out: ModifiedBessel): void {
   const vi = -zi / size;
   hankelSum(0, -1, vr, vi, out.i0);
   hankelSum(4, -1, vr, vi, out.i1);
+  // Common factor 1/√(2πz), principal root.
   const root = 1 / Math.sqrt(2 * Math.PI * Math.sqrt(size));
   const angle = -0.5 * Math.atan2(zi, zr);
   rotate(out.i0, root * Math.cos(angle), root * Math.sin(angle));
   rotate(out.i1, root * Math.cos(angle), root * Math.sin(angle));
 }
 
+/** value ← value · (cr + j·ci). */
 function rotate(value: [number, number], cr: number, ci: number): void {
   const re = value[0] * cr - value[1] * ci;
   value[1] = value[0] * ci + value[1] * cr;
@@ -104,6 +108,7 @@ function seriesK(zr: number, zi: number, out: ModifiedBessel): void {
   const li = Math.atan2(zi, zr);
   let tr = 1;
   let ti = 0;
+  // ψ(1) = −γ, and ψ(k+1) = ψ(k) + 1/k on the way.
   let psi = -GAMMA;
   let ar = psi - lr;
   let ai = -li;
@@ -148,6 +153,7 @@ function fractionK(zr: number, zi: number, out: ModifiedBessel): void {
   let q: [number, number] = [0.25, 0];
   let s: [number, number] = [1 + q[0] * delta[0] - q[1] * delta[1], q[0] * delta[1] + q[1] * delta[0]];
   for (let i = 2; i <= 500; i++) {
+    // a_i = −(i − ½)², and c_i carries the ratio of successive q.
     a -= 2 * (i - 1);
     c = (-a * c) / i;
     const next: [number, number] = [
@@ -159,6 +165,7 @@ function fractionK(zr: number, zi: number, out: ModifiedBessel): void {
     q = [q[0] + c * next[0], q[1] + c * next[1]];
     b = [b[0] + 2, b[1]];
     d = reciprocal(b[0] + a * d[0], b[1] + a * d[1]);
+    // Steed: the denominators' reciprocal d is updated, the fraction grows by (b·d − 1) times its last step.
     const fr = b[0] * d[0] - b[1] * d[1] - 1;
     const fi = b[0] * d[1] + b[1] * d[0];
     delta = [fr * delta[0] - fi * delta[1], fr * delta[1] + fi * delta[0]];
@@ -183,6 +190,7 @@ function fractionK(zr: number, zi: number, out: ModifiedBessel): void {
   rotate(out.k1, gr * v[0] - gi * v[1], gr * v[1] + gi * v[0]);
 }
 
+/** 1/(re + j·im). */
 function reciprocal(re: number, im: number): [number, number] {
   const size = re * re + im * im;
   return [re / size, -im / size];

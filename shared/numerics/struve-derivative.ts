@@ -14,6 +14,7 @@ function series(re: number, im: number, out: Float64Array): void {
   const size = re * re + im * im;
   const logR = 0.5 * Math.log(size) - Math.LN2;
   const logI = Math.atan2(im, re);
+  // a_k = A_k·u^(2k) and b_k = B_k·u^(2k−1) of the series of F, powers one lower than there.
   let ar = 1 / 3;
   let ai = 0;
   let br = 0.5 * (re / size);
@@ -72,6 +73,7 @@ function asymptotic(re: number, im: number, out: Float64Array): void {
 
 /** −(1/u²)·Σ w·s·(√(1+(s/u)²) − s/u) for arguments from 0 to 90°. */
 function quadrature(re: number, im: number, out: Float64Array): void {
+  // The same nodes as F: the integrand only gains a factor −t = −s/u.
   const rule = im > 1.2 * re ? TURNED_RULE : STRAIGHT_RULE;
   const size = re * re + im * im;
   const vr = re / size;
@@ -88,6 +90,7 @@ function quadrature(re: number, im: number, out: Float64Array): void {
     const mod = Math.sqrt(ar * ar + ai * ai);
     const rr = Math.sqrt(0.5 * (mod + Math.abs(ar)));
     const ri = Math.abs(ai) / (2 * rr);
+    // √(1+t²) + t, whose reciprocal is √(1+t²) − t without cancellation.
     const dr = (ar >= 0 ? rr : ri) + tr;
     const di = (ar >= 0 ? ri : rr) * (ai < 0 ? -1 : 1) + ti;
     const d = 1 / (dr * dr + di * di);
@@ -113,6 +116,7 @@ function hankel(fourNuSquared: number, wr: number, wi: number, out: Float64Array
   const limit = 1 / (wr * wr + wi * wi);
   for (let k = 1; k < 40; k++) {
     const factor = (fourNuSquared - (2 * k - 1) * (2 * k - 1)) / (8 * k);
+    // Cut at the smallest term, where |factor| reaches |v|.
     if (factor * factor > limit) break;
     const pr = tr * wr - ti * wi;
     const pi = tr * wi + ti * wr;
@@ -125,6 +129,7 @@ function hankel(fourNuSquared: number, wr: number, wi: number, out: Float64Array
   out[1] = sumI;
 }
 
+/** Room for the two Hankel sums. */
 const h0 = new Float64Array(2);
 const h1 = new Float64Array(2);
 
@@ -142,6 +147,7 @@ function reflected(re: number, im: number, out: Float64Array): void {
   // H₁ stands a quarter turn ahead of H₀: H₁ ~ j·(…)·e^(−j(v − π/4)). Sum = S₀ + 2j·S₁/u.
   const br = (h0[0] as number) - 2 * ((h1[0] as number) * wi + (h1[1] as number) * wr);
   const bi = (h0[1] as number) + 2 * ((h1[0] as number) * wr - (h1[1] as number) * wi);
+  // Both orders share √(2/(πv))·e^(−j(v − π/4)); v = −u, so e^(−jv) = e^(ju) decays with Im u.
   const scale = Math.PI * Math.sqrt(2 / (Math.PI * Math.sqrt(size))) * Math.exp(-im);
   const angle = -0.5 * Math.atan2(-im, -re) + re + 0.25 * Math.PI;
   // −j·e^(j·angle)
