@@ -1119,11 +1119,11 @@ export interface Draft {
 
 /** One fault of what was sent. */
 export interface Fault {
-  /** JSON Pointer of the value */
+  /** JSON Pointer of the value; empty for the whole */
   pointer?: string;
   /** row of the file, the header is 1 (count) */
   row?: number;
-  /** column of the file */
+  /** column of the file; empty for the whole row */
   column?: string;
   /** the line’s key within the application, L1, L2 …; it stays through all revisions */
   lineKey?: string;

@@ -36,7 +36,9 @@ export async function listQueue(caller: Caller, query: Api.ListQueueRequest): Pr
   const { tx, ability, actor } = caller;
   const reading = await readingOf(caller);
   const asked = overviewQuery(caller, query, reading, { sort: 'due', states: QUEUE_STATES });
-  const states = asked.filters.states.filter((state) => (QUEUE_STATES as string[]).includes(state));
+  const open = asked.filters.states.filter((state) => (QUEUE_STATES as string[]).includes(state));
+  // no filter at all would let every state through
+  const states = open.length === 0 ? ['none'] : open;
   const page = await listOverview(tx.manager, ability, { ...asked, filters: { ...asked.filters, states } });
   const counts = await queueCounts(tx.manager, ability, actor.userId, startOfToday(reading));
   return { ...page, items: page.items.map((row) => presentSummary(row, reading)), counts };
