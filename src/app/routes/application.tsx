@@ -85,7 +85,7 @@ function ApplicationPage({ number }: { number: string }) {
         }
         block={<ApplicationTitleBlock application={application} />}
       />
-      <CaseTimeline application={application} revisions={revisions} />
+      {application.windows.length > 0 && <CaseTimeline application={application} revisions={revisions} />}
       <CheckProgress check={application.check} revision={application.revision} />
       <div className="aside-columns">
         <div className="min-w-0">

@@ -24,6 +24,7 @@ export const besideTitle = (application: Titled): string | undefined =>
 /** "5, together 153.9 km". */
 export function linesWords(lineCount: number, totalLengthKm: number): string {
   if (lineCount === 0) return 'none yet';
+  if (totalLengthKm === 0) return String(lineCount);
   return `${lineCount}, together ${plainQuantity(totalLengthKm, 'km', 1)}`;
 }
 

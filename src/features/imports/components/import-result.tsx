@@ -19,6 +19,8 @@ export function ImportResult({ number, read, onDone }: ImportResultProps) {
   const [looking, setLooking] = useState(false);
   const take = useCaseWrite('takeImport', number);
   const { id, lines, faults, notices, dialect } = read;
+  // What concerns the whole file stands in the words on its dialect.
+  const aboutPlaces = notices.filter((n) => n.pointer !== undefined || n.row !== undefined);
   const replaced = lines.filter((l) => l.replaces);
   const takeLines = (which: 'all' | 'good') =>
     take.mutate({ params: { importId: id }, body: { take: which } }, { onSuccess: onDone });
@@ -29,7 +31,7 @@ export function ImportResult({ number, read, onDone }: ImportResultProps) {
         <p className="text-ink-soft">{`${dialectWords(dialect)}. If that is not so, save the file anew.`}</p>
       )}
       {replaced.length > 0 && <p>{`Replaced in the draft: ${replaced.map((l) => l.name).join(', ')}.`}</p>}
-      {notices.map((notice, i) => (
+      {aboutPlaces.map((notice, i) => (
         <p key={i} className="text-ink-soft">
           {notice.message}
         </p>
