@@ -31,6 +31,7 @@ function PersonItems({ session }: { session: Session }) {
           }))}
         />
       )}
+      <MenuItem onSelect={() => navigate('/rules')}>Rules of the check</MenuItem>
       <MenuItem onSelect={() => navigate('/account')}>Your account</MenuItem>
       {session.demo && <MenuItem onSelect={() => navigate('/mail-room')}>Mail room</MenuItem>}
       <MenuItem onSelect={leave}>Sign out</MenuItem>

@@ -1,11 +1,11 @@
 import { useState, type FormEvent } from 'react';
-import { Link, NavLink, useNavigate } from 'react-router-dom';
+import { Link, useLocation, useNavigate } from 'react-router-dom';
 import { Brand } from '../components/ui/brand';
 import { IconButton } from '../components/ui/button';
 import { useTheme } from '../hooks/use-theme';
 import type { Role, Session } from '../lib/api/session';
 import { applicationPath } from '../lib/paths';
-import { homeOf, PLACES } from './places';
+import { homeOf, placeOf, PLACES } from './places';
 import { NarrowMenu, PersonMenu } from './person-menu';
 
 /** Half dark, half light: the theme's switch. */
@@ -53,6 +53,7 @@ function FindByNumber({ role }: { role: Role }) {
 /** Mark, places, search, person, theme. */
 export function TopBar({ session }: { session: Session }) {
   const places = PLACES[session.role];
+  const current = placeOf(places, useLocation().pathname);
   return (
     <header className="top-bar">
       <div className="top-bar-in">
@@ -61,9 +62,9 @@ export function TopBar({ session }: { session: Session }) {
         </Link>
         <nav className="places" aria-label="Places">
           {places.map((place) => (
-            <NavLink key={place.to} to={place.to}>
+            <Link key={place.to} to={place.to} aria-current={place === current ? 'page' : undefined}>
               {place.label}
-            </NavLink>
+            </Link>
           ))}
         </nav>
         <div className="ml-auto flex items-center gap-3">

@@ -27,7 +27,7 @@ export function BalanceSection({ line, circuit, findingActions }: BalanceSection
     values.map((v) => ({ ...v, range: v.low === null || v.high === null ? null : [v.low, v.high] })),
   ).map((entry) => withFindings(entry, arranged.rows.get(entry.key) ?? [], findingActions));
   const own = line.findings.filter((f) => f.circuit === null || f.circuit === circuit);
-  const followers = values.filter((v) => v.follows !== null);
+  const followers = values.filter((v) => v.follows !== null && rowOf(v.parameter) === v.parameter);
   const inBalance = entries.filter((e) => e.grade === 'in-balance').length;
   return (
     <div id="balance">

@@ -62,7 +62,7 @@ function ShortcutTable({ check }: { check: HandCheck }) {
       <TableBody>
         {shortcutRows(check).map(({ name, unit, value, because }) => (
           <Row key={name}>
-            <RowHead>
+            <RowHead oneLine>
               {name} <span className="font-normal text-ink-soft">{unit}</span>
             </RowHead>
             <Cell number foldLabel="Shortcut">

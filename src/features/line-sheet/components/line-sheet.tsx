@@ -33,7 +33,7 @@ export function LineSheet({ applicationNumber, letter, lineKey, findingActions }
   const arranged = arrangeFindings(line.findings, circuit, rowOf);
   return (
     <article className="sheet sheet-main" aria-labelledby={titleId}>
-      <LineHead line={line} filed={filed} titleId={titleId} jumps={jumpsOf(line)} />
+      <LineHead line={line} filed={filed} titleId={titleId} jumps={jumpsOf(line, filed)} />
       <RunState line={line} />
       {circuits.length > 1 && (
         <div className="border-b border-rule px-4 py-3 field:px-6">
@@ -80,15 +80,18 @@ function Calculations({ line, filed, circuit }: { line: RevisionLine; filed: Fil
   );
 }
 
-function jumpsOf(line: RevisionLine): { id: string; label: string }[] {
+function jumpsOf(line: RevisionLine, filed: FiledLine): { id: string; label: string }[] {
+  const computed = line.equivalents.length > 0;
+  const hasOverhead = filed.normalised.sections.some((s) => s.kind === 'overhead');
+  const coupled = line.mutual.length > 0;
   return [
-    { id: 'balance', label: 'Balance' },
-    ...(line.mutual.length > 0 ? [{ id: 'coupling', label: 'Coupling' }] : []),
-    { id: 'geometry', label: 'Geometry' },
-    { id: 'whole-line', label: 'Whole line' },
-    { id: 'frequency', label: 'Frequency' },
-    { id: 'hand-check', label: 'By hand' },
-  ];
+    { id: 'balance', label: 'Balance', shown: true },
+    { id: 'coupling', label: 'Coupling', shown: coupled },
+    { id: 'geometry', label: 'Geometry', shown: true },
+    { id: 'whole-line', label: 'Whole line', shown: computed },
+    { id: 'frequency', label: 'Frequency', shown: hasOverhead },
+    { id: 'hand-check', label: 'By hand', shown: hasOverhead },
+  ].filter((jump) => jump.shown);
 }
 
 function circuitLabel(declared: readonly { circuit: number; circuitId?: string }[], circuit: number): string {

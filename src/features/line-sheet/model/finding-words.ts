@@ -18,21 +18,18 @@ function alsoExplains(cause: Cause, parameter: string | null): string {
   return others.length === 0 ? '' : ` It also explains ${joined(others)}.`;
 }
 
-const ASKS_FOR_CAUSE = new Set<Finding['family']>(['geometry', 'physics']);
-
 /**
  * The lines behind a finding's elbow. One matter stands once: the first of a group carries its causes, the others
- * say so; and where no slip fits, that is said too.
+ * say so. (Where no slip fits, the finding's own message says it.)
  */
 export function causeLines(finding: Finding): string[] {
-  if (finding.follows !== null) return [`Follows ${nameOf(finding.follows)}.`];
+  if (finding.follows !== null) {
+    return [finding.follows === finding.parameter ? 'Same cause.' : `Follows ${nameOf(finding.follows)}.`];
+  }
   if (finding.causes.length > 0) {
     return finding.causes.map((cause) => `${cause.sentence}${alsoExplains(cause, finding.parameter)}`);
   }
   if (!finding.first && finding.group !== null) return ['Same cause.'];
-  if (finding.grade === 'must-answer' && ASKS_FOR_CAUSE.has(finding.family) && finding.declared !== null) {
-    return ['No single slip that people make explains it.'];
-  }
   return [];
 }
 

@@ -72,7 +72,7 @@ export interface ShortcutRow {
   because: string;
 }
 
-const SMALLEST_SHARE = 1e-5;
+const SMALLEST_SHARE = 1e-4;
 
 function because({ causes, full }: ShortcutValue): string {
   const told = causes

@@ -16,7 +16,7 @@ export function DiscrepanciesSheet({ discrepancies, context, onRaise }: Discrepa
   const sorted = [...discrepancies].sort((a, b) => RANK[a.state] - RANK[b.state] || b.number - a.number);
   if (sorted.length === 0 && onRaise === null) return null;
   return (
-    <section className="sheet mt-6" aria-label="Discrepancies" id="discrepancies">
+    <section className="sheet mt-6" aria-label="Threads of the discrepancies" id="discrepancies">
       {sorted.map((discrepancy) => (
         <DiscrepancyThread key={discrepancy.id} discrepancy={discrepancy} context={context} />
       ))}

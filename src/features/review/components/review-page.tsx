@@ -98,7 +98,7 @@ function FiledReview({ application, current, letter, slots }: FiledReviewProps) 
       />
       {slots.countersigns}
       <DecisionSheet application={application} />
-      <div className="two-columns">
+      <div className="two-columns review-columns">
         <SideColumn
           revision={revision}
           discrepancies={discrepancies}
@@ -161,14 +161,16 @@ function SideColumn({ revision, application, discrepancies, mayAct, papers }: Si
   return (
     <div>
       <LinesNav lines={revision.lines} shown={shown} hrefOf={lineHref} />
-      <DiscrepanciesMini items={discrepancies} />
-      <RevisionsMini
-        number={number}
-        shown={revision.letter}
-        hrefOf={(letter) => `?revision=${letter}${shown ? `&line=${shown}` : ''}`}
-      />
-      <RunsMini number={number} letter={revision.letter} mayRun={mayAct} />
-      {papers}
+      <div className="side-rest">
+        <DiscrepanciesMini items={discrepancies} />
+        <RevisionsMini
+          number={number}
+          shown={revision.letter}
+          hrefOf={(letter) => `?revision=${letter}${shown ? `&line=${shown}` : ''}`}
+        />
+        <RunsMini number={number} letter={revision.letter} mayRun={mayAct} />
+        {papers}
+      </div>
     </div>
   );
 }
