@@ -136,11 +136,11 @@ function asLine(s: OverheadSection): LineInput {
 
 /** Times a solve of each line in turn. */
 function solveNs(all: readonly OverheadSection[]): number {
-  return leastNs((k) => must(solveSection(all[k % all.length] as OverheadSection, 60).ok), all.length);
+  return leastNs((k) => must(solveSection(all[k % all.length] as OverheadSection, 60).ok), 1.5);
 }
 
-function slowNs(all: readonly OverheadSection[], calls: number): number {
-  return leastNs((k) => void referenceSection(all[k] as OverheadSection, 60, earthBySeries), calls, 4);
+function slowNs(all: readonly OverheadSection[]): number {
+  return leastNs((k) => void referenceSection(all[k % all.length] as OverheadSection, 60, earthBySeries));
 }
 
 /** Sweeps, whole lines and ranges on the small case. */
@@ -148,14 +148,12 @@ function widerRows(all: readonly OverheadSection[], single: number): BenchRow[] 
   const grid = logarithmicGrid(1, 1e6, 200);
   const at = (k: number): OverheadSection => all[k % all.length] as OverheadSection;
   const whole = all.map(asLine);
-  const sweepNs = leastNs((k) => must(sweep(at(k), grid).ok), 40, 12);
-  const lineNs = leastNs((k) => must(solveLine(whole[k % whole.length] as LineInput).ok), all.length);
-  const rangeNs = leastNs(
-    (k) => must(uncertainty(whole[k % whole.length] as LineInput, DEFAULT_INPUT_UNCERTAINTIES).ok),
-    all.length,
-    15,
+  const sweepNs = leastNs((k) => must(sweep(at(k), grid).ok), 1.5);
+  const lineNs = leastNs((k) => must(solveLine(whole[k % whole.length] as LineInput).ok));
+  const rangeNs = leastNs((k) =>
+    must(uncertainty(whole[k % whole.length] as LineInput, DEFAULT_INPUT_UNCERTAINTIES).ok),
   );
-  const many = leastNs((k) => must(solveSection(at(k), 60).ok), 10_000, 4) * 10_000;
+  const many = leastNs((k) => must(solveSection(at(k), 60).ok), 1, 10_000) * 10_000;
   return [
     row('engine/sweep200', sweepNs, 'ns', 'engine/single2', single),
     row('engine/line-single2', lineNs, 'ns', 'engine/single2', single),
@@ -174,8 +172,8 @@ export async function benchEngine(): Promise<BenchRow[]> {
   [...small.slice(0, 5), ...large.slice(0, 2)].forEach(checkComparison);
   const single = solveNs(small);
   const double = solveNs(large);
-  const slowSingle = slowNs(small, 60);
-  const slowDouble = slowNs(large, 6);
+  const slowSingle = slowNs(small);
+  const slowDouble = slowNs(large);
   const heap = heapGrowth(
     (k) => must(solveSection(small[k % small.length] as OverheadSection, 60).ok),
     20_000,
@@ -185,10 +183,8 @@ export async function benchEngine(): Promise<BenchRow[]> {
     100,
   );
   const largeLines = large.map(asLine);
-  const rangeDouble = leastNs(
-    (k) => must(uncertainty(largeLines[k] as LineInput, DEFAULT_INPUT_UNCERTAINTIES).ok),
-    large.length,
-    10,
+  const rangeDouble = leastNs((k) =>
+    must(uncertainty(largeLines[k % largeLines.length] as LineInput, DEFAULT_INPUT_UNCERTAINTIES).ok),
   );
   return [
     row('engine/single2', single, 'ns', 'engine/single2-mathjs', slowSingle),

@@ -9,21 +9,38 @@ export interface BenchRow {
   ratio: number;
 }
 
+/** Shortest batch that the clock resolves well and that often runs undisturbed, ns. */
+const BATCH_NS = 1e6;
+
+function batchNs(call: (k: number) => void, from: number, calls: number): number {
+  const start = process.hrtime.bigint();
+  for (let k = from; k < from + calls; k++) call(k);
+  return Number(process.hrtime.bigint() - start);
+}
+
 /**
- * Least time of one call over several batches, ns. The least, since everything else on the machine only adds.
+ * Least mean time of one call over many short batches, ns: whatever else runs on the machine only adds.
  *
  * @param call receives a running number, so that every call can have other input
- * @param calls calls a batch
- * @param batches number of batches, of which the first warm up
+ * @param seconds how long to measure, after a quarter of it to warm up
+ * @param least calls a batch holds at least
  */
-export function leastNs(call: (k: number) => void, calls: number, batches = 25): number {
-  let least = Infinity;
-  for (let b = 0; b < batches; b++) {
-    const start = process.hrtime.bigint();
-    for (let k = 0; k < calls; k++) call(k);
-    least = Math.min(least, Number(process.hrtime.bigint() - start) / calls);
-  }
-  return least;
+export function leastNs(call: (k: number) => void, seconds = 0.8, least = 1): number {
+  let k = 0;
+  const run = (calls: number): number => {
+    const ns = batchNs(call, k, calls);
+    k += calls;
+    return ns;
+  };
+  const warmUntil = performance.now() + 250 * seconds;
+  let mean = run(1);
+  while (performance.now() < warmUntil) mean = run(least) / least;
+  const calls = Math.max(least, Math.ceil(BATCH_NS / mean));
+  const until = performance.now() + 1000 * seconds;
+  let best = Infinity;
+  do best = Math.min(best, run(calls) / calls);
+  while (performance.now() < until);
+  return best;
 }
 
 /** A row from two measurements. */
