@@ -81,7 +81,7 @@ function carsonSeries(h: number, x: number, logD: number, out: Float64Array): vo
     oddS = evenC * x + evenS * h;
     evenC = oddC * h - oddS * x;
     evenS = oddC * x + oddS * h;
-    if ((Math.abs(oddC) + Math.abs(oddS)) * Math.abs(b) < 1e-12) break;
+    if ((Math.abs(oddC) + Math.abs(oddS)) * Math.abs(b) < 1e-10) break;
   }
   out[0] = 2 * hr;
   out[1] = 2 * hi;

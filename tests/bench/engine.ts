@@ -183,6 +183,7 @@ export async function benchEngine(): Promise<BenchRow[]> {
     100,
   );
   const largeLines = large.map(asLine);
+  const lineDouble = leastNs((k) => must(solveLine(largeLines[k % largeLines.length] as LineInput).ok));
   const rangeDouble = leastNs((k) =>
     must(uncertainty(largeLines[k % largeLines.length] as LineInput, DEFAULT_INPUT_UNCERTAINTIES).ok),
   );
@@ -192,7 +193,8 @@ export async function benchEngine(): Promise<BenchRow[]> {
     row('engine/double4', double, 'ns', 'engine/double4-mathjs', slowDouble),
     row('engine/double4-mathjs', slowDouble, 'ns', 'engine/double4', double),
     ...widerRows(small, single),
-    row('engine/range-double4', rangeDouble, 'ns', 'engine/double4', double),
+    row('engine/line-double4', lineDouble, 'ns', 'engine/double4', double),
+    row('engine/range-double4', rangeDouble, 'ns', 'engine/line-double4', lineDouble),
     row('engine/heap-growth', heap, 'byte', 'engine/heap-growth-mathjs', Math.max(1, slowHeap)),
   ];
 }
