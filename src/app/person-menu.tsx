@@ -14,16 +14,22 @@ function PersonItems({ session }: { session: Session }) {
   const navigate = useNavigate();
   const signOut = useSignOut();
   const switchTo = useSwitchOrganisation();
-  const leave = () => signOut.mutate(undefined, { onSettled: () => void navigate('/sign-in') });
-  const change = (organisationId: string) =>
-    switchTo.mutate(organisationId, { onSuccess: (next) => void (next && navigate(homeOf(next.role))) });
+  // The menu is gone by the time the answer comes: a promise goes on, a mutation's own callbacks would not.
+  const leave = async () => {
+    await signOut.mutateAsync().catch(() => undefined);
+    await navigate('/sign-in');
+  };
+  const change = async (organisationId: string) => {
+    const next = await switchTo.mutateAsync(organisationId);
+    if (next) await navigate(homeOf(next.role));
+  };
   return (
     <>
       {session.memberships.length > 1 && (
         <MenuChoice
           label="Work for"
           value={session.organisation.id}
-          onChange={change}
+          onChange={(organisationId) => void change(organisationId)}
           options={session.memberships.map((membership) => ({
             value: membership.organisationId,
             label: membership.organisationName,
@@ -31,10 +37,12 @@ function PersonItems({ session }: { session: Session }) {
           }))}
         />
       )}
-      <MenuItem onSelect={() => navigate('/rules')}>Rules of the check</MenuItem>
+      {session.role === 'reviewer' && (
+        <MenuItem onSelect={() => navigate('/rules')}>Rules of the check</MenuItem>
+      )}
       <MenuItem onSelect={() => navigate('/account')}>Your account</MenuItem>
       {session.demo && <MenuItem onSelect={() => navigate('/mail-room')}>Mail room</MenuItem>}
-      <MenuItem onSelect={leave}>Sign out</MenuItem>
+      <MenuItem onSelect={() => void leave()}>Sign out</MenuItem>
     </>
   );
 }

@@ -8,7 +8,8 @@ describe('the current place', () => {
     ['reviewer', '/applications/27-0418/record', 'Queue'],
     ['reviewer', '/applications', 'Applications'],
     ['applicant', '/applications/27-0418/lines/L1', 'Applications'],
-    ['administrator', '/applications/27-0418/review', 'Applications'],
+    ['administrator', '/rules', 'Rules'],
+    ['administrator', '/applications/27-0418/review', undefined],
     ['reviewer', '/rules', undefined],
   ] as const)('of a %s at %s is %s', (role, path, label) => {
     expect(placeOf(PLACES[role], path)?.label).toBe(label);
