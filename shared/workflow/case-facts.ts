@@ -17,8 +17,8 @@ export interface CaseFacts {
   reviewerName: string | null;
   draft: {
     lineCount: number;
-    /** Faults by schema, and geometry that cannot be computed. */
-    faultCount: number;
+    /** Keys of lines with faults by schema, or with geometry that cannot be computed. */
+    faultyLines: readonly string[];
     /** The draft's lines equal those of the revision that was returned. */
     unchanged: boolean;
   };

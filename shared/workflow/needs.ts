@@ -38,11 +38,17 @@ const isOrAre = (count: number) => (count === 1 ? 'is' : 'are');
 /** The draft has lines, each complete by schema and with geometry that can be computed. */
 export const isComplete: Need = ({ draft }, _, words) => {
   if (draft.lineCount === 0) return lack(`${words} opens once the draft has a line.`);
-  if (draft.faultCount === 0) return null;
-  const what =
-    draft.faultCount === 1 ? 'one fault of the draft is' : `${draft.faultCount} faults of the draft are`;
-  return lack(`${words} opens once ${what} mended.`);
+  const { length } = draft.faultyLines;
+  if (length === 0) return null;
+  return lack(`${words} opens once ${nameSome(draft.faultyLines)} ${isOrAre(length)} complete.`);
 };
+
+/** The first three, and how many more there are. */
+function nameSome(names: readonly string[]): string {
+  const shown = names.slice(0, 3);
+  const more = names.length - shown.length;
+  return joinWords(more > 0 ? [...shown, `${more} more`] : shown);
+}
 
 /** Each open discrepancy is answered by a change or an explanation; a change has to be there. */
 export const allAnswered: Need = ({ discrepancies, draft }, _, words) => {
@@ -99,8 +105,6 @@ export const allSettled: Need = ({ discrepancies }, _, words) => {
 /** Every Must answer of the current revision is settled or waived. */
 export const allMustAnswersDone: Need = ({ openMustAnswers }, _, words) => {
   if (openMustAnswers.length === 0) return null;
-  const shown = openMustAnswers.slice(0, 3);
-  const more = openMustAnswers.length - shown.length;
-  const names = joinWords(more > 0 ? [...shown, `${more} more`] : shown);
+  const names = nameSome(openMustAnswers);
   return lack(`${words} opens once ${names} ${isOrAre(openMustAnswers.length)} settled or waived.`);
 };

@@ -27,15 +27,15 @@ const about = (
   pointOfConnection,
 });
 
-/** What happened to Fellgate Wind's applications in the weeks before today. */
+/** What happened to Fellgate Renewables’ applications in the weeks before today. */
 export async function playFellgate(stage: Stage, cast: Cast): Promise<void> {
-  const applicant = cast('sandgate', 'Fellgate Wind');
+  const applicant = cast('sandgate', 'Fellgate Renewables');
   const thornholt = cast('thornholt');
   const wind = await DemoCase.open(
     stage,
     stage.ago(44),
     applicant,
-    about('Fellgate Wind, 480 MW at Sarn', 'generation', 480, 'Sarn'),
+    about('Fellgate Wind', 'generation', 480, 'Sarn'),
     LINES.fellgateWind(),
   );
   await wind.file(stage.ago(42, '11:20'));
@@ -71,7 +71,7 @@ export async function playFellgate(stage: Stage, cast: Cast): Promise<void> {
     stage,
     stage.ago(3),
     applicant,
-    about('Fellgate Storage, 200 MW at Skell Edge', 'storage', 200, 'Skell Edge'),
+    about('Fellgate Storage', 'storage', 200, 'Skell Edge'),
     LINES.fellgateStorage(),
   );
   await storage.file(stage.ago(1, '15:40'));
@@ -80,7 +80,7 @@ export async function playFellgate(stage: Stage, cast: Cast): Promise<void> {
     stage,
     stage.ago(2),
     applicant,
-    about('Harrowfell Solar, 180 MW at Harrow Fell', 'generation', 180, 'Harrow Fell'),
+    about('Harrowfell Solar', 'generation', 180, 'Harrow Fell'),
     LINES.harrowfellSolar(),
   );
   const started = {
@@ -104,7 +104,7 @@ export async function playSkerrow(stage: Stage, cast: Cast): Promise<void> {
     stage,
     stage.ago(20),
     holm,
-    about('Pellow Tidal, 45 MW at Pellow Head', 'generation', 45, 'Pellow Head'),
+    about('Pellow Tidal', 'generation', 45, 'Pellow Head'),
     LINES.pellowTidal(),
   );
   await tidal.file(stage.ago(18));
@@ -115,7 +115,7 @@ export async function playSkerrow(stage: Stage, cast: Cast): Promise<void> {
     stage,
     stage.ago(27),
     holm,
-    about('Wexmoor Solar, 150 MW at Tarn Moss', 'generation', 150, 'Tarn Moss'),
+    about('Wexmoor Solar', 'generation', 150, 'Tarn Moss'),
     LINES.wexmoorSolar(),
   );
   await wexmoor.file(stage.ago(25));
@@ -134,7 +134,7 @@ async function playSkerrowWind(stage: Stage, applicant: UserActor, varley: UserA
     stage,
     stage.ago(15),
     applicant,
-    about('Skerrow Wind, 620 MW at Lang Knott', 'generation', 620, 'Lang Knott'),
+    about('Skerrow Wind', 'generation', 620, 'Lang Knott'),
     LINES.skerrowWind(),
   );
   await wind.file(stage.ago(14));
@@ -153,7 +153,7 @@ async function playTarnMoss(stage: Stage, applicant: UserActor, larkspur: UserAc
     stage,
     stage.ago(18),
     applicant,
-    about('Tarn Moss Wind, 540 MW at Tarn Moss', 'generation', 540, 'Tarn Moss'),
+    about('Tarn Moss Wind', 'generation', 540, 'Tarn Moss'),
     LINES.tarnMossWind(),
   );
   await moss.file(stage.ago(16));
@@ -206,25 +206,25 @@ async function playSkellEdge(stage: Stage, applicant: UserActor, thornholt: User
   );
 }
 
-/** What happened to Lintgarth Hydrogen's. */
+/** What happened to Lintgarth Industries’. */
 export async function playLintgarth(stage: Stage, cast: Cast): Promise<void> {
-  const garth = cast('garth', 'Lintgarth Hydrogen');
+  const garth = cast('garth', 'Lintgarth Industries');
   const hydrogen = await DemoCase.open(
     stage,
     stage.ago(4),
     garth,
-    about('Lintgarth Hydrogen, 90 MW at Harrow Fell', 'load', 90, 'Harrow Fell'),
+    about('Lintgarth Hydrogen', 'load', 90, 'Harrow Fell'),
     LINES.lintgarthHydrogen(),
   );
   await hydrogen.file(stage.ago(3));
   await playAldbeck(stage, garth, cast('varley'), cast('larkspur'));
-  await playDunmere(stage, cast('aske', 'Lintgarth Hydrogen'), cast('thornholt'));
+  await playDunmere(stage, cast('aske', 'Lintgarth Industries'), cast('thornholt'));
   await playCairnside(stage, garth, cast('varley'));
   const hydro = await DemoCase.open(
     stage,
     stage.ago(1),
     garth,
-    about('Ullscar Hydro, 36 MW at Ullscar Foot', 'generation', 36, 'Ullscar Foot'),
+    about('Ullscar Hydro', 'generation', 36, 'Ullscar Foot'),
     LINES.ullscarHydro(),
   );
   await hydro.file(stage.ago(0, '08:05'));
@@ -264,7 +264,7 @@ async function playDunmere(stage: Stage, applicant: UserActor, thornholt: UserAc
     stage,
     stage.ago(30),
     applicant,
-    about('Dunmere Storage, 60 MW at Dunmere', 'storage', 60, 'Dunmere'),
+    about('Dunmere Storage', 'storage', 60, 'Dunmere'),
     LINES.dunmereStorage(),
   );
   await storage.file(stage.ago(29));

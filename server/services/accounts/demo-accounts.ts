@@ -6,7 +6,7 @@ export const DEMO_PASSWORD = 'level beam on a pivot';
 export const GRID_OWNER = 'Northmoor Grid';
 
 /** Organisations that apply to connect. */
-export const APPLICANTS = ['Fellgate Wind', 'Skerrow Power', 'Lintgarth Hydrogen'] as const;
+export const APPLICANTS = ['Fellgate Renewables', 'Skerrow Power', 'Lintgarth Industries'] as const;
 
 export interface DemoAccount {
   email: string;
@@ -20,20 +20,20 @@ export const DEMO_ACCOUNTS: readonly DemoAccount[] = [
     email: 'sandgate@fellgate.example',
     name: 'P. Sandgate',
     role: 'applicant',
-    organisations: ['Fellgate Wind'],
+    organisations: ['Fellgate Renewables'],
   },
   { email: 'holm@skerrow.example', name: 'I. Holm', role: 'applicant', organisations: ['Skerrow Power'] },
   {
     email: 'garth@lintgarth.example',
     name: 'A. Garth',
     role: 'applicant',
-    organisations: ['Lintgarth Hydrogen'],
+    organisations: ['Lintgarth Industries'],
   },
   {
     email: 'aske@askeline.example',
     name: 'R. Aske',
     role: 'applicant',
-    organisations: ['Skerrow Power', 'Lintgarth Hydrogen'],
+    organisations: ['Skerrow Power', 'Lintgarth Industries'],
   },
   {
     email: 'thornholt@northmoor.example',

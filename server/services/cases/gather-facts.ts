@@ -5,7 +5,7 @@ import { findingsOfRun } from '../../repositories/run.repository';
 import type { Finding } from '../../entities/verdict.entities';
 import type { CaseFacts } from '../../../shared/workflow/case-facts';
 import { isDraftEditable, isOpen } from '../../../shared/workflow/states';
-import { readDraft } from '../drafts/read-draft';
+import { faultyLines, readDraft } from '../drafts/read-draft';
 import { findingName } from '../findings/finding-names';
 import type { Caller } from './caller';
 import type { CaseFile } from './case-file';
@@ -47,7 +47,7 @@ async function openMustAnswers({ tx }: Caller, { run, revision }: CaseFile): Pro
 /** The draft matters to the applicant, and only while it can be filed. */
 async function draftFacts(caller: Caller, file: CaseFile): Promise<CaseFacts['draft']> {
   const matters = caller.actor.role === 'applicant' && isDraftEditable(file.round.state);
-  if (!matters) return { lineCount: 0, faultCount: 0, unchanged: false };
+  if (!matters) return { lineCount: 0, faultyLines: [], unchanged: false };
   const draft = await readDraft(caller.tx, file);
-  return { lineCount: draft.lines.length, faultCount: draft.faults.length, unchanged: draft.unchanged };
+  return { lineCount: draft.rows.length, faultyLines: faultyLines(draft), unchanged: draft.unchanged };
 }

@@ -35,6 +35,16 @@ export async function readDraft(tx: Transaction, file: CaseFile): Promise<ReadDr
   };
 }
 
+/** Key of the line that a fault of the draft is about. */
+export function lineKeyOf(fault: PointerFault, rows: readonly DraftLine[]): string | undefined {
+  return rows[Number(/^\/lines\/(\d+)/.exec(fault.pointer)?.[1] ?? -1)]?.lineKey;
+}
+
+/** Keys of the lines that cannot be filed yet. */
+export function faultyLines({ faults, rows }: Pick<ReadDraft, 'faults' | 'rows'>): string[] {
+  return [...new Set(faults.flatMap((fault) => lineKeyOf(fault, rows) ?? []))];
+}
+
 function readRows(rows: readonly DraftLine[], context: ReadContext) {
   const json = { format: 'filing/1', lines: rows.map((row) => row.body) };
   const written = Object.assign(

@@ -1,13 +1,13 @@
 import { recordEvent } from '../../database/audit/record-event';
 import type { Revision } from '../../entities/filed.entities';
-import { conflict, invalidContent } from '../../errors/problem';
+import { invalidContent } from '../../errors/problem';
 import { touchApplication } from '../../repositories/application.repository';
 import type { FileApplicationRequest } from '../../../shared/contracts/api.generated';
 import type { Caller } from '../cases/caller';
 import { holdCase, type CaseFile } from '../cases/case-file';
 import { gatherFacts } from '../cases/gather-facts';
 import { moveRound, requireStep, requireVersion } from '../cases/take-step';
-import { readDraft, type ReadDraft } from '../drafts/read-draft';
+import { lineKeyOf, readDraft, type ReadDraft } from '../drafts/read-draft';
 import { mailReceipt } from '../letters/mail-receipt';
 import { freezeRevision } from './freeze-revision';
 import { queueRun } from './queue-run';
@@ -43,8 +43,7 @@ export async function fileApplication(
 /** The faults as they are, each with its pointer and the key of its line. */
 function refuseFaults(draft: ReadDraft): never {
   const errors = draft.faults.map((fault) => {
-    const index = Number(/^\/lines\/(\d+)/.exec(fault.pointer)?.[1] ?? -1);
-    const lineKey = draft.rows[index]?.lineKey;
+    const lineKey = lineKeyOf(fault, draft.rows);
     return lineKey === undefined ? fault : { ...fault, lineKey };
   });
   throw invalidContent(errors, 'Some lines of the draft cannot be filed yet.');
@@ -54,6 +53,3 @@ async function markFiled({ tx }: Caller, { application }: CaseFile): Promise<voi
   if (application.firstFiledAt !== null) return;
   await touchApplication(tx.manager, application.id, tx.now, { firstFiledAt: tx.now });
 }
-
-/** Said where a step needs a revision and there is none; the workflow lets nobody come here. */
-export const noRevision = () => conflict('Nothing has been filed yet.');

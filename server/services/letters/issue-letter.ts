@@ -4,6 +4,7 @@ import { currentCalendar } from '../../repositories/calendar.repository';
 import { gridOwner, namesOf, organisationNames } from '../../repositories/people-names.repository';
 import { linesOfRevision } from '../../repositories/revision.repository';
 import { formatDate } from '../../../shared/format/dates';
+import { quantity } from '../../../shared/format/numbers';
 import { STATE_WORDS, type State } from '../../../shared/workflow/states';
 import type { Caller } from '../cases/caller';
 import { filedRevision, type CaseFile } from '../cases/case-file';
@@ -85,7 +86,7 @@ async function contentOf({ tx, actor }: Caller, file: CaseFile, text: LetterText
     signedBy: actor.name,
     createdAt: tx.now,
     block: {
-      application: application.title,
+      application: connectionWords(application),
       subject: text.kind === 'return' ? 'Discrepancy letter' : 'Decision',
       number: application.number,
       revision: revision.letter,
@@ -98,4 +99,9 @@ async function contentOf({ tx, actor }: Caller, file: CaseFile, text: LetterText
       state: STATE_WORDS[text.state],
     },
   };
+}
+
+/** "Fellgate Wind, 480 MW at Sarn". */
+function connectionWords({ title, capacityMw, pointOfConnection }: CaseFile['application']): string {
+  return capacityMw === null ? title : `${title}, ${quantity(capacityMw, 'MW')} at ${pointOfConnection}`;
 }

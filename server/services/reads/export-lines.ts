@@ -1,4 +1,4 @@
-import { conflict, forbidden, notFound } from '../../errors/problem';
+import { conflict, forbidden, invalidContent, notFound } from '../../errors/problem';
 import { csvFile, jsonFile } from '../../files/write-filing-file';
 import { findRevision, linesOfRevision } from '../../repositories/revision.repository';
 import type { ExportLinesRequest } from '../../../shared/contracts/api.generated';
@@ -14,7 +14,13 @@ export async function exportLines(caller: Caller, reference: string, query: Expo
   const format = query.format ?? 'json';
   const written = format === 'csv' ? csvFile(sheets) : jsonFile(sheets);
   if (!written.ok) {
-    throw conflict('These lines do not fit into a CSV file; JSON takes them.', { reasons: written.reasons });
+    throw invalidContent(
+      written.reasons.map(({ line, message }) => ({
+        value: line,
+        expected: 'a line that CSV can hold',
+        message,
+      })),
+    );
   }
   const { bytes, mediaType } = written;
   const letter = query.revision ?? (caller.actor.role === 'applicant' ? 'draft' : file.revision?.letter);

@@ -6,7 +6,7 @@ import type * as Api from '../../../shared/contracts/api.generated';
 import type { PointerFault } from '../../../shared/contracts/faults';
 import type { Caller } from '../cases/caller';
 import { readCase, type CaseFile } from '../cases/case-file';
-import { readDraft, readDraftLine } from '../drafts/read-draft';
+import { lineKeyOf, readDraft, readDraftLine } from '../drafts/read-draft';
 import { readingContext } from '../rules/reading-context';
 
 const LISTED_FAULTS = 2000;
@@ -48,8 +48,7 @@ function faultsWithin(faults: readonly PointerFault[], pointer: string): Pointer
 }
 
 function withLineKey(fault: PointerFault, rows: readonly DraftLine[]): Api.Fault {
-  const index = Number(/^\/lines\/(\d+)/.exec(fault.pointer)?.[1] ?? -1);
-  const lineKey = rows[index]?.lineKey;
+  const lineKey = lineKeyOf(fault, rows);
   return { ...presentFault(fault), ...(lineKey === undefined ? {} : { lineKey }) };
 }
 

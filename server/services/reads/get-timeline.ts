@@ -12,6 +12,9 @@ const LIMIT = 2000;
 /** Acts that reviewers have among themselves. */
 const AMONG_REVIEWERS = /^(waiver\.|decline\.|countersign\.|finding\.|check\.(asked|adopted)|note\.)/;
 
+/** Work on a draft, which is the applicant's own until it is filed. */
+const AMONG_APPLICANTS = /^(line\.|lines\.|application\.(created|updated)$)/;
+
 /** What happened to an application, oldest first. */
 export async function getTimeline(caller: Caller, reference: string): Promise<Api.Timeline> {
   const { tx, actor } = caller;
@@ -19,7 +22,9 @@ export async function getTimeline(caller: Caller, reference: string): Promise<Ap
   const events = await eventsOf(tx.manager, application.id, LIMIT + 1);
   const shown = events
     .slice(0, LIMIT)
-    .filter((event) => actor.role !== 'applicant' || isForApplicants(event, events));
+    .filter((event) =>
+      actor.role === 'applicant' ? isForApplicants(event, events) : !AMONG_APPLICANTS.test(event.act),
+    );
   const owner = await gridOwner(tx.manager);
   const actors = events.flatMap((event) => event.actorId ?? []);
   const ownersPeople = await asSystem(tx, (manager) => membersAmong(manager, owner.id, actors));

@@ -10,7 +10,7 @@ const facts = (change: Partial<CaseFacts> = {}): CaseFacts => ({
   hasAcceptedRecord: false,
   reviewerId: ME,
   reviewerName: 'M. Thornholt',
-  draft: { lineCount: 2, faultCount: 0, unchanged: false },
+  draft: { lineCount: 2, faultyLines: [], unchanged: false },
   run: { state: 'done', linesChecked: 2, lineCount: 2 },
   discrepancies: [],
   openMustAnswers: [],
@@ -93,12 +93,15 @@ describe('the table of steps', () => {
 
 describe('refusals say what opens the step', () => {
   it('file needs a line, no faults and every answer', () => {
-    const draft = { lineCount: 2, faultCount: 0, unchanged: false };
+    const draft = { lineCount: 2, faultyLines: [], unchanged: false };
     expect(reason('file', { state: 'draft', draft: { ...draft, lineCount: 0 } })).toBe(
       'File opens once the draft has a line.',
     );
-    expect(reason('file', { state: 'draft', draft: { ...draft, faultCount: 3 } })).toBe(
-      'File opens once 3 faults of the draft are mended.',
+    expect(
+      reason('file', { state: 'draft', draft: { ...draft, faultyLines: ['L1', 'L2', 'L4', 'L5', 'L9'] } }),
+    ).toBe('File opens once L1, L2, L4 and 2 more are complete.');
+    expect(reason('file', { state: 'draft', draft: { ...draft, faultyLines: ['L3'] } })).toBe(
+      'File opens once L3 is complete.',
     );
     expect(reason('file', { state: 'returned', discrepancies: [open(2), open(3), answered(4)] })).toBe(
       'File opens once D-2 and D-3 are answered.',
