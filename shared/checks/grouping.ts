@@ -1,6 +1,7 @@
 import type { LooseFinding, LooseFindings } from './apply-rules';
 import type { LineMatters } from './causes/find-causes';
 import type { Matter } from './causes/solve-problem';
+import { MADE_OF } from './parameters';
 import type { FindingParameter } from './parameters';
 import type { Cause, Finding } from './types';
 
@@ -12,6 +13,12 @@ export interface GroupedFindings {
 }
 
 const UNEXPLAINED_WORDS = ' None of the slips that people usually make explains it.';
+
+/** Where a finding belongs: its group, and the matter that explains it. */
+interface Place {
+  group: number;
+  matter: Matter | null;
+}
 
 /** Hands out group numbers; slips in the geometry are one matter over all circuits of the line. */
 class Groups {
@@ -79,19 +86,25 @@ function groupOne(
   groups: Groups,
   wereSought: boolean,
 ): Finding[] {
-  const byParameter = new Map<FindingParameter, { group: number; matter: Matter | null }>();
+  const byParameter = new Map<FindingParameter, Place>();
   for (const matter of matters) {
     const group = groups.of(matter.causes[0]);
     for (const parameter of matter.explains) byParameter.set(parameter, { group, matter });
   }
-  const placeOf = (parameter: FindingParameter | undefined): { group: number; matter: Matter | null } => {
-    const place = parameter === undefined ? undefined : byParameter.get(parameter);
+  // Without geometry it is bands and wave speed that show a slip in the constants that they are made of.
+  const possiblePlace = (parameter: FindingParameter): Place | undefined =>
+    MADE_OF[parameter]
+      .map((part) => byParameter.get(part))
+      .find((place) => place?.matter?.causes[0]?.possible === true);
+  const placeOf = (parameter: FindingParameter | undefined): Place => {
+    const place =
+      parameter === undefined ? undefined : (byParameter.get(parameter) ?? possiblePlace(parameter));
     const own = place ?? { group: groups.next(), matter: null };
     if (parameter !== undefined) byParameter.set(parameter, own);
     return own;
   };
   // Leaders first, so that those that follow find the group of what they follow.
-  const placed = new Map<LooseFinding, { group: number; matter: Matter | null }>();
+  const placed = new Map<LooseFinding, Place>();
   for (const finding of [...found].sort((a, b) => rank(a) - rank(b))) {
     placed.set(finding, placeOf(rootOf(finding, found)));
   }
@@ -122,9 +135,13 @@ function rootOf(finding: LooseFinding, all: readonly LooseFinding[]): FindingPar
   return parameter;
 }
 
-function causesFor({ parameter, family }: LooseFinding, matter: Matter | null): Cause[] {
-  if (matter === null || (family !== 'geometry' && family !== 'physics')) return [];
-  return matter.causes.filter(({ explains }) =>
-    (explains as FindingParameter[]).includes(parameter ?? 'ratingA'),
+function causesFor({ parameter, family, grade }: LooseFinding, matter: Matter | null): Cause[] {
+  if (matter === null || parameter === undefined || grade === 'note') return [];
+  const causes = matter.causes.filter((cause) =>
+    cause.possible === true
+      ? MADE_OF[parameter].some((part) => cause.explains.includes(part))
+      : cause.explains.some((explained) => explained === parameter),
   );
+  const isPossible = causes[0]?.possible === true;
+  return family === 'geometry' || family === 'physics' || (isPossible && family === 'typical') ? causes : [];
 }

@@ -53,7 +53,7 @@ export function variantItems(fit: VariantFit, problem: Problem, honest: readonly
   const { variant, reach, differences } = fit;
   if (reach === 0) return [];
   const scopes: Scope[] =
-    variant.in === 'geometry'
+    variant.in === 'geometry' || variant.isWhole === true
       ? [{ mask: reach, prior: 0 }]
       : scopesWithin(reach, problem.targets, CALCULATION_SCOPES);
   return scopes.flatMap(({ mask, prior }): Item[] => {

@@ -70,21 +70,27 @@ export function groundWireSlips({ bench }: VariantContext): Variant[] {
       ? { ...section, groundWireBonding: 'segmented' }
       : null,
   );
-  const common = { code: 'no-ground-wires', in: 'declared', model: ENGINE_MODEL, freedom: 0 } as const;
   return [
-    ...(without === null
-      ? []
-      : [{ ...common, outcome: without, prior: -0.5, words: 'the ground wires were left out' }]),
-    ...(idle === null
-      ? []
-      : [
-          {
-            ...common,
-            outcome: idle,
-            prior: -2,
-            words: 'the ground wires were taken as carrying no current',
-          },
-        ]),
+    ...wireVariants(without, -0.5, 'the ground wires were left out'),
+    ...wireVariants(idle, -2, 'the ground wires were taken as carrying no current'),
+  ];
+}
+
+/** Left out of everything, or of the zero sequence alone, which is where they matter. */
+function wireVariants(outcome: Outcome | null, prior: number, words: string): Variant[] {
+  if (outcome === null) return [];
+  const common = {
+    code: 'no-ground-wires',
+    in: 'declared',
+    model: ENGINE_MODEL,
+    freedom: 0,
+    outcome,
+    words,
+  } as const;
+  const isZero = (parameter: DeclaredParameter): boolean => parameter.includes('0');
+  return [
+    { ...common, isWhole: true, prior },
+    { ...common, reach: isZero, prior: prior - 0.3 },
   ];
 }
 

@@ -15,6 +15,8 @@ export interface Variant {
   outcome: Outcome;
   /** Constants that it can reach; all when absent. */
   reach?: (parameter: DeclaredParameter) => boolean;
+  /** Made in everything that it moves, never in a part of it. */
+  isWhole?: true;
   prior: number;
   /** Spread of its own model, a share. */
   model: number;
