@@ -5,6 +5,7 @@ import { ButtonLink } from '../../components/ui/button';
 import { PageHead } from '../../components/ui/page-head';
 import { ApplicantSteps } from '../../features/applications/components/applicant-steps';
 import { ApplicationTitleBlock } from '../../features/applications/components/application-title-block';
+import { CasePrintFrame } from '../../features/applications/components/case-print-frame';
 import { CaseTimeline } from '../../features/applications/components/case-timeline';
 import { CheckProgress } from '../../features/applications/components/check-progress';
 import { DraftFaults } from '../../features/applications/components/draft-faults';
@@ -66,6 +67,7 @@ function ApplicationPage({ number }: { number: string }) {
   };
   return (
     <>
+      <CasePrintFrame number={number} subject="Application" />
       <PageHead
         title={application.title}
         documentTitle={`${number} ${application.title}`}

@@ -2,6 +2,7 @@ import type { QueryClient } from '@tanstack/react-query';
 import { useParams } from 'react-router-dom';
 import { Notice } from '../../components/feedback/notice';
 import { PageHead } from '../../components/ui/page-head';
+import { CasePrintFrame } from '../../features/applications/components/case-print-frame';
 import { LineSheet } from '../../features/line-sheet/components/line-sheet';
 import { applicationQuery, useApplication } from '../../lib/queries/get-application';
 import { revisionLineQuery, useRevisionLine } from '../../lib/queries/get-revision-line';
@@ -21,6 +22,7 @@ export function Component() {
   const line = useRevisionLine(number, letter, lineKey);
   return (
     <>
+      <CasePrintFrame number={number} subject="Check report" letter={letter} />
       <PageHead
         title={line.name}
         crumbs={[

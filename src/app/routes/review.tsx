@@ -4,6 +4,7 @@ import { Link, useParams } from 'react-router-dom';
 import type { Discrepancy } from '#shared/contracts/api.generated';
 import { SkeletonLines } from '../../components/feedback/skeleton';
 import { Sheet } from '../../components/ui/sheet';
+import { CasePrintFrame } from '../../features/applications/components/case-print-frame';
 import { AttachButton } from '../../features/attachments/components/attach-button';
 import { FileList } from '../../features/attachments/components/file-list';
 import { CountersignSheet } from '../../features/countersigns/components/countersign-sheet';
@@ -31,21 +32,24 @@ export async function prefetch(client: QueryClient, { number = '' }: Params, url
 export function Component() {
   const { number = '' } = useParams();
   return (
-    <ReviewPage
-      number={number}
-      slots={{
-        lineSheet: (props) => (
-          <Suspense fallback={<LinePlace />}>
-            <LineSheet applicationNumber={number} {...props} />
-          </Suspense>
-        ),
-        countersigns: <CaseCountersigns number={number} />,
-        attachments: (discrepancy, mayAdd) => (
-          <DiscrepancyFiles number={number} discrepancy={discrepancy} mayAdd={mayAdd} />
-        ),
-        papers: <Papers number={number} />,
-      }}
-    />
+    <>
+      <CasePrintFrame number={number} subject="Review" />
+      <ReviewPage
+        number={number}
+        slots={{
+          lineSheet: (props) => (
+            <Suspense fallback={<LinePlace />}>
+              <LineSheet applicationNumber={number} {...props} />
+            </Suspense>
+          ),
+          countersigns: <CaseCountersigns number={number} />,
+          attachments: (discrepancy, mayAdd) => (
+            <DiscrepancyFiles number={number} discrepancy={discrepancy} mayAdd={mayAdd} />
+          ),
+          papers: <Papers number={number} />,
+        }}
+      />
+    </>
   );
 }
 
