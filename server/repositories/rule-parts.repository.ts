@@ -78,6 +78,16 @@ export async function writeParts(manager: EntityManager, ruleSetId: string, part
   );
 }
 
+/** Deletes a draft of that very version; false when it is not that one any more. */
+export async function deleteDraft(manager: EntityManager, id: string, lockVersion: number): Promise<boolean> {
+  const where = { id, status: 'draft' as const, lockVersion };
+  if (!(await manager.existsBy(RuleSet, where))) return false;
+  for (const part of [Band, VoltageClass, Tolerance, Uncertainty, Setting]) {
+    await manager.delete(part, { ruleSetId: id });
+  }
+  return (await manager.delete(RuleSet, where)).affected === 1;
+}
+
 export const findDraft = (manager: EntityManager) => manager.findOneBy(RuleSet, { status: 'draft' });
 
 export const listRuleSets = (manager: EntityManager) =>

@@ -9,6 +9,7 @@ import { revisionRoutes } from './revision.routes';
 import { rulesRoutes } from './rules.routes';
 import { accountRoutes } from './account.routes';
 import { auditRoutes } from './audit.routes';
+import { calendarRoutes } from './calendar.routes';
 import { mailRoomRoutes } from './mail-room.routes';
 import { peopleRoutes } from './people.routes';
 import { ruleDraftRoutes } from './rule-draft.routes';
@@ -23,6 +24,7 @@ export const ROUTES: readonly Route[] = [
   ...peopleRoutes,
   ...ruleDraftRoutes,
   ...auditRoutes,
+  ...calendarRoutes,
   ...mailRoomRoutes,
   ...applicationRoutes,
   ...draftRoutes,

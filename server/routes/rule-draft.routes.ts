@@ -3,7 +3,7 @@ import { presentRuleSet } from '../presenters/rule-set.presenter';
 import { namesOf } from '../repositories/people-names.repository';
 import { listRuleSets } from '../repositories/rule-parts.repository';
 import { currentRuleSet } from '../repositories/rule-set.repository';
-import { presentDraft, readBandDraft, saveBandDraft } from '../services/rules/band-draft';
+import { discardBandDraft, presentDraft, readBandDraft, saveBandDraft } from '../services/rules/band-draft';
 import { publishBands } from '../services/rules/publish-bands';
 
 /** Bands, tolerances, uncertainties and settings as an administrator changes them. */
@@ -35,6 +35,13 @@ export const ruleDraftRoutes = [
     versioned: true,
     idempotent: true,
     handler: async ({ tx, actor, body }) => presentDraft(await saveBandDraft(tx, actor, body)),
+  }),
+  route('discardBandDraft', {
+    summary: 'Throw the draft away',
+    access: { can: 'update', on: 'RuleSet' },
+    answers: { 200: 'band-draft' },
+    versioned: true,
+    handler: async ({ tx, query }) => presentDraft(await discardBandDraft(tx, Number(query.version))),
   }),
   route('publishBands', {
     summary: 'Put the draft in force, with a reason',

@@ -32,6 +32,9 @@ export const ACCOUNT_OPERATIONS = {
   listRuleSets: { method: 'GET', path: '/api/rules/versions' },
   getBandDraft: { method: 'GET', path: '/api/rules/draft' },
   saveBandDraft: { method: 'PUT', path: '/api/rules/draft' },
+  discardBandDraft: { method: 'DELETE', path: '/api/rules/draft' },
   publishBands: { method: 'POST', path: '/api/rules/draft/publish' },
+  getCalendar: { method: 'GET', path: '/api/calendar' },
+  saveCalendar: { method: 'PUT', path: '/api/calendar' },
   getMailRoom: { method: 'GET', path: '/api/mail-room' },
 } as const;

@@ -33,6 +33,9 @@ export interface AccountExchanges {
   listRuleSets: { response: Api.RuleSetList };
   getBandDraft: { response: Api.BandDraft };
   saveBandDraft: { body: Api.SaveBandDraftRequest; response: Api.BandDraft };
+  discardBandDraft: { query: Api.DiscardBandDraftRequest; response: Api.BandDraft };
   publishBands: { body: Api.PublishBandsRequest; response: Api.RuleSetSummary };
+  getCalendar: { response: Api.Calendar };
+  saveCalendar: { body: Api.SaveCalendarRequest; response: Api.Calendar };
   getMailRoom: { response: Api.MailRoom };
 }

@@ -152,6 +152,12 @@ export interface DeleteDraftLineRequest {
   version?: string;
 }
 
+/** Query of throwing the draft away. */
+export interface DiscardBandDraftRequest {
+  /** version that was read */
+  version: string;
+}
+
 /** Query of exporting lines. */
 export interface ExportLinesRequest {
   /** format, json by default */
@@ -448,6 +454,25 @@ export interface SaveBandDraftRequest {
     /** to answer a return, working days (count) */
     cure: number;
   };
+}
+
+/** Working days from now on; windows that are open keep the days they were given. */
+export interface SaveCalendarRequest {
+  /** version that was read; a stale one is refused with 409 (count) */
+  version: number;
+  /** reason */
+  reason: string;
+  /** time zone by its IANA name */
+  timeZone: string;
+  /** days of the week on which nobody works */
+  weekendDays: number[];
+  /** holidays */
+  holidays: {
+    /** day in the owner’s time zone */
+    day: string;
+    /** what is kept */
+    name: string;
+  }[];
 }
 
 /** A line of the draft; version 0 for a new one. */
@@ -838,6 +863,23 @@ export interface Band {
     /** source of the outer bounds */
     outer: string;
   };
+}
+
+/** The owner’s working days. */
+export interface Calendar {
+  /** version (count) */
+  version: number;
+  /** time zone by its IANA name */
+  timeZone: string;
+  /** days of the week on which nobody works */
+  weekendDays: number[];
+  /** holidays */
+  holidays: {
+    /** day in the owner’s time zone */
+    day: string;
+    /** what is kept */
+    name: string;
+  }[];
 }
 
 /** A slip that explains findings. */

@@ -6,7 +6,7 @@ import type { Transaction } from '../../database/transaction';
 import { RuleSet } from '../../entities/rules.entities';
 import { conflict, invalidContent, stale } from '../../errors/problem';
 import type { ProblemFault } from '../../errors/problem';
-import { findDraft, readParts, writeParts } from '../../repositories/rule-parts.repository';
+import { deleteDraft, findDraft, readParts, writeParts } from '../../repositories/rule-parts.repository';
 import type { RuleParts } from '../../repositories/rule-parts.repository';
 import { currentRuleSet } from '../../repositories/rule-set.repository';
 
@@ -115,6 +115,17 @@ export async function saveBandDraft(
   const id = await claimDraft(tx, actor, request.version, ruleSetVersion);
   await writeParts(tx.manager, id, next);
   recordEvent(tx, { act: 'bands.draft-saved', after: { ruleSetVersion, changed: Object.keys(request) } });
+  return readBandDraft(tx);
+}
+
+/** Throws the draft away; the rules in force stay as they are. */
+export async function discardBandDraft(tx: Transaction, version: number): Promise<DraftReading> {
+  const draft = await findDraft(tx.manager);
+  if (!draft) throw conflict('There is no draft to throw away.');
+  if (!(await deleteDraft(tx.manager, draft.id, version))) {
+    throw stale('Somebody has changed the draft in the meantime.', { currentVersion: draft.lockVersion });
+  }
+  recordEvent(tx, { act: 'bands.draft-discarded', before: { ruleSetVersion: draft.version } });
   return readBandDraft(tx);
 }
 

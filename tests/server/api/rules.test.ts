@@ -114,6 +114,57 @@ describe('the next rule set', () => {
   });
 });
 
+describe('a draft', () => {
+  it('is thrown away in the version that was read, and leaves the rules in force alone', async () => {
+    const inForce = (await administrator.get('/api/rules')).body as { bandsVersion: string };
+    await administrator.delete('/api/rules/draft?version=1').expect(409);
+    const begun = await draft();
+    await administrator.put('/api/rules/draft', { version: 0, bands: moved(begun) }).expect(200);
+    await administrator.delete('/api/rules/draft').expect(428);
+    await administrator.delete('/api/rules/draft?version=7').expect(409);
+    const left = await administrator.delete('/api/rules/draft?version=1').expect(200);
+    expect(left.body).toMatchObject({ version: 0, bands: begun.bands });
+    expect((await administrator.get('/api/rules')).body).toMatchObject({
+      bandsVersion: inForce.bandsVersion,
+    });
+  });
+});
+
+describe('the calendar', () => {
+  const next = { timeZone: 'Europe/Oslo', weekendDays: [0, 6], reason: 'first year' };
+  const holidays = [{ day: '2027-05-17', name: 'Constitution Day' }];
+
+  it('is read by everybody who is signed in and changed by administrators alone', async () => {
+    const reviewer = await test.signInAs('reviewer');
+    expect((await reviewer.get('/api/calendar').expect(200)).body).toMatchObject({
+      version: 1,
+      holidays: [],
+    });
+    await reviewer.put('/api/calendar', { version: 1, ...next, holidays }).expect(403);
+  });
+
+  it('changes by a new version with a reason, once of two at once', async () => {
+    const save = () => administrator.put('/api/calendar', { version: 1, ...next, holidays });
+    const statuses = (await Promise.all([save(), save()])).map((answer) => answer.status).sort();
+    expect(statuses).toEqual([200, 409]);
+    const now = await administrator.get('/api/calendar').expect(200);
+    expect(now.body).toEqual({ version: 2, timeZone: 'Europe/Oslo', weekendDays: [0, 6], holidays });
+  });
+
+  it.each([
+    ['a time zone that does not exist', { ...next, timeZone: 'Europe/Nowhere', holidays }, '/timeZone'],
+    [
+      'a day that does not exist',
+      { ...next, holidays: [{ day: '2027-02-30', name: 'x' }] },
+      '/holidays/0/day',
+    ],
+    ['a day twice', { ...next, holidays: [...holidays, ...holidays] }, '/holidays/1/day'],
+  ])('refuses %s', async (_name, body, pointer) => {
+    const answer = await administrator.put('/api/calendar', { version: 2, ...body }).expect(422);
+    expect((answer.body as { errors: { pointer: string }[] }).errors[0]?.pointer).toBe(pointer);
+  });
+});
+
 describe('the audit trail', () => {
   it('is read page by page, newest first, and narrowed by act', async () => {
     interface Page {

@@ -32,6 +32,8 @@ const DELETABLE_TABLES = [
   'reviewer_bars',
   'second_factors',
   'draft_lines',
+  // A draft that is thrown away; the trigger keeps what was published.
+  'rule_sets',
   'voltage_classes',
   'bands',
   'tolerances',
