@@ -9,6 +9,7 @@ import { useTimeline } from '../../../lib/queries/get-timeline';
 /** Everything that happened to an application, oldest first, each entry chained to the one before. */
 export function CaseRecord({ number, role }: { number: string; role: Role }) {
   const { items, limitReached } = useTimeline(number);
+  const current = items.findLast((event) => event.revision !== null)?.revision;
   return (
     <>
       <PageHead
@@ -20,7 +21,11 @@ export function CaseRecord({ number, role }: { number: string; role: Role }) {
         <ol className="thread border-t-0">
           {items.map((event) => (
             <li key={event.seq}>
-              {event.revision ? <RevisionTriangle letter={event.revision} /> : <span />}
+              {event.revision ? (
+                <RevisionTriangle letter={event.revision} older={event.revision !== current} />
+              ) : (
+                <span />
+              )}
               <div className="thread-who">
                 <b>{event.actor?.name ?? 'Counterpoise'}</b>
                 {event.party && <span>{event.party.name}</span>}

@@ -19,10 +19,27 @@ interface FindingActionsProps {
   onRaise: (findings: readonly Finding[]) => void;
 }
 
-/** What a reviewer can do with a finding, beside its words. */
+/**
+ * What a reviewer can do with a finding, beside its words. A dialog once opened stays, also when the finding is read
+ * again meanwhile and nothing can be done with it any more: the server then says why, and no words are lost.
+ */
 export function FindingActions(props: FindingActionsProps) {
-  const { finding, selection, mayAct, nextName, onRaise } = props;
   const [asking, setAsking] = useState<'waive' | 'set-aside' | null>(null);
+  const close = () => setAsking(null);
+  return (
+    <>
+      <FindingButtons {...props} onAsk={setAsking} />
+      {asking === 'waive' && <WaiveDialog {...props} onClose={close} />}
+      {asking === 'set-aside' && <SetAsideDialog {...props} onClose={close} />}
+    </>
+  );
+}
+
+interface FindingButtonsProps extends FindingActionsProps {
+  onAsk: (what: 'waive' | 'set-aside') => void;
+}
+
+function FindingButtons({ finding, selection, mayAct, nextName, onRaise, onAsk }: FindingButtonsProps) {
   if (finding.discrepancy !== null) {
     return (
       <a className="button button-small" href={`#d-${finding.discrepancy}`}>
@@ -49,12 +66,10 @@ export function FindingActions(props: FindingActionsProps) {
           {chosen ? 'Take out of the choice' : 'Choose, to raise with others'}
         </MenuItem>
         {finding.grade !== 'must-answer' && (
-          <MenuItem onSelect={() => setAsking('set-aside')}>Set aside, with a reason</MenuItem>
+          <MenuItem onSelect={() => onAsk('set-aside')}>Set aside, with a reason</MenuItem>
         )}
-        <MenuItem onSelect={() => setAsking('waive')}>Waive, with a reason</MenuItem>
+        <MenuItem onSelect={() => onAsk('waive')}>Waive, with a reason</MenuItem>
       </Menu>
-      {asking === 'waive' && <WaiveDialog {...props} onClose={() => setAsking(null)} />}
-      {asking === 'set-aside' && <SetAsideDialog {...props} onClose={() => setAsking(null)} />}
     </>
   );
 }
