@@ -52,7 +52,7 @@ function usePutFromElsewhere(put: ReturnType<typeof usePut>['put']): void {
     if (done.current || !state?.put) return;
     done.current = true;
     put(state.put.correction, state.put.circuit);
-    navigate(pathname, { replace: true, state: null });
+    void navigate(pathname, { replace: true, state: null });
   });
 }
 

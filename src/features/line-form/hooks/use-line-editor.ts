@@ -45,23 +45,20 @@ export interface LineEditor {
 const DELAY_MS = 900;
 const RETRY_MS = 8000;
 
-/** The form's state, kept in the browser at each change and saved to the draft after each pause. */
-export function useLineEditor(input: LineEditorInput): LineEditor {
-  const { number, lineKey, userId } = input;
-  const client = useQueryClient();
-  const key = keepKey(userId, number, lineKey);
-  const [start] = useState(() => opening(input.saved, readKept(key)));
-  const [form, setForm] = useState<LineForm>(start.form);
-  const [theirs, setTheirs] = useState<DraftLine | null>(start.conflict ? input.saved : null);
-  const [save, setSave] = useState<SaveState>(start.save);
-  const current = useRef(form);
+/** What is told about saving while it goes on. */
+interface SaverEvents {
+  onState: (state: SaveState) => void;
+  onTheirs: (theirs: DraftLine | null) => void;
+}
 
+/** The autosave of one line: keeps the cache in step, reads the other version after a conflict. */
+function useSaver({ number, lineKey }: LineEditorInput, version: number, key: string, events: SaverEvents) {
+  const client = useQueryClient();
   const [saver] = useState(
     () =>
-      new Autosaver<FormReading>(start.version, {
-        save: async (reading, version) => {
-          const { line, asTyped } = reading;
-          const answer = await saveDraftLine(number, lineKey, { version, line, asTyped });
+      new Autosaver<FormReading>(version, {
+        save: async ({ line, asTyped }, base) => {
+          const answer = await saveDraftLine(number, lineKey, { version: base, line, asTyped });
           client.setQueryData(draftLineQuery(number, lineKey).queryKey, answer);
           // Read anew when somebody looks again; nothing on this page waits for it.
           void client.invalidateQueries({ queryKey: caseKey(number), refetchType: 'none' });
@@ -69,14 +66,26 @@ export function useLineEditor(input: LineEditorInput): LineEditor {
         },
         isConflict: isStale,
         onState: (state) => {
-          setSave(state);
-          if (state.kind === 'conflict') void readDraftLine(number, lineKey).then(setTheirs);
+          events.onState(state);
+          if (state.kind === 'conflict') void readDraftLine(number, lineKey).then(events.onTheirs);
         },
         onSettled: () => dropKept(key),
         delayMs: DELAY_MS,
         retryMs: RETRY_MS,
       }),
   );
+  return saver;
+}
+
+/** The form's state, kept in the browser at each change and saved to the draft after each pause. */
+export function useLineEditor(input: LineEditorInput): LineEditor {
+  const key = keepKey(input.userId, input.number, input.lineKey);
+  const [start] = useState(() => opening(input.saved, readKept(key)));
+  const [form, setForm] = useState<LineForm>(start.form);
+  const [theirs, setTheirs] = useState<DraftLine | null>(start.conflict ? input.saved : null);
+  const [save, setSave] = useState<SaveState>(start.save);
+  const current = useRef(form);
+  const saver = useSaver(input, start.version, key, { onState: setSave, onTheirs: setTheirs });
 
   const change = useCallback(
     (apply: (form: LineForm) => LineForm) => {
@@ -98,10 +107,6 @@ export function useLineEditor(input: LineEditorInput): LineEditor {
   }, [saver, start]);
 
   const reading = useMemo(() => readForm(form), [form]);
-  const replace = (next: LineForm) => {
-    current.current = next;
-    setForm(next);
-  };
   return {
     form,
     reading,
@@ -121,7 +126,8 @@ export function useLineEditor(input: LineEditorInput): LineEditor {
     },
     takeTheirs: () => {
       dropKept(key);
-      replace(openForm(theirs?.line ?? {}, theirs?.asTyped));
+      current.current = openForm(theirs?.line ?? {}, theirs?.asTyped);
+      setForm(current.current);
       saver.takeTheirs({ version: theirs?.version ?? 0, at: new Date(theirs?.updatedAt ?? Date.now()) });
       setTheirs(null);
     },

@@ -66,11 +66,19 @@ function record(put: Put, path: FormPath, before: Typed, after: Typed, plain: bo
   };
 }
 
+/** The corrected values that are numbers, as their fields stand on the page. */
+function inFieldOrder(corrected: Correction['corrected']): [string, number][] {
+  const order: readonly string[] = ['r1', 'r0', 'x1', 'x0', 'b1', 'b0', ...MUTUAL_KEYS];
+  const rank = (key: string): number => (order.includes(key) ? order.indexOf(key) : order.length);
+  return Object.entries(corrected)
+    .filter(([, value]) => Number.isFinite(value))
+    .sort(([a], [b]) => rank(a) - rank(b));
+}
+
 /** Puts a correction into the form: declared values in Ω/km and µS/km, entries of the geometry in their own unit. */
 export function putCorrection(form: LineForm, correction: Correction, circuit: number): Put {
   let put: Put = { form, values: [] };
-  for (const [key, value] of Object.entries(correction.corrected)) {
-    if (!Number.isFinite(value)) continue;
+  for (const [key, value] of inFieldOrder(correction.corrected)) {
     if (correction.in === 'declared') {
       const path = declaredPath(form, key, circuit);
       if (path) put = replace(put, path, value, key.startsWith('b') ? 'uS/km' : 'ohm/km');

@@ -12,28 +12,39 @@ export interface LiveCheck {
 const DELAY_MS = 120;
 
 interface Checker {
-  ask: (question: { line: Record<string, unknown>; written: Readonly<Record<string, string>> }) => void;
+  /** Asks for a line, written as JSON. */
+  ask: (content: string) => void;
   end: () => void;
 }
+
+interface Answered {
+  /** The line that the outcome is of. */
+  content: string | null;
+  outcome: CheckOutcome | null;
+  failed: boolean;
+}
+
+type Content = [line: Record<string, unknown>, written: Readonly<Record<string, string>>];
 
 /** One worker for the page: it is asked for the latest text only, and older answers are left aside. */
 function startChecker(
   basis: CheckBasis,
-  onOutcome: (o: CheckOutcome) => void,
+  onOutcome: (content: string, outcome: CheckOutcome) => void,
   onFailure: () => void,
 ): Checker {
   const worker = new Worker(new URL('../worker/live-check.worker.ts', import.meta.url), { type: 'module' });
   const post = (message: ToWorker) => worker.postMessage(message);
-  let last = 0;
+  let last = { id: 0, content: '' };
   worker.addEventListener('message', ({ data }: MessageEvent<FromWorker>) => {
-    if (data.id === last) onOutcome(data.outcome);
+    if (data.id === last.id) onOutcome(last.content, data.outcome);
   });
   worker.addEventListener('error', onFailure);
   post({ kind: 'basis', basis });
   return {
-    ask: (question) => {
-      last += 1;
-      post({ kind: 'check', question: { id: last, ...question } });
+    ask: (content) => {
+      last = { id: last.id + 1, content };
+      const [line, written] = JSON.parse(content) as Content;
+      post({ kind: 'check', question: { id: last.id, line, written } });
     },
     end: () => worker.terminate(),
   };
@@ -46,27 +57,24 @@ export function useLiveCheck(
   basis: CheckBasis,
 ): LiveCheck {
   const checker = useRef<Checker | null>(null);
-  const [state, setState] = useState<LiveCheck>({ outcome: null, pending: true, failed: false });
-  const content = JSON.stringify([line, written]);
+  const [answered, setAnswered] = useState<Answered>({ content: null, outcome: null, failed: false });
+  const content = JSON.stringify([line, written] satisfies Content);
 
   useEffect(() => {
     const started = startChecker(
       basis,
-      (outcome) => setState({ outcome, pending: false, failed: false }),
-      () => setState((before) => ({ ...before, pending: false, failed: true })),
+      (of, outcome) => setAnswered({ content: of, outcome, failed: false }),
+      () => setAnswered((before) => ({ ...before, failed: true })),
     );
     checker.current = started;
     return () => started.end();
   }, [basis]);
 
   useEffect(() => {
-    setState((before) => (before.pending ? before : { ...before, pending: true }));
-    const timer = setTimeout(() => {
-      const [askedLine, askedWritten] = JSON.parse(content) as [typeof line, typeof written];
-      checker.current?.ask({ line: askedLine, written: askedWritten });
-    }, DELAY_MS);
+    const timer = setTimeout(() => checker.current?.ask(content), DELAY_MS);
     return () => clearTimeout(timer);
   }, [content, basis]);
 
-  return state;
+  const { outcome, failed } = answered;
+  return { outcome, pending: !failed && answered.content !== content, failed };
 }
