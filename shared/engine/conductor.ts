@@ -21,6 +21,8 @@ export function resistanceGrowth(c: ConductorData, temperatureC: number): number
  * D.c. resistance of a `tube` conductor at its temperature: R₂₀·(1 + α(T − 20 °C)).
  *
  * @param c conductor with dcResistance20OhmPerKm
+ * @example
+ * dcResistanceOhmPerKm({ model: 'tube', diameterMm: 28, dcResistance20OhmPerKm: 0.07, temperatureC: 75 }) // → 0.08552
  * @returns Ω/km
  */
 export function dcResistanceOhmPerKm(c: ConductorData): number {

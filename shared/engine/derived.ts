@@ -53,6 +53,9 @@ function propagation(c: Partial<SequenceConstants>): Complex | null {
  * @param c r, x in Ω/km, b in µS/km
  * @param frequencyHz frequency, Hz
  * @param nominalKv phase-to-phase voltage, kV, for loading and charging
+ * @example
+ * derive({ x1: 0.488, b1: 3.371 }, 60).surgeImpedanceOhm // → 380.5
+ * derive({ x1: 0.488 }, 60).waveSpeed // → null
  */
 export function derive(c: Partial<SequenceConstants>, frequencyHz: number, nominalKv?: number): Derived {
   const omega = 2 * Math.PI * frequencyHz;
@@ -85,6 +88,8 @@ export function derive(c: Partial<SequenceConstants>, frequencyHz: number, nomin
  * @param baseMva three-phase base power, MVA
  * @param baseKv base voltage, phase to phase, kV
  * @returns the same names per unit, or null when a base is not positive
+ * @example
+ * perUnit({ r: 0, x: 58.35, b: 0, r0: 0, x0: 0, b0: 0 }, 100, 345)?.x // → 0.04902
  */
 export function perUnit(totals: PiTotals, baseMva: number, baseKv: number): PiTotals | null {
   const base = (baseKv * baseKv) / baseMva;

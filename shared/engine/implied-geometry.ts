@@ -32,6 +32,8 @@ export interface ImpliedGeometry {
  *
  * @param input declared values and the conductor
  * @returns the implied geometry, or null when no geometry at all gives such values
+ * @example
+ * impliedGeometry({ x1: 0.505925, b1: 3.228122, frequencyHz: 60, diameterMm: 30.4, bundleCount: 1, bundleSpacingM: 0 })?.meanSpacingM // → 10.08
  */
 export function impliedGeometry(input: ImpliedGeometryInput): ImpliedGeometry | null {
   const { bundleCount, bundleSpacingM, reference } = input;

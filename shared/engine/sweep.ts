@@ -135,6 +135,8 @@ function filedModels(s: OverheadSection): SweepTable['conductors'] {
  * @param lowHz first frequency
  * @param highHz last frequency
  * @param points number of points, at least 2
+ * @example
+ * Array.from(logarithmicGrid(1, 100, 3)) // → [1,10,100]
  */
 export function logarithmicGrid(lowHz: number, highHz: number, points: number): Float64Array {
   const grid = new Float64Array(points);

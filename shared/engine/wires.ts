@@ -25,6 +25,9 @@ const POLYGONS: Float64Array[] = FIRST_ANGLE.map((first, n) => {
  *
  * @param count 1 to 8
  * @param spacingM side, m
+ * @example
+ * bundleOffsets(2, 0.4)[0] // → 0.2
+ * bundleOffsets(1, 0) // → [0,0]
  */
 export function bundleOffsets(count: number, spacingM: number): number[] {
   return Array.from(POLYGONS[count] ?? [], (unit) => unit * spacingM);
