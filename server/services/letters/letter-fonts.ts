@@ -2,6 +2,7 @@ import { existsSync, readFileSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
+import { unpackWoff } from './unpack-woff';
 
 type Weight = 'regular' | 'strong';
 
@@ -31,7 +32,8 @@ const files = new Map<string, Buffer>();
 function bytesOf(path: string): Buffer {
   const known = files.get(path);
   if (known !== undefined) return known;
-  const bytes = readFileSync(path);
+  const read = readFileSync(path);
+  const bytes = path.endsWith('.woff') ? unpackWoff(read) : read;
   files.set(path, bytes);
   return bytes;
 }

@@ -42,6 +42,7 @@ export class LetterSheet {
   private readonly document: PDFKit.PDFDocument;
   private readonly chunks: Buffer[] = [];
   private readonly ended: Promise<void>;
+  private readonly widths = new Map<string, number>();
   private y = TEXT.top;
 
   constructor(title: string, createdAt: Date) {
@@ -124,22 +125,30 @@ export class LetterSheet {
   }
 
   private widthOf(text: string, size: number, strong: boolean): number {
-    return runsOf(this.document, text, strong ? 'strong' : 'regular').reduce(
+    const key = `${size} ${strong} ${text}`;
+    const known = this.widths.get(key);
+    if (known !== undefined) return known;
+    const width = runsOf(this.document, text, strong ? 'strong' : 'regular').reduce(
       (sum, run) => sum + this.document.font(run.font).fontSize(size).widthOfString(run.text),
       0,
     );
+    this.widths.set(key, width);
+    return width;
   }
 
+  /** Lines of a text; words are measured one by one, since laying out ever longer lines takes long. */
   private wrapped(text: string, width: number, size: number, strong: boolean): string[] {
+    const blank = this.widthOf(' ', size, strong);
     return text.split('\n').flatMap((paragraph) => {
       const lines: string[] = [];
       let line = '';
+      let used = 0;
       for (const word of paragraph.split(' ').flatMap((w) => this.fitting(w, width, size, strong))) {
-        const longer = line === '' ? word : `${line} ${word}`;
-        if (line !== '' && this.widthOf(longer, size, strong) > width) {
-          lines.push(line);
-          line = word;
-        } else line = longer;
+        const own = this.widthOf(word, size, strong);
+        const fits = line === '' || used + blank + own <= width;
+        if (!fits) lines.push(line);
+        line = line === '' || !fits ? word : `${line} ${word}`;
+        used = line === word ? own : used + blank + own;
       }
       return [...lines, line];
     });
