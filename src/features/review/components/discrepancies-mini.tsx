@@ -1,18 +1,18 @@
-import type { Discrepancy } from '#shared/contracts/api.generated';
+import type { Application, Discrepancy } from '#shared/contracts/api.generated';
 import { GradeLabel } from '../../../components/ui/grade-mark';
 import { Sheet } from '../../../components/ui/sheet';
+import { turnWords } from '../model/turn-words';
 
-const TURN: Readonly<Record<Discrepancy['state'], string>> = {
-  open: 'goes with the letter',
-  answered: 'answered, your turn',
-  settled: 'settled',
-  waived: 'waived',
-};
+interface DiscrepanciesMiniProps {
+  items: readonly Discrepancy[];
+  /** State of the case: it says whose turn an open one is. */
+  state: Application['state'];
+}
 
 const isLive = (d: Discrepancy) => d.state === 'open' || d.state === 'answered';
 
 /** The discrepancies in brief, each leading to its thread. */
-export function DiscrepanciesMini({ items }: { items: readonly Discrepancy[] }) {
+export function DiscrepanciesMini({ items, state }: DiscrepanciesMiniProps) {
   if (items.length === 0) return null;
   const live = items.filter(isLive).length;
   return (
@@ -29,7 +29,7 @@ export function DiscrepanciesMini({ items }: { items: readonly Discrepancy[] }) 
             ) : (
               <span className="text-ink-soft">{d.state}</span>
             )}
-            <span className="mini-more">{TURN[d.state]}</span>
+            <span className="mini-more">{turnWords(d, state)}</span>
           </li>
         ))}
       </ul>

@@ -162,7 +162,7 @@ function SideColumn({ revision, application, discrepancies, mayAct, papers }: Si
     <div>
       <LinesNav lines={revision.lines} shown={shown} hrefOf={lineHref} />
       <div className="side-rest">
-        <DiscrepanciesMini items={discrepancies} />
+        <DiscrepanciesMini items={discrepancies} state={application.state} />
         <RevisionsMini
           number={number}
           shown={revision.letter}
