@@ -30,7 +30,8 @@ export function makeDataSource(url: string, role: DatabaseRole): DataSource {
     // Without a listener an idle connection that PostgreSQL ends would end the process.
     poolErrorHandler: () => undefined,
     extra: {
-      connectionTimeoutMillis: 2000,
+      // The wait for a free connection of the pool counts as well.
+      connectionTimeoutMillis: 5000,
       statement_timeout: statementMs,
       query_timeout: statementMs + 2000,
       lock_timeout: 3000,

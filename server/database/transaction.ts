@@ -23,8 +23,9 @@ export interface Transaction {
 /** Who acts: known beforehand, or found out inside the transaction (a session's person). */
 export type ActorSource = Actor | ((manager: EntityManager, now: Date) => Promise<Actor>);
 
-// Serialisation failure and deadlock: PostgreSQL asks for the whole transaction again.
-const RETRIED = new Set(['40001', '40P01']);
+// Serialisation failure and deadlock: PostgreSQL asks for the whole transaction again. A lock that did not come in
+// time is worth another try too: whoever held it has mostly finished by then.
+const RETRIED = new Set(['40001', '40P01', '55P03']);
 const TRIES = 3;
 
 async function declareActor(manager: EntityManager, actor: Actor): Promise<void> {
