@@ -1,8 +1,10 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
 import type { QueryClient } from '@tanstack/react-query';
 import { useEffect, useMemo, useRef } from 'react';
-import { useLocation, useNavigate, useParams } from 'react-router-dom';
+import { Navigate, useLocation, useNavigate, useParams } from 'react-router-dom';
+import { problemType } from '#shared/contracts/errors';
 import { PageHead } from '../../components/ui/page-head';
+import { hasDraft } from '../../features/applications/model/words';
 import { draftLineQuery } from '../../features/line-form/api/get-draft-line';
 import { LineForm } from '../../features/line-form/components/line-form';
 import { LineTitleBlock } from '../../features/line-form/components/line-title-block';
@@ -21,7 +23,9 @@ import { useLiveCheck } from '../../features/live-check/hooks/use-live-check';
 import { checkBasis } from '../../features/live-check/model/basis';
 import { badPositions, blockersOf, drawingNotes } from '../../features/live-check/model/placed-notes';
 import { useLeaveGuard } from '../../hooks/use-leave-guard';
+import { ApiProblem } from '../../lib/api/problem';
 import { useSession } from '../../lib/api/session';
+import { linePath } from '../../lib/paths';
 import { applicationQuery, useApplication } from '../../lib/queries/get-application';
 import { draftQuery, useDraft } from '../../lib/queries/get-draft';
 import { rulesQuery, useRules } from '../../lib/queries/get-rules';
@@ -120,9 +124,19 @@ function LinePage({ input }: { input: LineEditorInput }) {
 export function Component() {
   const { number = '', lineKey = '' } = useParams();
   const session = useSession();
-  const saved = useSuspenseQuery(draftLineQuery(number, lineKey)).data;
+  const application = useApplication(number);
+  const { revision } = application;
   if (!session) return null;
-  return (
-    <LinePage key={`${number}/${lineKey}`} input={{ number, lineKey, userId: session.user.id, saved }} />
-  );
+  if (!hasDraft(application) && revision)
+    return <Navigate to={linePath(session.role, number, revision, lineKey)} replace />;
+  return <DraftLinePage number={number} lineKey={lineKey} userId={session.user.id} />;
+}
+
+/** The line of the draft as it is opened: one that is there, or the next one to come. */
+function DraftLinePage({ number, lineKey, userId }: Omit<LineEditorInput, 'saved'>) {
+  const draft = useDraft(number);
+  const saved = useSuspenseQuery(draftLineQuery(number, lineKey)).data;
+  if (saved === null && lineKey !== draft.nextLineKey)
+    throw new ApiProblem({ type: problemType('not-found'), title: 'No such line in the draft', status: 404 });
+  return <LinePage key={`${number}/${lineKey}`} input={{ number, lineKey, userId, saved }} />;
 }

@@ -8,7 +8,9 @@ export const saveDraftLine = (
   number: string,
   lineKey: string,
   body: SaveDraftLineRequest,
-): Promise<DraftLine> => call('saveDraftLine', { params: { applicationId: number, lineKey }, body });
+  idempotencyKey: string,
+): Promise<DraftLine> =>
+  call('saveDraftLine', { params: { applicationId: number, lineKey }, body, idempotencyKey });
 
 /** Whether a refusal means that somebody else saved the line in between. */
 export const isStale = (error: unknown): boolean =>

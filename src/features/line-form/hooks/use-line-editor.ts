@@ -1,6 +1,8 @@
 import { useQueryClient } from '@tanstack/react-query';
 import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
 import type { DraftLine } from '#shared/contracts/api.generated';
+import { canonicalJson } from '#shared/filing/canonical';
+import { useIntention } from '../../../lib/api/intention';
 import { caseKey } from '../../../lib/queries/case-key';
 import { draftLineQuery, readDraftLine } from '../api/get-draft-line';
 import { isStale, saveDraftLine } from '../api/save-draft-line';
@@ -54,26 +56,42 @@ interface SaverEvents {
 /** The autosave of one line: keeps the cache in step, reads the other version after a conflict. */
 function useSaver({ number, lineKey }: LineEditorInput, version: number, key: string, events: SaverEvents) {
   const client = useQueryClient();
-  const [saver] = useState(
-    () =>
-      new Autosaver<FormReading>(version, {
-        save: async ({ line, asTyped }, base) => {
-          const answer = await saveDraftLine(number, lineKey, { version: base, line, asTyped });
+  const intention = useIntention();
+  const [saver] = useState(() => {
+    let sent: Record<string, unknown> | null = null;
+    const made: Autosaver<FormReading> = new Autosaver<FormReading>(version, {
+      save: async ({ line, asTyped }, base) => {
+        const body = { version: base, line, asTyped };
+        sent = line;
+        try {
+          const answer = await saveDraftLine(number, lineKey, body, intention.keyFor(body));
+          intention.ended(null);
           client.setQueryData(draftLineQuery(number, lineKey).queryKey, answer);
           // Read anew when somebody looks again; nothing on this page waits for it.
           void client.invalidateQueries({ queryKey: caseKey(number), refetchType: 'none' });
           return { version: answer.version, at: new Date(answer.updatedAt) };
-        },
-        isConflict: isStale,
-        onState: (state) => {
-          events.onState(state);
-          if (state.kind === 'conflict') void readDraftLine(number, lineKey).then(events.onTheirs);
-        },
-        onSettled: () => dropKept(key),
-        delayMs: DELAY_MS,
-        retryMs: RETRY_MS,
-      }),
-  );
+        } catch (error) {
+          intention.ended(error);
+          throw error;
+        }
+      },
+      isConflict: isStale,
+      onState: (state) => {
+        if (state.kind !== 'conflict') return events.onState(state);
+        void readDraftLine(number, lineKey).then((theirs) => {
+          // A save of ours whose answer was lost on the way is no conflict.
+          if (theirs && sent && canonicalJson(theirs.line) === canonicalJson(sent))
+            return made.goOn(theirs.version);
+          events.onTheirs(theirs);
+          return events.onState(state);
+        });
+      },
+      onSettled: () => dropKept(key),
+      delayMs: DELAY_MS,
+      retryMs: RETRY_MS,
+    });
+    return made;
+  });
   return saver;
 }
 

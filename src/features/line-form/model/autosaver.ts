@@ -66,9 +66,14 @@ export class Autosaver<T> {
 
   /** Goes on after a conflict: on top of the version that holds now, with the value that stands here. */
   keepMine(version: number, value: T): Promise<void> {
+    this.pending = { value };
+    return this.goOn(version);
+  }
+
+  /** Goes on with what waits, on top of another version: the conflict was with a save of our own. */
+  goOn(version: number): Promise<void> {
     this.version = version;
     this.stopped = false;
-    this.pending = { value };
     return this.flush();
   }
 

@@ -98,6 +98,18 @@ describe('autosave', () => {
     expect(kept.saves).toEqual(['theirs and mine']);
   });
 
+  it('goes on with what waits when the conflict was with a save of its own', async () => {
+    const { kept, saver } = setUp();
+    kept.version = 4;
+    saver.change('mine');
+    await vi.advanceTimersByTimeAsync(1000);
+    saver.change('mine, longer');
+    const done = saver.goOn(4);
+    await vi.advanceTimersByTimeAsync(1000);
+    await done;
+    expect(kept.saves).toEqual(['mine, longer']);
+  });
+
   it('tries again by itself after a failure, with what stands in the form by then', async () => {
     const { kept, saver, kinds } = setUp();
     kept.down = true;
