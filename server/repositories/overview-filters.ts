@@ -9,6 +9,8 @@ export interface OverviewFilters {
   grades: readonly string[];
   reviewer: { id: string } | 'nobody' | null;
   search: string | null;
+  /** Number of the application, in part. */
+  number: string | null;
   /** Instants of the due days: from (included) to (excluded), either open. */
   due: { from: Date | null; to: Date | null } | null;
 }
@@ -40,6 +42,7 @@ export function filterSql(filters: OverviewFilters, parameters: Parameters): str
     const columns = ['number', 'title', 'applicant', '"pointOfConnection"'];
     parts.push(`(${columns.map((column) => `${column} ILIKE ${pattern}`).join(' OR ')})`);
   }
+  if (filters.number !== null) parts.push(`number ILIKE ${parameters.add(likePattern(filters.number))}`);
   if (filters.due?.from) parts.push(`"dueAt" >= ${parameters.add(filters.due.from)}`);
   if (filters.due?.to) parts.push(`"dueAt" < ${parameters.add(filters.due.to)}`);
   return parts.length === 0 ? 'true' : parts.join(' AND ');

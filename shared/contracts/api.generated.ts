@@ -236,6 +236,8 @@ export interface ListApplicationsRequest {
   'filter[grade]'?: string;
   /** a reviewer’s id, “me” or “nobody” */
   'filter[reviewer]'?: string;
+  /** number of the application, in part */
+  'filter[number]'?: string;
   /** number, title, applicant or place, in part */
   'filter[search]'?: string;
   /** when it is due */
@@ -342,6 +344,8 @@ export interface ListQueueRequest {
   'filter[grade]'?: string;
   /** a reviewer’s id, “me” or “nobody” */
   'filter[reviewer]'?: string;
+  /** number of the application, in part */
+  'filter[number]'?: string;
   /** number, title, applicant or place, in part */
   'filter[search]'?: string;
   /** when it is due */

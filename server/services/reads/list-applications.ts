@@ -62,6 +62,7 @@ function overviewQuery(
       grades: listOf(query['filter[grade]']),
       reviewer: reviewerOf(query['filter[reviewer]'], caller.actor.userId),
       search: query['filter[search]'] ?? null,
+      number: query['filter[number]'] ?? null,
       due: dueOf(query['filter[due]'], reading),
     },
   };
