@@ -13,13 +13,20 @@ const SIDE_FACTORS = [0.5, 2, Math.SQRT2, Math.SQRT1_2, 0.0254] as const;
 
 const MOST = 8;
 
-/** Another number of subconductors, or another side of the bundle, in every section. */
-export function bundleSlips(context: VariantContext): Variant[] {
+/**
+ * Another number of subconductors, or another side of the bundle, in every section.
+ *
+ * @param context the line
+ * @param withSides whether another side could explain anything: it moves X1 and 1/B1 together
+ */
+export function bundleSlips(context: VariantContext, withSides: boolean): Variant[] {
   const filed = filedBundle(context);
   if (filed === null) return [];
   return filed.bundleCount === 1
-    ? bundleForSingle(context, filed)
-    : [...countSlips(context, filed), ...sideSlips(context, filed)];
+    ? withSides
+      ? bundleForSingle(context, filed)
+      : []
+    : [...countSlips(context, filed), ...(withSides ? sideSlips(context, filed) : [])];
 }
 
 interface Filed {

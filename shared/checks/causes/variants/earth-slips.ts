@@ -28,14 +28,26 @@ export function earthSlips(context: VariantContext, violated: ReadonlySet<string
     const common = { code: 'earth-resistivity', in: 'declared', model: ENGINE_MODEL } as const;
     return outcome === null ? [] : [{ ...common, outcome, prior, freedom, words }];
   };
+  const fitted = fittedTo(context, solve);
   const assumed = ASSUMED_OHM_M.filter((ohmM) => !(filed.size === 1 && filed.has(ohmM)));
   return [
-    ...assumed.flatMap((ohmM) => make(ohmM, 0, -0.5 - Math.log(assumed.length))),
-    ...fittedTo(context, solve).flatMap((ohmM) => make(ohmM, 1, -2)),
+    ...assumed
+      .filter((ohmM) => couldFit(ohmM, fitted))
+      .flatMap((ohmM) => make(ohmM, 0, -0.5 - Math.log(assumed.length))),
+    ...(fitted ?? []).flatMap((ohmM) => make(ohmM, 1, -2)),
   ];
 }
 
-function fittedTo(context: VariantContext, solve: (ohmM: number) => Outcome | null): number[] {
+/** A resistivity this far (in ln ρ) from what X0 needs is more than the tight tolerance away from it. */
+const NEAR = 0.5;
+
+function couldFit(ohmM: number, fitted: readonly number[] | null): boolean {
+  return fitted === null || fitted.some((root) => Math.abs(Math.log(ohmM / root)) < NEAR);
+}
+
+/** The resistivities that the declared X0 of each circuit needs; null when none is declared. */
+function fittedTo(context: VariantContext, solve: (ohmM: number) => Outcome | null): number[] | null {
+  if (context.declared.every((declared) => declared?.x0 === undefined)) return null;
   return context.declared.flatMap((declared, circuit) => {
     const wanted = declared?.x0;
     if (wanted === undefined || wanted <= 0) return [];
@@ -44,7 +56,8 @@ function fittedTo(context: VariantContext, solve: (ohmM: number) => Outcome | nu
         const value = solve(ohmM)?.circuits[circuit]?.x0;
         return value === undefined ? null : value / wanted - 1;
       },
-      gridOf(FITTED_OHM_M[0], FITTED_OHM_M[1], 8, true),
+      gridOf(FITTED_OHM_M[0], FITTED_OHM_M[1], 5, true),
+      7,
     );
   });
 }

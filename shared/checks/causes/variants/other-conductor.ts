@@ -72,9 +72,11 @@ function couldFit(
   const shift = (omega * 2e-4 * Math.log(gmrOf(filed.conductor) / gmrMm)) / filed.bundleCount;
   return context.base.circuits.some((values, circuit) => {
     const declared = context.declared[circuit];
-    const { x1 } = values;
-    if (declared?.x1 === undefined || x1 === undefined || declared.r1 === undefined) return false;
-    const resistance = data.acResistanceOhmPerKm / filed.bundleCount;
+    const { r1, x1 } = values;
+    if (declared?.x1 === undefined || x1 === undefined || declared.r1 === undefined || r1 === undefined)
+      return false;
+    const own = filed.conductor.acResistanceOhmPerKm ?? r1 * filed.bundleCount;
+    const resistance = r1 + (data.acResistanceOhmPerKm - own) / filed.bundleCount;
     return (
       Math.abs((declared.x1 - x1 - shift) / x1) < QUICK_LOOK &&
       Math.abs(declared.r1 / resistance - 1) < QUICK_LOOK + 0.03
