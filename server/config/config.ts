@@ -14,7 +14,6 @@ export interface Config {
   /** Whether the owner's people need a second factor to sign in. */
   totpRequired: boolean;
   logLevel: string;
-  metricsPort: number | null;
 }
 
 /** Everything that is wrong with the environment, at once. */
@@ -91,9 +90,6 @@ function publicFaults(secret: string, demo: boolean, publicUrl: URL): string[] {
 export function makeConfig(environment: Environment): Config {
   const reader = new Reader();
   const port = reader.port('PORT', environment.port, 8080);
-  const metricsPort = environment.metricsPort
-    ? reader.port('METRICS_PORT', environment.metricsPort, 0)
-    : null;
   const database = reader.url('DATABASE_URL', environment.databaseUrl ?? '', ['postgres:', 'postgresql:']);
   const local = `http://127.0.0.1:${port}`;
   const publicUrl =
@@ -117,6 +113,5 @@ export function makeConfig(environment: Environment): Config {
     demo,
     totpRequired: !demo || demoTotp,
     logLevel,
-    metricsPort,
   };
 }

@@ -8,7 +8,6 @@ const FIELDS = {
   DEMO: 'demo',
   DEMO_TOTP: 'demoTotp',
   LOG_LEVEL: 'logLevel',
-  METRICS_PORT: 'metricsPort',
 } as const;
 
 export type VariableName = keyof typeof FIELDS;

@@ -6,6 +6,7 @@ import type { Surroundings } from '../integrations/surroundings';
 import type { Logger } from '../logging/logger';
 import { checkRunJob } from './check-run.job';
 import { OutboxSender } from './outbox-sender';
+import { sweep } from './sweeper';
 
 type Job = (surroundings: Surroundings, id: string) => Promise<unknown>;
 
@@ -27,6 +28,7 @@ export interface WorkerSettings {
 }
 
 const OUTBOX_EVERY_MS = 1000;
+const SWEEP_EVERY_MS = 10 * 60_000;
 
 /** Repeats a piece of work until it is stopped; one that fails is tried again the next time. */
 function repeat(
@@ -82,9 +84,14 @@ export async function startWorker({
     OUTBOX_EVERY_MS,
     (error) => log.warn({ err: error }, 'outbox'),
   );
+  const stopSweeping = repeat(
+    () => sweep(surroundings),
+    SWEEP_EVERY_MS,
+    (error) => log.warn({ err: error }, 'sweeper'),
+  );
   return {
     stop: async () => {
-      await Promise.all([stopOutbox(), boss.stop({ graceful: true, timeout: 5000 })]);
+      await Promise.all([stopOutbox(), stopSweeping(), boss.stop({ graceful: true, timeout: 5000 })]);
     },
   };
 }

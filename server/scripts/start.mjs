@@ -100,8 +100,7 @@ function runServer(database) {
       NODE_ENV: 'production',
       PORT: port,
       DATABASE_URL: database.url,
-      // A public address needs a secret that somebody chose; the server says so when there is none.
-      SESSION_SECRET: process.env.SESSION_SECRET || (process.env.PUBLIC_URL ? '' : localSecret()),
+      SESSION_SECRET: process.env.SESSION_SECRET || localSecret(),
       LOG_LEVEL: process.env.LOG_LEVEL || 'warn',
     },
   });
