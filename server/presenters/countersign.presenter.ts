@@ -1,16 +1,9 @@
 import type { Countersign } from '../entities/review.entities';
+import type { CountersignPlace } from '../repositories/disposition.repository';
 import type { PeopleById } from '../repositories/people-names.repository';
 import type * as Api from '../../shared/contracts/api.generated';
 import type { WaiverProposal } from './finding.presenter';
 import { instantOrNull, presentPerson, presentPersonOrNull } from './person.presenter';
-
-/** What a proposal stands beside: its application's number, its revision's letter, and whether both still hold. */
-export interface CountersignPlace {
-  number: string;
-  letter: string;
-  /** The revision is the current one and the case is in review. */
-  current: boolean;
-}
 
 export function presentCountersign(
   countersign: Countersign,

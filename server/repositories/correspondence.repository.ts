@@ -94,3 +94,17 @@ export async function discrepanciesInLetters(
   );
   return new Map(rows.map((row) => [row.letterId, row.numbers]));
 }
+
+/** When the last letter of a kind went out. */
+export async function lastLetterAt(
+  manager: EntityManager,
+  applicationId: string,
+  kind: Letter['kind'],
+): Promise<Date | null> {
+  const [last] = await manager.find(Letter, {
+    where: { applicationId, kind },
+    order: { number: 'DESC' },
+    take: 1,
+  });
+  return last?.issuedAt ?? null;
+}

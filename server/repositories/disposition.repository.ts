@@ -71,3 +71,28 @@ export async function insertCountersign(
   const result = await manager.insert(Countersign, values);
   return result.identifiers[0]?.['id'] as string;
 }
+
+/** Where a proposal stands: its application's number, its revision's letter, and whether both still hold. */
+export interface CountersignPlace {
+  number: string;
+  letter: string;
+  /** The revision is the current one and the case is in review. */
+  current: boolean;
+}
+
+/** Places of proposals that have been read under the ability, by id. */
+export async function countersignPlaces(
+  manager: EntityManager,
+  ids: readonly string[],
+): Promise<ReadonlyMap<string, CountersignPlace>> {
+  const rows = await manager.query<({ id: string } & CountersignPlace)[]>(
+    `SELECT c.id, a.number, v.letter,
+        r.state = 'in-review' AND v.ordinal = (SELECT max(w.ordinal) FROM revisions w WHERE w.application_id = a.id)
+          AS current
+       FROM countersigns c JOIN applications a ON a.id = c.application_id
+       JOIN revisions v ON v.id = c.revision_id JOIN rounds r ON r.id = v.round_id
+      WHERE c.id = ANY($1::uuid[])`,
+    [ids],
+  );
+  return new Map(rows.map(({ id, ...place }) => [id, place]));
+}

@@ -140,7 +140,3 @@ export async function insertRevisionLines(
     })),
   );
 }
-
-export async function findRevisionById(manager: EntityManager, id: string): Promise<Revision | null> {
-  return manager.findOneBy(Revision, { id });
-}

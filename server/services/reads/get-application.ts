@@ -1,5 +1,4 @@
-import type { Countersign } from '../../entities/review.entities';
-import { findRevisionById, revisionLetters } from '../../repositories/revision.repository';
+import { revisionLetters } from '../../repositories/revision.repository';
 import { countersignsByIds, pendingCountersigns } from '../../repositories/disposition.repository';
 import { decisionOfRound, windowsOfApplication } from '../../repositories/correspondence.repository';
 import { overviewOf } from '../../repositories/overview.repository';
@@ -89,15 +88,4 @@ async function countersignsOf({ tx, actor }: Caller, file: CaseFile): Promise<Ap
   const { letter } = file.revision;
   const current = file.round.state === 'in-review';
   return pending.map((p) => presentCountersign(p, { number, letter, current }, people));
-}
-
-/** A countersign where it stands, for lists and for the answer to a decision. */
-export async function placeOf(caller: Caller, countersign: Countersign) {
-  const file = await readCase(caller, countersign.applicationId);
-  const revision = await findRevisionById(caller.tx.manager, countersign.revisionId);
-  return {
-    number: file.application.number,
-    letter: revision?.letter ?? 'A',
-    current: file.revision?.id === countersign.revisionId && file.round.state === 'in-review',
-  };
 }

@@ -1,33 +1,42 @@
+import type { Countersign } from '../../entities/review.entities';
 import { notFound } from '../../errors/problem';
-import { findCountersign, listCountersigns as findAll } from '../../repositories/disposition.repository';
+import {
+  countersignPlaces,
+  findCountersign,
+  listCountersigns as findAll,
+} from '../../repositories/disposition.repository';
 import { namesOf } from '../../repositories/people-names.repository';
 import { presentCountersign } from '../../presenters/countersign.presenter';
 import type * as Api from '../../../shared/contracts/api.generated';
 import type { Caller } from '../cases/caller';
-import { placeOf } from './get-application';
 
 /** Proposals that reviewers have among themselves, newest first. */
 export async function listCountersigns(
   caller: Caller,
   query: Api.ListCountersignsRequest,
 ): Promise<Api.CountersignList> {
-  const { tx, ability } = caller;
-  const all = await findAll(tx.manager, ability);
-  const people = await namesOf(
-    tx.manager,
-    all.flatMap((c) => [c.proposedBy, c.decidedBy]),
-  );
-  const items: Api.Countersign[] = [];
-  for (const countersign of all) {
-    items.push(presentCountersign(countersign, await placeOf(caller, countersign), people));
-  }
+  const items = await present(caller, await findAll(caller.tx.manager, caller.ability));
   return { items: items.filter(({ outcome }) => query.outcome === undefined || outcome === query.outcome) };
 }
 
 export async function getCountersign(caller: Caller, id: string): Promise<Api.Countersign> {
-  const { tx, ability } = caller;
-  const countersign = await findCountersign(tx.manager, ability, id);
-  if (countersign === null) throw notFound();
-  const people = await namesOf(tx.manager, [countersign.proposedBy, countersign.decidedBy]);
-  return presentCountersign(countersign, await placeOf(caller, countersign), people);
+  const countersign = await findCountersign(caller.tx.manager, caller.ability, id);
+  const [item] = countersign === null ? [] : await present(caller, [countersign]);
+  if (item === undefined) throw notFound();
+  return item;
+}
+
+async function present({ tx }: Caller, countersigns: readonly Countersign[]): Promise<Api.Countersign[]> {
+  const places = await countersignPlaces(
+    tx.manager,
+    countersigns.map((countersign) => countersign.id),
+  );
+  const people = await namesOf(
+    tx.manager,
+    countersigns.flatMap((countersign) => [countersign.proposedBy, countersign.decidedBy]),
+  );
+  return countersigns.flatMap((countersign) => {
+    const place = places.get(countersign.id);
+    return place === undefined ? [] : [presentCountersign(countersign, place, people)];
+  });
 }

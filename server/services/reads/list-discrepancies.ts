@@ -16,12 +16,14 @@ import { peopleInViews, presentFinding, type FindingView } from '../../presenter
 import type * as Api from '../../../shared/contracts/api.generated';
 import type { Caller } from '../cases/caller';
 import { readCase, type CaseFile } from '../cases/case-file';
-import { visibleDiscrepancies } from '../discrepancies/visible-discrepancies';
+import { shownState, visibleDiscrepancies, visibleEntries } from '../discrepancies/visible-discrepancies';
 import { findingViews, matterKey } from '../findings/finding-views';
 
 interface Loaded {
   file: CaseFile;
   entries: DiscrepancyEntry[];
+  /** Those of them that the caller may read. */
+  shown: DiscrepancyEntry[];
   links: RaisedFrom[];
   views: FindingView[];
   attachments: LinkedAttachment[];
@@ -69,7 +71,8 @@ async function load(caller: Caller, file: CaseFile, discrepancies: readonly Disc
   const writers = entries.map((e) => e.writtenBy);
   const ownersPeople = await asSystem(tx, (manager) => membersAmong(manager, owner.id, writers));
   const names = { people, letters, owner, applicant: applicant ?? owner, ownersPeople, numbers };
-  return { file, entries, links: await raisedFrom(tx.manager, ids), views, attachments, names };
+  const shown = await visibleEntries(caller, file, entries);
+  return { file, entries, shown, links: await raisedFrom(tx.manager, ids), views, attachments, names };
 }
 
 function present(caller: Caller, discrepancy: Discrepancy, loaded: Loaded): Api.Discrepancy {
@@ -78,12 +81,14 @@ function present(caller: Caller, discrepancy: Discrepancy, loaded: Loaded): Api.
   const matters = new Set(links.map(matterKey));
   const findings = loaded.views.filter((view) => matters.has(matterKey(view.finding)));
   const attachments = loaded.attachments.filter(({ link }) => link.discrepancyId === discrepancy.id);
+  const own = (entry: DiscrepancyEntry) => entry.discrepancyId === discrepancy.id;
+  const shown = loaded.shown.filter(own);
   return presentDiscrepancy(
-    discrepancy,
+    { ...discrepancy, state: shownState(discrepancy, loaded.entries.filter(own), shown) },
     {
       links,
       findings: findings.map((view) => presentFinding(view, names)),
-      entries: loaded.entries.filter((entry) => entry.discrepancyId === discrepancy.id),
+      entries: shown,
       attachments: attachments.map((a) => presentAttachment(a, file.application, names)),
       // words that are not sent yet are the applicant's own
       showsDraft: caller.actor.role === 'applicant',

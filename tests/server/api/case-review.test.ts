@@ -115,6 +115,12 @@ describe('windows', () => {
     expect(queue.items[0]?.window?.left).toBeLessThan(0);
     const dues = queue.items.map((item) => item.dueAt ?? '');
     expect(dues).toEqual([...dues].sort());
+    const byNumber = await expecting<Api.Queue>(
+      200,
+      then.get(`/api/queue?filter[number]=${number.slice(3)}`),
+    );
+    expect(byNumber.items.map((item) => item.number)).toContain(number);
+    expect(byNumber.items.every((item) => item.number.includes(number.slice(3)))).toBe(true);
     expect((await expecting<Api.Application>(200, then.get(at()))).state).toBe('in-review');
   });
 
@@ -244,6 +250,7 @@ describe('findings', () => {
     await explained();
     await expecting(200, reviewer.post(at('/discrepancies/1/settle'), { revision: 'B' }));
     expect((await x1Of('B')).stands).toBe(false);
+    app.db.clock.advance(60_000);
     const again = { revision: 'B', text: 'On second thought: measured how?' };
     const reopened = await expecting<Api.Discrepancy>(
       200,
@@ -252,6 +259,13 @@ describe('findings', () => {
     expect(reopened).toMatchObject({ state: 'open', answeredBy: null });
     expect((await x1Of('B')).stands).toBe(true);
     expect((await refused(reviewer, '/discrepancies/1/reopen', again)).detail).toBe('D-1 is still open.');
+    const asApplicantSees = async () =>
+      (await expecting<Api.DiscrepancyList>(200, applicant.get(at('/discrepancies')))).items[0];
+    expect(await asApplicantSees()).toMatchObject({ state: 'answered' });
+    expect(JSON.stringify(await asApplicantSees())).not.toContain('On second thought');
+    await step(reviewer, number, 'return', { revision: 'B' });
+    expect(await asApplicantSees()).toMatchObject({ state: 'open' });
+    expect(JSON.stringify(await asApplicantSees())).toContain('On second thought');
   });
 });
 
