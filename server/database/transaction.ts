@@ -36,11 +36,26 @@ async function declareActor(manager: EntityManager, actor: Actor): Promise<void>
   );
 }
 
+const systemDepth = new WeakMap<Transaction, number>();
+
 /** Runs one look-up or write with the product's own sight (a reviewer's address, the next number), then the actor's again. */
 export async function asSystem<T>(tx: Transaction, work: (manager: EntityManager) => Promise<T>): Promise<T> {
-  await declareActor(tx.manager, system('system'));
-  const result = await work(tx.manager);
-  await declareActor(tx.manager, tx.actor);
+  const depth = systemDepth.get(tx) ?? 0;
+  if (depth === 0) await declareActor(tx.manager, system('system'));
+  systemDepth.set(tx, depth + 1);
+  const leave = async () => {
+    systemDepth.set(tx, depth);
+    if (depth === 0) await declareActor(tx.manager, tx.actor);
+  };
+  let result: T;
+  try {
+    result = await work(tx.manager);
+  } catch (error) {
+    // After a failed statement PostgreSQL takes no other until the transaction ends: then there is nothing to restore.
+    await leave().catch(() => undefined);
+    throw error;
+  }
+  await leave();
   return result;
 }
 

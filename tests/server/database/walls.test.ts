@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { Application } from '#server/entities/case.entities';
+import { asSystem } from '#server/database/transaction';
 import { Note } from '#server/entities/review.entities';
 import { makeTestDatabase } from '../../support/test-database';
 import type { TestDatabase } from '../../support/test-database';
@@ -77,6 +78,23 @@ describe('row security, the second wall', () => {
       await db.as(reviewer, (tx) => tx.manager.count(Application));
       expect(await db.web.manager.count(Application)).toBe(0);
     }
+  });
+
+  it('widens the sight for one look-up only, nested or failed', async () => {
+    await db.as(ours, async (tx) => {
+      const count = () => tx.manager.count(Application);
+      const nested = await asSystem(tx, async () => {
+        await asSystem(tx, count);
+        return count();
+      });
+      expect(nested).toBe(2);
+      expect(await count()).toBe(1);
+      const failed = asSystem(tx, async () => {
+        throw new Error('no');
+      });
+      await expect(failed).rejects.toThrow('no');
+      expect(await count()).toBe(1);
+    });
   });
 
   it('hides reviewers’ notes from the applicant they are about', async () => {
