@@ -8,7 +8,7 @@ function across(position: DrawnPosition, unit: DrawingUnit): string {
 
 /** What a position is called: "Phase a", "Phase b of circuit 2", "Ground wire gw 1". */
 export function positionName(position: DrawnPosition, circuits: number): string {
-  if (position.kind === 'ground-wire') return `Ground wire ${position.label}`;
+  if (position.kind === 'ground-wire') return `Ground wire ${position.label}`.trimEnd();
   return circuits > 1 ? `Phase ${position.label} of circuit ${position.circuit}` : `Phase ${position.label}`;
 }
 
