@@ -66,38 +66,7 @@ export function RaiseDialog({
         ) : (
           <LineChoice lines={lines} chosen={draft.lineKeys} onChange={(lineKeys) => change({ lineKeys })} />
         )}
-        <Field label="About" id={FIELD_IDS.title} error={faultOf('title')}>
-          {(ties) => (
-            <TextInput
-              {...ties}
-              maxLength={200}
-              value={draft.title}
-              onChange={(e) => change({ title: e.target.value })}
-            />
-          )}
-        </Field>
-        <Field label="What is questioned" id={FIELD_IDS.question} error={faultOf('question')}>
-          {(ties) => (
-            <TextArea
-              {...ties}
-              rows={5}
-              maxLength={4000}
-              value={draft.question}
-              onChange={(e) => change({ question: e.target.value })}
-            />
-          )}
-        </Field>
-        <Field label="What would settle it" optional>
-          {(ties) => (
-            <TextArea
-              {...ties}
-              rows={2}
-              maxLength={4000}
-              value={draft.wanted}
-              onChange={(e) => change({ wanted: e.target.value })}
-            />
-          )}
-        </Field>
+        <RaiseFields draft={draft} faultOf={faultOf} onChange={change} />
         <ProblemNotice error={raise.error} />
         <div className="flex flex-wrap gap-3">
           <Button type="submit" kind="primary" busy={raise.isPending}>
@@ -107,6 +76,51 @@ export function RaiseDialog({
         </div>
       </form>
     </Dialog>
+  );
+}
+
+interface RaiseFieldsProps {
+  draft: RaiseDraft;
+  faultOf: (field: 'title' | 'question') => string | null;
+  onChange: (part: Partial<RaiseDraft>) => void;
+}
+
+function RaiseFields({ draft, faultOf, onChange }: RaiseFieldsProps) {
+  return (
+    <>
+      <Field label="About" id={FIELD_IDS.title} error={faultOf('title')}>
+        {(ties) => (
+          <TextInput
+            {...ties}
+            maxLength={200}
+            value={draft.title}
+            onChange={(e) => onChange({ title: e.target.value })}
+          />
+        )}
+      </Field>
+      <Field label="What is questioned" id={FIELD_IDS.question} error={faultOf('question')}>
+        {(ties) => (
+          <TextArea
+            {...ties}
+            rows={5}
+            maxLength={4000}
+            value={draft.question}
+            onChange={(e) => onChange({ question: e.target.value })}
+          />
+        )}
+      </Field>
+      <Field label="What would settle it" optional>
+        {(ties) => (
+          <TextArea
+            {...ties}
+            rows={2}
+            maxLength={4000}
+            value={draft.wanted}
+            onChange={(e) => onChange({ wanted: e.target.value })}
+          />
+        )}
+      </Field>
+    </>
   );
 }
 
