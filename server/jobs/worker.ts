@@ -6,6 +6,7 @@ import type { Surroundings } from '../integrations/surroundings';
 import type { Logger } from '../logging/logger';
 import { checkRunJob } from './check-run.job';
 import { OutboxSender } from './outbox-sender';
+import { sendReminders } from '../services/windows/send-reminders';
 import { sweep } from './sweeper';
 
 type Job = (surroundings: Surroundings, id: string) => Promise<unknown>;
@@ -29,6 +30,7 @@ export interface WorkerSettings {
 
 const OUTBOX_EVERY_MS = 1000;
 const SWEEP_EVERY_MS = 10 * 60_000;
+const REMIND_EVERY_MS = 15 * 60_000;
 
 /** Repeats a piece of work until it is stopped; one that fails is tried again the next time. */
 function repeat(
@@ -89,9 +91,19 @@ export async function startWorker({
     SWEEP_EVERY_MS,
     (error) => log.warn({ err: error }, 'sweeper'),
   );
+  const stopReminding = repeat(
+    () => sendReminders(surroundings),
+    REMIND_EVERY_MS,
+    (error) => log.warn({ err: error }, 'reminders'),
+  );
   return {
     stop: async () => {
-      await Promise.all([stopOutbox(), stopSweeping(), boss.stop({ graceful: true, timeout: 5000 })]);
+      await Promise.all([
+        stopOutbox(),
+        stopSweeping(),
+        stopReminding(),
+        boss.stop({ graceful: true, timeout: 5000 }),
+      ]);
     },
   };
 }

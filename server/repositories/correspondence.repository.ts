@@ -108,3 +108,26 @@ export async function lastLetterAt(
   });
   return last?.issuedAt ?? null;
 }
+
+/** An open window of a case, with whom it waits for. */
+export interface OpenWindow {
+  id: string;
+  kind: CaseWindow['kind'];
+  dueAt: Date;
+  applicationId: string;
+  orgId: string;
+  number: string;
+  title: string;
+  reviewerId: string | null;
+}
+
+/** Open windows that end before an instant, the first to end first. */
+export async function openWindowsUntil(manager: EntityManager, until: Date): Promise<OpenWindow[]> {
+  return manager.query<OpenWindow[]>(
+    `SELECT w.id, w.kind, w.due_at AS "dueAt", a.id AS "applicationId", a.org_id AS "orgId", a.number, a.title,
+        r.reviewer_id AS "reviewerId"
+       FROM windows w JOIN rounds r ON r.id = w.round_id JOIN applications a ON a.id = r.application_id
+      WHERE w.closed_at IS NULL AND w.due_at < $1 ORDER BY w.due_at`,
+    [until],
+  );
+}

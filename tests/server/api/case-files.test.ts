@@ -370,6 +370,9 @@ describe('lists', () => {
     expect(new Set(grave.items.map((item) => item.worstGrade))).toEqual(new Set(['must-answer']));
     expect((await get('filter[voltage]=345')).total).toBe((await get('')).total);
     expect((await get('filter[voltage]=115')).total).toBe(0);
+    const [first] = mine.items;
+    const byNumber = await get(`filter[number]=${first?.number ?? ''}`);
+    expect(byNumber.items.map((item) => item.number)).toEqual([first?.number]);
     expect((await get('filter[state]=accepted')).total).toBe(0);
   });
 
