@@ -15,6 +15,7 @@ import { useRuleSets } from '../api/list-rule-sets';
 import { useDraftEdits } from '../hooks/use-draft-edits';
 import { bandKey, bandsOf, changedBands, classesOf, editedBands } from '../model/band-form';
 import { BandTable } from './band-table';
+import { CalendarSheet } from './calendar-sheet';
 import { ClassChoice } from './class-choice';
 import { DraftSheet } from './draft-sheet';
 import { HistorySheet } from './history-sheet';
@@ -28,7 +29,7 @@ export function BandsPage() {
   const edits = useDraftEdits(draft);
   const classes = classesOf(draft.bands);
   const [shown, setShown] = useShownClass(classes);
-  const [part, setPart] = useState<'bands' | 'settings'>('bands');
+  const [part, setPart] = useState<'bands' | 'settings' | 'calendar'>('bands');
   const inForce = new Map((rules.bands as Band[]).map((band) => [bandKey(band), band]));
   const changed = changedBands(editedBands(draft.bands, edits.bands) ?? draft.bands, [...inForce.values()]);
   const bands = shown ? bandsOf(draft.bands, shown.classKv, shown.frequencyHz) : [];
@@ -52,6 +53,7 @@ export function BandsPage() {
           options={[
             { value: 'bands', label: 'Bands' },
             { value: 'settings', label: 'Tolerances, inputs, windows' },
+            { value: 'calendar', label: 'Calendar' },
           ]}
         />
         {part === 'bands' && (
@@ -60,7 +62,7 @@ export function BandsPage() {
       </div>
       <div className="bands-columns">
         <div>
-          {part === 'bands' ? (
+          {part === 'bands' && (
             <Sheet main title="Bounds" aside="Per kilometre, at rated frequency">
               {bands.length > 0 ? (
                 <BandTable bands={bands} inForce={inForce} edits={edits.bands} onEdit={edits.editBand} />
@@ -68,9 +70,11 @@ export function BandsPage() {
                 <EmptyState title="There are no bands for this class." />
               )}
             </Sheet>
-          ) : (
+          )}
+          {part === 'settings' && (
             <SettingsSheets draft={draft} edits={edits} inForce={settingsInForce(rules)} />
           )}
+          {part === 'calendar' && <CalendarSheet />}
         </div>
         <div>
           <DraftSheet draft={draft} edits={edits} changed={changed} />

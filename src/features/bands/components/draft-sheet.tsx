@@ -5,6 +5,7 @@ import { ProblemNotice } from '../../../components/feedback/problem-notice';
 import { WordsDialog } from '../../../components/feedback/words-dialog';
 import { Button } from '../../../components/ui/button';
 import { Sheet } from '../../../components/ui/sheet';
+import { useDiscardBandDraft } from '../api/discard-band-draft';
 import { usePublishBands } from '../api/publish-bands';
 import type { DraftEdits } from '../hooks/use-draft-edits';
 import { bandKey, bandWords, limitText } from '../model/band-form';
@@ -19,6 +20,7 @@ interface DraftSheetProps {
 /** What the draft changes, and the two steps: save it, publish it with a reason. */
 export function DraftSheet({ draft, edits, changed }: DraftSheetProps) {
   const [publishing, setPublishing] = useState(false);
+  const discard = useDiscardBandDraft();
   return (
     <Sheet
       title={`Draft of rules ${draft.ruleSetVersion}`}
@@ -34,7 +36,7 @@ export function DraftSheet({ draft, edits, changed }: DraftSheetProps) {
             ))}
           </ul>
         )}
-        <ProblemNotice error={edits.error} />
+        <ProblemNotice error={edits.error ?? discard.error} />
         <div className="grid justify-items-start gap-3">
           <Button
             busy={edits.saving}
@@ -47,6 +49,14 @@ export function DraftSheet({ draft, edits, changed }: DraftSheetProps) {
           <Button kind="primary" blockedBy={publishBlock(draft, edits)} onClick={() => setPublishing(true)}>
             {`Publish rules ${draft.ruleSetVersion}`}
           </Button>
+          {draft.version > 0 && (
+            <Button
+              busy={discard.isPending}
+              onClick={() => discard.mutate(draft.version, { onSuccess: edits.forget })}
+            >
+              Discard the draft
+            </Button>
+          )}
         </div>
       </div>
       {publishing && <PublishDialog draft={draft} onClose={() => setPublishing(false)} />}

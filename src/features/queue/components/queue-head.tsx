@@ -1,11 +1,13 @@
 import type { Queue } from '#shared/contracts/api.generated';
 import { formatDay } from '#shared/format/dates';
+import { localDay } from '#shared/workflow/calendar';
 import { DueRule } from '../../../components/charts/due-rule';
 import { SegmentLinks } from '../../../components/ui/segment';
 import { useDocumentTitle } from '../../../hooks/use-document-title';
 import type { ListControls } from '../../../hooks/use-list-view';
 import { writeListView } from '../../../lib/list-view';
-import { dayOf, dueItems, ruleDays } from '../model/due-days';
+import { useCalendar } from '../../../lib/queries/get-calendar';
+import { dueItems, ruleDays, workCalendar } from '../model/due-days';
 import { QUEUE_LIST, queueLead, whoseOf, withWhose, type QueueFilter, type Whose } from '../model/queue-list';
 
 const WORDS: Readonly<Record<Whose, string>> = {
@@ -48,13 +50,14 @@ export function QueueHead({ overview, controls: { view } }: QueueHeadProps) {
 
 /** The rule of due days with each application's worst grade standing on its day. */
 function Dues({ overview: { items } }: { overview: Queue }) {
+  const calendar = workCalendar(useCalendar());
   const now = new Date();
-  const today = dayOf(now);
+  const today = localDay(now, calendar.timeZone);
   return (
     <DueRule
-      days={ruleDays(today)}
-      today={{ date: today, text: `Today, ${formatDay(now)}` }}
-      items={dueItems(items)}
+      days={ruleDays(today, calendar)}
+      today={{ date: today, text: `Today, ${formatDay(now, calendar.timeZone)}` }}
+      items={dueItems(items, calendar)}
       label={`Due days of ${items.length} open applications, each with its worst finding. ${queueLead(items.length, items)}`}
     />
   );
