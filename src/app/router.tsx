@@ -3,6 +3,7 @@ import { createBrowserRouter, redirect, type LoaderFunctionArgs, type RouteObjec
 import { SkeletonPage } from '../components/feedback/skeleton';
 import { ApiProblem } from '../lib/api/problem';
 import { sessionQuery } from '../lib/api/session';
+import { mayOpen } from './may-open';
 import { NotFound, PageError } from './page-error';
 import { homeOf } from './places';
 import { OPEN_ROUTES, ROUTES, type RouteEntry } from './route-table';
@@ -29,22 +30,24 @@ function leadHome(client: QueryClient) {
   };
 }
 
-/** A page of another role is not there for this one. */
-async function refuseOtherRoles(client: QueryClient, entry: RouteEntry): Promise<void> {
-  if (!entry.roles) return;
+/** A page that is not for this person is not there: the same answer as for an address that nobody has. */
+async function refuseOthers(client: QueryClient, entry: RouteEntry): Promise<void> {
+  if (!entry.roles && !entry.needs) return;
   const session = await client.ensureQueryData(sessionQuery());
-  if (session && !entry.roles.includes(session.role))
+  if (session && !mayOpen(session, entry))
     throw new ApiProblem({ type: '/problems/not-found', title: 'Not found', status: 404 });
 }
 
-function toRoute(client: QueryClient, entry: RouteEntry): RouteObject {
+function toRoute(client: QueryClient, entry: RouteEntry, isOpen = false): RouteObject {
   return {
     path: entry.path,
     errorElement: <PageError />,
     lazy: async () => {
       const { Component, prefetch } = await entry.lazy();
       const loader = async ({ params, request }: LoaderFunctionArgs) => {
-        await refuseOtherRoles(client, entry);
+        await refuseOthers(client, entry);
+        // The sign-in comes first: what is asked for without a session would only be refused.
+        if (!isOpen && !(await client.ensureQueryData(sessionQuery()))) return null;
         // Not awaited: the page's own skeletons hold the place, and its own queries show what fails.
         void Promise.resolve(prefetch?.(client, params, new URL(request.url))).catch(() => undefined);
         return null;
@@ -56,7 +59,7 @@ function toRoute(client: QueryClient, entry: RouteEntry): RouteObject {
 
 export function createRouter(client: QueryClient) {
   return createBrowserRouter([
-    ...OPEN_ROUTES.map((entry) => toRoute(client, entry)),
+    ...OPEN_ROUTES.map((entry) => toRoute(client, entry, true)),
     {
       path: '/',
       element: <Shell />,

@@ -55,6 +55,7 @@ function Disc({ mark, radius, circuits }: Pick<PositionMarkProps, 'mark' | 'radi
     <>
       <circle r={radius} className={bad ? 'fill-vermilion' : 'fill-ink'} />
       <text
+        aria-hidden="true"
         x={fits ? 0 : radius + 3}
         y={fits ? 3.8 : 4}
         textAnchor={fits ? 'middle' : 'start'}

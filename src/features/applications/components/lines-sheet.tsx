@@ -69,7 +69,7 @@ function DraftState({ line }: { line: DraftLine }) {
   const count = line.faults.length;
   return (
     <span className="font-semibold text-copper">
-      {count === 1 ? '1 entry still lacks' : `${count} entries still lack`}
+      {count === 1 ? '1 entry to complete' : `${count} entries to complete`}
     </span>
   );
 }

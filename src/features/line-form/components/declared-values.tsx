@@ -60,7 +60,7 @@ function CircuitValues({ circuit }: { circuit: number }) {
     <div className={circuit === 2 ? 'mt-6 border-t border-rule pt-4' : undefined}>
       {form.circuits === 2 && (
         <div className="mb-3 flex flex-wrap items-baseline justify-between gap-x-4">
-          <h3>{`Circuit ${circuit}`}</h3>
+          <h2 className="text-h3">{`Circuit ${circuit}`}</h2>
           <Checkbox
             label="Somebody else’s, no values"
             checked={index < 0}

@@ -84,7 +84,7 @@ function PositionRow({
           <PositionMark position={position} />
           <span className="sr-only field:not-sr-only">{words}</span>
           <span aria-hidden="true" className="text-label field:hidden">
-            {name.replace(/\D/g, '')}
+            {position.kind === 'phase' && form.circuits === 2 ? position.circuit : name.replace(/\D/g, '')}
           </span>
         </span>
       </RowHead>

@@ -27,23 +27,24 @@ function SeasonRatings({ index }: { index: number }) {
   return (
     <div className="grid gap-4">
       {ratings.map((_, i) => (
-        <div key={i} className="grid items-start gap-3 field:grid-cols-[1fr_1fr_1fr_auto]">
+        <div key={i} className="grid gap-x-6 gap-y-3 border-l-2 border-rule pl-4 field:grid-cols-2">
           <TextField path={[...path, i, 'season']} label={`Season ${i + 1}`} />
+          <div className="self-end">
+            <Button
+              small
+              aria-label={`Remove season ${i + 1}`}
+              onClick={() =>
+                set(
+                  path,
+                  ratings.filter((__, other) => other !== i),
+                )
+              }
+            >
+              Remove
+            </Button>
+          </div>
           <TypedField path={[...path, i, 'continuousA']} label="Continuous" units="A" />
-          <TypedField path={[...path, i, 'emergencyA']} label="Short-time" units="A" />
-          <Button
-            small
-            className="field:mt-6"
-            aria-label={`Remove season ${i + 1}`}
-            onClick={() =>
-              set(
-                path,
-                ratings.filter((__, other) => other !== i),
-              )
-            }
-          >
-            Remove
-          </Button>
+          <TypedField path={[...path, i, 'emergencyA']} label="Short-time" units="A" optional />
         </div>
       ))}
       {ratings.length < 12 && (

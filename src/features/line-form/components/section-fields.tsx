@@ -73,7 +73,7 @@ function CableValues({ index, section }: { index: number; section: SectionForm }
     >
       {section.perLength.map((_, circuit) => (
         <div key={circuit} className={circuit > 0 ? 'mt-5' : undefined}>
-          {section.perLength.length > 1 && <h3 className="mb-3">{`Circuit ${circuit + 1}`}</h3>}
+          {section.perLength.length > 1 && <h2 className="mb-3 text-h3">{`Circuit ${circuit + 1}`}</h2>}
           <SequenceFields path={['sections', index, 'perLength', circuit]} />
         </div>
       ))}

@@ -92,12 +92,12 @@ const LABELS: Record<string, string> = {
 
 const SEQUENCE = /^[rxb][01]m?$/;
 
-/** How a position is called in sentences: "a", "a of circuit 2", "ground wire 1". */
+/** How a position is called in sentences: "a", "2a", "ground wire 1". */
 export function positionName(form: LineForm, section: number, position: number): string {
   const positions = form.sections[section]?.positions ?? [];
   const at = positions[position];
   if (!at) return `position ${position + 1}`;
-  if (at.kind === 'phase') return form.circuits === 2 ? `${at.phase}${at.circuit}` : at.phase;
+  if (at.kind === 'phase') return form.circuits === 2 ? `${at.circuit}${at.phase}` : at.phase;
   const ground = positions.slice(0, position + 1).filter((p) => p.kind === 'ground-wire').length;
   const several = positions.filter((p) => p.kind === 'ground-wire').length > 1;
   return several ? `ground wire ${ground}` : 'the ground wire';

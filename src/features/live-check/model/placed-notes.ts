@@ -19,6 +19,9 @@ function placeOf(where: string): string {
 }
 
 const isOfDrawing = (f: Finding): boolean => f.family === 'drawing' && f.grade !== 'note';
+/** Geometry that is owed may be filed without; it stands in the check and at no field. */
+const isOwed = (f: Finding): boolean => f.code === 'drawing.geometry-missing';
+const namesAnEntry = (f: Finding): boolean => /\/(positions|conductors)\//.test(f.where);
 const isUncomputed = (report: LineReport): boolean => report.circuits.some((c) => c.recomputed === null);
 
 const placed = ({ where, grade, message }: Finding): Placed => ({ pointer: placeOf(where), grade, message });
@@ -36,14 +39,16 @@ export function blockersOf(outcome: CheckOutcome | null): Placed[] {
   const { report } = outcome;
   if (!isUncomputed(report)) return [];
   return allFindings(report)
-    .filter((f) => isOfDrawing(f) && f.grade === 'must-answer')
+    .filter((f) => isOfDrawing(f) && f.grade === 'must-answer' && !isOwed(f))
     .map(placed);
 }
 
 /** Findings about the geometry itself, to be said at the field that they are about. */
 export function drawingNotes(outcome: CheckOutcome | null): Placed[] {
   if (outcome?.kind !== 'report') return [];
-  return allFindings(outcome.report).filter(isOfDrawing).map(placed);
+  return allFindings(outcome.report)
+    .filter((f) => isOfDrawing(f) && namesAnEntry(f))
+    .map(placed);
 }
 
 /** Positions of a section, by index, that a Must answer about the drawing names. */

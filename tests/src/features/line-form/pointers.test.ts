@@ -47,7 +47,7 @@ describe('a field has the name that people use', () => {
   it.each([
     [oneWire, '/sections/0/positions/2/attachmentHeightM', 'Phase c: Height'],
     [oneWire, '/sections/0/positions/3/sagM', 'Ground wire: Sag'],
-    [twoWires, '/sections/0/positions/4/horizontalM', 'Phase b2: Across'],
+    [twoWires, '/sections/0/positions/4/horizontalM', 'Phase 2b: Across'],
     [twoWires, '/sections/0/positions/7/horizontalM', 'Ground wire 2: Across'],
     [twoWires, '/declared/1/x0/value', 'Circuit 2: X0'],
     [oneWire, '/declared/0/b1/value', 'B1'],
