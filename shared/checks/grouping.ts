@@ -110,7 +110,8 @@ function groupOne(
   }
   return found.map((finding): Finding => {
     const { group, matter } = placed.get(finding) ?? { group: groups.next(), matter: null };
-    const isOpen = wereSought && matter === null && finding.family === 'geometry' && finding.grade !== 'note';
+    const isOpen =
+      wereSought && matter === null && finding.family === 'geometry' && finding.grade === 'must-answer';
     return {
       ...finding,
       message: isOpen ? finding.message + UNEXPLAINED_WORDS : finding.message,

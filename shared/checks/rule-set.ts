@@ -1,3 +1,4 @@
+import type { WeatherAssumptions } from '../engine/index';
 import type { BandParameter, LineParameter, MutualParameter } from './parameters';
 
 /**
@@ -58,6 +59,8 @@ export interface OwnerSettings {
   baseMva: number;
   /** Earth resistivity where the filing gives none, Ω·m. */
   earthResistivityOhmM: number;
+  /** Weather that declared ratings are weighed under; the basis of the published tables when absent. */
+  weather?: WeatherAssumptions;
 }
 
 /** Everything a check is judged by. A check run keeps the versions of the set that it was made with. */

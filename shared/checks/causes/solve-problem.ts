@@ -35,7 +35,10 @@ export function solveProblem(problem: Problem, variants: readonly Variant[], rea
     const stacked = bestStack(fits, problem, cover);
     if (stacked !== null) return stacked;
   }
-  return cover.items.map((item) => ({
+  // A resistivity always fits some X0; beside values that nothing explains it would only distract.
+  const chosen =
+    cover.unexplained === 0 ? cover.items : cover.items.filter(({ code }) => code !== 'earth-resistivity');
+  return chosen.map((item) => ({
     explains: namesOf(item, problem),
     causes: causesOf(item, items, targets, honest, cover),
   }));

@@ -11,6 +11,7 @@ import { geometryB1 } from './geometry/b1';
 import { geometryR0 } from './geometry/r0';
 import { geometryR0m } from './geometry/r0m';
 import { geometryR1 } from './geometry/r1';
+import { rating } from './geometry/rating';
 import { wholeLineForm } from './geometry/whole-line-form';
 import { geometryX0 } from './geometry/x0';
 import { geometryX0m } from './geometry/x0m';
@@ -73,6 +74,7 @@ export const RULES: readonly Rule[] = [
   geometryX0m,
   geometryB0m,
   wholeLineForm,
+  rating,
   typicalR1,
   typicalX1,
   typicalB1,

@@ -88,6 +88,9 @@ const longLine = (form: 'equivalent' | 'nominal') =>
     line.declared[0].x1 = { value, unit: 'ohm' };
   });
 
+const rated = (ratingA: number): Json =>
+  exampleLine((line) => Object.assign(line.declared[0], { ratingA, maxTemperatureC: 75 }));
+
 const CASES: Readonly<Record<string, Case>> = {
   'physics.not-positive': { fires: bare({ r1: -0.04 }), grade: 'must-answer', silent: bare({}) },
   // v = 1.03 against 1.00 of light's; what the digits leave is far less.
@@ -115,6 +118,8 @@ const CASES: Readonly<Record<string, Case>> = {
     grade: 'note',
     silent: exampleLine((line) => (line.declared[0].x1 = { value: 16.2, unit: 'ohm' })),
   },
+  // Two Drake at 75 °C carry about 2 × 907 A on the published tables' basis.
+  'geometry.rating': { fires: rated(2100), grade: 'explain', silent: rated(1800) },
   'typical.r1': { fires: bare({ r1: 0.0655 }), grade: 'explain', silent: bare({ r1: 0.0645 }) },
   'typical.x1': {
     fires: bare({ x1: 0.533, b1: 3.11 }),
