@@ -5,7 +5,7 @@ import { cssVariables, DARK, LIGHT, type ColourToken } from './shared/format/pal
 const tokens = Object.keys(LIGHT) as ColourToken[];
 const colours = Object.fromEntries(tokens.map((token) => [token, `var(--${token})`]));
 
-/** Emits both themes. `.on-paper` keeps the light tokens for whatever stands for a printed page. */
+/** Emits both themes; the dark one for screens only, so that paper is always light. */
 const themes = plugin(({ addBase }) => {
   const light = { 'color-scheme': 'light', ...cssVariables(LIGHT) };
   const dark = { 'color-scheme': 'dark', ...cssVariables(DARK) };
@@ -14,7 +14,6 @@ const themes = plugin(({ addBase }) => {
     '@media screen and (prefers-color-scheme: dark)': { ':root:not([data-theme="light"])': dark },
     '@media screen': { ':root[data-theme="dark"]': dark },
   });
-  addBase({ ':root .on-paper': light });
 });
 
 /**

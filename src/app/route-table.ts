@@ -1,10 +1,14 @@
 import type { QueryClient } from '@tanstack/react-query';
 import type { RouteObject } from 'react-router-dom';
+import type { Action, Subject } from '#shared/policies/subjects';
 import type { Role } from '../lib/api/session';
 
-/** One URL: who may open it (everybody signed in, if none is named) and the file that composes its page. */
+/** One URL: who may open it (everybody signed in, if nothing is named) and the file that composes its page. */
 export interface RouteEntry {
   path: string;
+  /** What the policies must allow for the page to be there at all. */
+  needs?: readonly [Action, Subject];
+  /** Pages made for one side of a case alone. */
   roles?: readonly Role[];
   lazy: () => Promise<RouteModule>;
 }
@@ -27,16 +31,20 @@ export const OPEN_ROUTES: readonly RouteEntry[] = [
 /** Pages inside the frame with the bar on top. */
 export const ROUTES: readonly RouteEntry[] = [
   { path: '/applications', lazy: () => import('./routes/applications') },
-  { path: '/applications/new', roles: ['applicant'], lazy: () => import('./routes/new-application') },
+  {
+    path: '/applications/new',
+    needs: ['create', 'Application'],
+    lazy: () => import('./routes/new-application'),
+  },
   { path: '/applications/:number', lazy: () => import('./routes/application') },
   {
     path: '/applications/:number/edit',
-    roles: ['applicant'],
+    needs: ['update', 'Application'],
     lazy: () => import('./routes/edit-application'),
   },
   {
     path: '/applications/:number/lines/:lineKey',
-    roles: ['applicant'],
+    needs: ['update', 'Application'],
     lazy: () => import('./routes/line-form'),
   },
   {
@@ -56,7 +64,7 @@ export const ROUTES: readonly RouteEntry[] = [
   { path: '/lines', lazy: () => import('./routes/lines') },
   { path: '/letters', lazy: () => import('./routes/letters') },
   { path: '/rules', lazy: () => import('./routes/rules') },
-  { path: '/bands', roles: ['administrator'], lazy: () => import('./routes/bands') },
-  { path: '/people', roles: ['administrator'], lazy: () => import('./routes/people') },
-  { path: '/record', roles: ['administrator'], lazy: () => import('./routes/record') },
+  { path: '/bands', needs: ['update', 'RuleSet'], lazy: () => import('./routes/bands') },
+  { path: '/people', needs: ['administer', 'User'], lazy: () => import('./routes/people') },
+  { path: '/record', needs: ['read', 'AuditEvent'], lazy: () => import('./routes/record') },
 ];

@@ -27,7 +27,7 @@ interface LooseInput {
   idempotencyKey?: string;
 }
 
-/** The answer as the client sees it: a file is asked for with `callForFile`, all else is JSON. */
+/** The answer as the client sees it: files are opened at `addressOf`, all else is JSON. */
 export type CallAnswer<Id extends Known> = ApiTypes[Id]['response'] extends FileBytes
   ? never
   : ApiTypes[Id]['response'];
@@ -58,11 +58,6 @@ export async function call<Id extends Known>(id: Id, input: CallInput<Id>): Prom
   const response = await sendTo(id, input as LooseInput);
   if (response.status === 204) return undefined as unknown as CallAnswer<Id>;
   return (await response.json()) as CallAnswer<Id>;
-}
-
-/** Calls an operation that answers with a file. */
-export async function callForFile<Id extends Known>(id: Id, input: CallInput<Id>): Promise<Blob> {
-  return (await sendTo(id, input as LooseInput)).blob();
 }
 
 /** A form with one file and its text fields, as the upload operations take it. */

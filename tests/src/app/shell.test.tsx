@@ -73,6 +73,14 @@ describe('coming in', () => {
     expect(screen.getByRole('link', { name: 'Skip to the page' })).toHaveAttribute('href', '#page');
   });
 
+  it('has no page of another role, as if it were not there', async () => {
+    answer = (url) => (url === '/api/session' ? json(SIGNED_IN) : undefined);
+    open('/bands');
+    expect(
+      await screen.findByRole('heading', { name: 'There is nothing at this address' }, LONG),
+    ).toBeInTheDocument();
+  });
+
   it('has nothing at an address that is nobody’s, and says what may have happened', async () => {
     answer = (url) => (url === '/api/session' ? json(SIGNED_IN) : undefined);
     open('/no-such-place');
