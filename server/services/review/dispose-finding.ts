@@ -15,6 +15,7 @@ import { gatherFacts } from '../cases/gather-facts';
 import { recordStep } from '../cases/record-step';
 import { requireRevision } from '../cases/revision-changes';
 import { requireStep } from '../cases/take-step';
+import { waiveSettledDiscrepancies } from '../discrepancies/waive-discrepancies';
 import { findingName } from '../findings/finding-names';
 
 /** Waives a finding, or sets one aside. A Must answer's waiver waits for a second reviewer. */
@@ -31,15 +32,16 @@ export async function disposeFinding(
   requireStep(caller, 'waive', await gatherFacts(caller, file));
   const finding = await findingOf(caller, file, fingerprint);
   await refuseTwice(caller, file, finding, kind);
-  if (needsCountersign(kind, finding.grade)) await propose(caller, file, finding, request.reason);
+  const proposed = needsCountersign(kind, finding.grade);
+  if (proposed) await propose(caller, file, finding, request.reason);
   else await dispose(caller, file, finding, kind, request.reason);
   const act = kind === 'waived' ? 'finding.waived' : 'finding.set-aside';
-  const proposed = needsCountersign(kind, finding.grade);
   recordStep(tx, file, proposed ? 'waiver.proposed' : act, {
     finding: findingName(finding),
     fingerprint,
     reason: request.reason,
   });
+  if (!proposed) await waiveSettledDiscrepancies(caller, file);
 }
 
 async function findingOf({ tx }: Caller, file: CaseFile, fingerprint: string): Promise<Finding> {

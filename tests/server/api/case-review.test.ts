@@ -159,6 +159,29 @@ describe('findings', () => {
     ).toBe('It is set aside already.');
   });
 
+  it('a discrepancy whose findings are all waived is waived with them', async () => {
+    number = await aCaseInReview(app, applicant, reviewer, [aLine('Sarn tie', { earthGiven: false })]);
+    const [note] = await findingsOf(reviewer, number, 'A');
+    const raise = { revision: 'A', fingerprints: [note?.fingerprint], title: 'Earth', question: 'Which?' };
+    await expecting(201, reviewer.post(at('/discrepancies'), raise));
+    expect((await refused(reviewer, '/accept', { revision: 'A' })).detail).toBe(
+      'Accept opens once D-1 is settled.',
+    );
+    const path = at(`/findings/${note?.fingerprint ?? ''}/waive`);
+    const waived = await expecting<Api.Finding>(
+      200,
+      reviewer.post(path, { revision: 'A', reason: 'It matters little.' }),
+    );
+    expect(waived).toMatchObject({
+      stands: false,
+      discrepancy: 1,
+      disposition: { kind: 'waived', inForce: true },
+    });
+    const { items } = await expecting<Api.DiscrepancyList>(200, reviewer.get(at('/discrepancies')));
+    expect(items[0]).toMatchObject({ state: 'waived', entries: [{ kind: 'raised' }, { kind: 'waived' }] });
+    expect(await step(reviewer, number, 'accept', { revision: 'A' })).toMatchObject({ state: 'accepted' });
+  });
+
   it('the waiver of a Must answer waits for a second reviewer, who is another', async () => {
     number = await aCaseInReview(app, applicant, reviewer, [wrong()]);
     const { fingerprint } = await x1Of('A');
