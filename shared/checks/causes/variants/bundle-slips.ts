@@ -150,10 +150,10 @@ function sideSlips(context: VariantContext, filed: Filed): Variant[] {
     side < 5;
   const others = known.filter(isOther);
   return [
-    ...others.flatMap((side) => make(side, 0, -1 - Math.log(others.length) + likelihood(side, filed.sideM))),
+    ...others.flatMap((side) => make(side, 0, -1 - Math.log(others.length) + likelihood(side, filed))),
     ...fittedSides(context, filed)
       .filter(isOther)
-      .flatMap((side) => make(side, 1, -2.5 + likelihood(side, filed.sideM))),
+      .flatMap((side) => make(side, 1, -2.5 + likelihood(side, filed))),
   ];
 }
 
@@ -162,10 +162,11 @@ function isOtherUnit(ratio: number): boolean {
   return [0.01, 0.3048].some((unit) => Math.abs(ratio / unit - 1) < 0.05);
 }
 
-/** Log price of taking a side for another: a side as built is rarely wrong, an odd one rarely right. */
-function likelihood(side: number, filedM: number): number {
+/** Log price of taking a side for another: a side as built is rarely wrong, odd or mixed ones rarely right. */
+function likelihood(side: number, { sideM, isMixed }: Filed): number {
   const isBuilt = (metres: number): boolean => metres >= 0.28 && metres <= 0.62;
-  return (isBuilt(filedM) ? -1.5 : 0.7) + (isBuilt(side) ? 0 : -2);
+  const ofFiled = isMixed ? 2 : isBuilt(sideM) ? -1.5 : 0.7;
+  return ofFiled + (isBuilt(side) ? 0 : -2);
 }
 
 /** The side that the declared X1 itself would need. */

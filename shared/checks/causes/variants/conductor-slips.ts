@@ -4,7 +4,7 @@ import type { DeclaredParameter } from '../problem';
 import { isResistance, isShunt } from '../problem';
 import { gmrOf } from './gmr-of';
 import type { Variant, VariantContext } from './variant';
-import { ENGINE_MODEL, SHORTCUT_MODEL, changeConductors, changePhases } from './variant';
+import { ENGINE_MODEL, changeConductors, changePhases } from './variant';
 
 interface Recipe {
   code: Variant['code'];
@@ -169,9 +169,17 @@ function resistanceVariant(
   price: number,
 ): Variant[] {
   if (outcome === null) return [];
-  const model = code === 'dc-resistance' ? SHORTCUT_MODEL : ENGINE_MODEL;
   return [
-    { code, in: 'declared', outcome, reach: isResistance, prior: -0.6 + price, model, freedom: 0, words },
+    {
+      code,
+      in: 'declared',
+      outcome,
+      reach: isResistance,
+      prior: -0.6 + price,
+      model: ENGINE_MODEL,
+      freedom: 0,
+      words,
+    },
   ];
 }
 
