@@ -4,10 +4,12 @@ import { draftLines } from '../../repositories/draft.repository';
 import { findImport, importRows, insertImport } from '../../repositories/import.repository';
 import { presentImport } from '../../presenters/import.presenter';
 import type * as Api from '../../../shared/contracts/api.generated';
+import type { Fault } from '../../../shared/contracts/faults';
 import { safeFileName } from '../attachments/file-kinds';
 import type { UploadedBytes } from '../attachments/upload-attachment';
 import type { Caller } from '../cases/caller';
 import { holdCase, readCase } from '../cases/case-file';
+import { MAX_LINES } from '../drafts/save-draft-line';
 import { requireEditable } from '../drafts/update-application';
 import { sha256 } from '../filing/line-hash';
 import { readingContext } from '../rules/reading-context';
@@ -21,7 +23,7 @@ export async function readImport(caller: Caller, reference: string, upload: Uplo
   requireEditable(file);
   const { library, owner } = await readingContext(tx.manager);
   const name = safeFileName(upload.name);
-  const read = readFilingFile(upload.bytes, name, { library, owner });
+  const read = withinLimit(readFilingFile(upload.bytes, name, { library, owner }));
   return insertImport(
     tx.manager,
     {
@@ -41,6 +43,16 @@ export async function readImport(caller: Caller, reference: string, upload: Uplo
     },
     rowsOf(read).map((row) => ({ ...row, orgId })),
   );
+}
+
+/** More lines than an application holds: none of them is staged, and the file says so. */
+function withinLimit(read: FilingFile): FilingFile {
+  const count = read.sound.lines.length;
+  if (count <= MAX_LINES) return read;
+  const place = read.format === 'json' ? { pointer: '/lines' } : { row: 1, column: '' };
+  const expected = `at most ${MAX_LINES} lines`;
+  const fault = { ...place, value: count, expected, message: `An application holds ${expected}.` } as Fault;
+  return { ...read, filing: null, sound: { lines: [] }, faults: [fault, ...read.faults] };
 }
 
 function rowsOf(read: FilingFile) {

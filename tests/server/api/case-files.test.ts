@@ -235,6 +235,32 @@ describe('imports', () => {
     expect((await expecting<Problem>(409, take)).detail).toBe('Nothing in the file can be taken.');
   });
 
+  it('a file with more lines than an application holds is refused whole', async () => {
+    ({ number } = await aDraft(applicant, []));
+    const { declared, ...rest } = aLine('Sarn tie');
+    const bare = {
+      ...rest,
+      declared,
+      sections: [{ kind: 'overhead', lengthKm: 4, earthResistivityOhmM: 100 }],
+    };
+    const lines = Array.from({ length: 501 }, (_, i) => ({ ...bare, name: `Line ${i}` }));
+    const staged = await expecting<Api.Import>(201, send(json({ format: 'filing/1', lines }), 'lines.json'));
+    expect(staged).toMatchObject({ state: 'refused', lines: [] });
+    expect(staged.faults[0]).toMatchObject({ pointer: '/lines', value: 501, expected: 'at most 500 lines' });
+    const fitting = await expecting<Api.Import>(
+      201,
+      send(json({ format: 'filing/1', lines: lines.slice(1) }), 'lines.json'),
+    );
+    await expecting(200, applicant.post(at(`/imports/${fitting.id}/take`), { take: 'all' }));
+    const filed = await step(applicant, number, 'file');
+    expect(filed).toMatchObject({ state: 'filed', lineCount: 500, check: { lineCount: 500 } });
+    const more = await expecting<Problem>(
+      409,
+      applicant.put(at('/draft/lines/L501'), { version: 0, line: {} }),
+    );
+    expect(more.detail).toContain('The draft is closed');
+  });
+
   it('a file that is none is answered, not swallowed', async () => {
     ({ number } = await aDraft(applicant, []));
     for (const [bytes, name] of [
