@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { Cause } from '#shared/checks/types';
-import { bareLine, check, exampleLine, findings } from './example-line';
+import { bareLine, check, doubleLine, exampleLine, findings } from './example-line';
 import type { Json } from './example-line';
 
 /** Causes of the finding about one parameter. */
@@ -104,6 +104,36 @@ describe('causes in the declared values', () => {
     const [cause] = causesOf(line, 'x1');
     expect(cause).toMatchObject({ code: 'single-conductor', in: 'declared' });
     expect(cause?.corrected['x1']).toBeCloseTo(0.381199, 5);
+  });
+});
+
+describe('causes in a declared coupling', () => {
+  it('all three per mile are one matter at the line', () => {
+    const line = doubleLine((one) => {
+      for (const key of ['r0m', 'x0m', 'b0m']) one.declaredMutual[0][key].value *= 1.609344;
+    });
+    const report = check(line);
+    expect(
+      report.circuits.flatMap((circuit) => circuit.findings).filter(({ grade }) => grade === 'must-answer'),
+    ).toEqual([]);
+    const found = report.findings.filter(({ family }) => family === 'geometry');
+    expect(found.map(({ parameter, causes }) => [parameter, causes[0]?.code])).toEqual([
+      ['r0m', 'per-mile'],
+      ['x0m', 'per-mile'],
+      ['b0m', 'per-mile'],
+    ]);
+    expect(new Set(found.map(({ group }) => group)).size).toBe(1);
+  });
+
+  it('a slip in the geometry is one matter over both circuits', () => {
+    const line = doubleLine();
+    for (const spot of line.sections[0].positions) spot.bundleSpacingM = 0.9144;
+    const found = check(line).circuits.flatMap(({ findings: own }) =>
+      own.filter(({ code }) => code === 'geometry.x1'),
+    );
+    expect(found.length).toBe(2);
+    expect(found.map(({ causes }) => causes[0]?.code)).toEqual(['bundle-spacing', 'bundle-spacing']);
+    expect(found[0]?.group).toBe(found[1]?.group);
   });
 });
 

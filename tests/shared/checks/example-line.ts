@@ -127,3 +127,43 @@ export function findings(report: LineReport): Finding[] {
 export function questions(report: LineReport): Finding[] {
   return findings(report).filter(({ grade }) => grade !== 'note');
 }
+
+/** Two vertical circuits 14 m apart with their coupling declared. */
+export function doubleLine(change: (line: Json) => void = () => undefined): Json {
+  return exampleLine((line) => {
+    const [first] = line.sections[0].positions;
+    line.sections[0].positions = [1, 2].flatMap((circuit) =>
+      ['a', 'b', 'c'].map((phase, level) => ({
+        ...first,
+        circuit,
+        phase,
+        horizontalM: circuit === 1 ? -7 : 7,
+        attachmentHeightM: 24 + 9 * level,
+      })),
+    );
+    delete line.sections[0].conductors.ground;
+    const report = check({ ...line, declared: [{ ...line.declared[0] }] });
+    const values = report.circuits[0]?.recomputed;
+    const [pair] = report.mutual;
+    if (values === null || values === undefined || pair === undefined) throw new Error('no values');
+    const entry = (circuit: number) => ({
+      circuit,
+      ...Object.fromEntries(
+        (['r1', 'x1', 'b1', 'r0', 'x0', 'b0'] as const).map((key) => [
+          key,
+          { value: values[key], unit: key.startsWith('b') ? 'uS/km' : 'ohm/km' },
+        ]),
+      ),
+    });
+    line.declared = [entry(1), entry(2)];
+    line.declaredMutual = [
+      {
+        circuits: [1, 2],
+        r0m: { value: pair.r0m, unit: 'ohm/km' },
+        x0m: { value: pair.x0m, unit: 'ohm/km' },
+        b0m: { value: pair.b0m, unit: 'uS/km' },
+      },
+    ];
+    change(line);
+  });
+}

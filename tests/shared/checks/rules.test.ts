@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { RULES, ruleOf } from '#shared/checks/rules/table';
 import type { Grade } from '#shared/checks/types';
-import { bareLine, check, exampleLine, findings } from './example-line';
+import { bareLine, check, doubleLine, exampleLine, findings } from './example-line';
 import type { Json } from './example-line';
 
 interface Case {
@@ -23,47 +23,8 @@ const conductor = (change: Record<string, unknown>) =>
 const everyPhase = (change: Record<string, unknown>) =>
   section((one) => one.positions.slice(0, 3).forEach((spot: Json) => Object.assign(spot, change)));
 
-/** Two vertical circuits 14 m apart with their coupling declared. */
-const double = (change: (line: Json) => void = () => undefined) =>
-  exampleLine((line) => {
-    const [first] = line.sections[0].positions;
-    line.sections[0].positions = [1, 2].flatMap((circuit) =>
-      ['a', 'b', 'c'].map((phase, level) => ({
-        ...first,
-        circuit,
-        phase,
-        horizontalM: circuit === 1 ? -7 : 7,
-        attachmentHeightM: 24 + 9 * level,
-      })),
-    );
-    delete line.sections[0].conductors.ground;
-    const report = check({ ...line, declared: [{ ...line.declared[0] }] });
-    const values = report.circuits[0]?.recomputed;
-    const [pair] = report.mutual;
-    if (values === null || values === undefined || pair === undefined) throw new Error('no values');
-    const entry = (circuit: number) => ({
-      circuit,
-      ...Object.fromEntries(
-        (['r1', 'x1', 'b1', 'r0', 'x0', 'b0'] as const).map((key) => [
-          key,
-          { value: values[key], unit: key.startsWith('b') ? 'uS/km' : 'ohm/km' },
-        ]),
-      ),
-    });
-    line.declared = [entry(1), entry(2)];
-    line.declaredMutual = [
-      {
-        circuits: [1, 2],
-        r0m: { value: pair.r0m, unit: 'ohm/km' },
-        x0m: { value: pair.x0m, unit: 'ohm/km' },
-        b0m: { value: pair.b0m, unit: 'uS/km' },
-      },
-    ];
-    change(line);
-  });
-
 const coupled = (key: string, factor: number) =>
-  double((line) => (line.declaredMutual[0][key].value *= factor));
+  doubleLine((line) => (line.declaredMutual[0][key].value *= factor));
 const cable = {
   kind: 'cable',
   lengthKm: 2,
@@ -230,9 +191,9 @@ const CASES: Readonly<Record<string, Case>> = {
     silent: exampleLine(),
   },
   'drawing.coupling-not-given': {
-    fires: double((line) => delete line.declaredMutual),
+    fires: doubleLine((line) => delete line.declaredMutual),
     grade: 'note',
-    silent: double(),
+    silent: doubleLine(),
   },
   'drawing.cable-as-declared': { fires: withCable(2), grade: 'note', silent: exampleLine() },
 };
