@@ -191,6 +191,11 @@ describe('from draft to acceptance', () => {
     });
     const again = await expecting<Problem>(409, reviewer.post(at('/accept'), { revision: 'B' }));
     expect(again.detail).toBe('Accept is closed: the application is accepted.');
+    const { items } = await expecting<Api.LetterList>(200, applicant.get(at('/letters')));
+    expect(items.map((letter) => letter.kind).sort()).toEqual(['decision', 'return']);
+    const decision = await app.db.owner.manager.findOneByOrFail(OutboxMail, { kind: 'decision' });
+    expect(decision).toMatchObject({ recipient: applicant.email, orgId: applicant.actor.orgId });
+    expect(decision.letterId).not.toBeNull();
   });
 
   it('everything stands in the trail, which verifies', async () => {

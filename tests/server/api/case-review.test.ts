@@ -82,6 +82,15 @@ describe('taking', () => {
     expect(row?.count).toBe(1);
   });
 
+  it('of five filings at once one makes the revision', async () => {
+    ({ number } = await aDraft(applicant, [aLine('Sarn tie')]));
+    const answers = await Promise.all(Array.from({ length: 5 }, () => applicant.post(at('/file'), {})));
+    expect(answers.map((answer) => answer.status).sort()).toEqual([200, 409, 409, 409, 409]);
+    const { items } = await expecting<Api.RevisionList>(200, applicant.get(at('/revisions')));
+    expect(items).toHaveLength(1);
+    expect(await runChecks(app.db)).toBe(1);
+  });
+
   it('a retry with the same key gets the same answer, and another body with it is refused', async () => {
     ({ number } = await aDraft(applicant, [aLine('Sarn tie')]));
     const key = 'file-once-1';
