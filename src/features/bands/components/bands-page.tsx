@@ -1,4 +1,3 @@
-import { useState } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import type { Band, BandDraft, RuleSetSummary, Rules } from '#shared/contracts/api.generated';
 import { formatDate } from '#shared/format/dates';
@@ -29,14 +28,14 @@ export function BandsPage() {
   const edits = useDraftEdits(draft);
   const classes = classesOf(draft.bands);
   const [shown, setShown] = useShownClass(classes);
-  const [part, setPart] = useState<'bands' | 'settings' | 'calendar'>('bands');
+  const [part, setPart] = usePart();
   const inForce = new Map((rules.bands as Band[]).map((band) => [bandKey(band), band]));
   const changed = changedBands(editedBands(draft.bands, edits.bands) ?? draft.bands, [...inForce.values()]);
   const bands = shown ? bandsOf(draft.bands, shown.classKv, shown.frequencyHz) : [];
   return (
     <>
       <PageHead
-        title={shown ? `Typical bands, ${shown.classKv}${THIN_SPACE}kV` : 'Typical bands'}
+        title={part === 'bands' && shown ? `Typical bands, ${shown.classKv}${THIN_SPACE}kV` : TITLES[part]}
         lead={
           <>
             Outside its typical band a value is graded <strong>Explain</strong>, outside the outer limits{' '}
@@ -83,6 +82,32 @@ export function BandsPage() {
       </div>
     </>
   );
+}
+
+const TITLES = {
+  bands: 'Typical bands',
+  settings: 'Tolerances, inputs and windows',
+  calendar: 'Working days',
+} as const;
+
+type Part = keyof typeof TITLES;
+
+/** Which part of the rules is shown stands in the address too. */
+function usePart(): [Part, (part: Part) => void] {
+  const [params, setParams] = useSearchParams();
+  const asked = params.get('part') ?? '';
+  const part = Object.hasOwn(TITLES, asked) ? (asked as Part) : 'bands';
+  const show = (next: Part) =>
+    setParams(
+      (before) => {
+        const after = new URLSearchParams(before);
+        if (next === 'bands') after.delete('part');
+        else after.set('part', next);
+        return after;
+      },
+      { replace: true },
+    );
+  return [part, show];
 }
 
 interface ShownClass {

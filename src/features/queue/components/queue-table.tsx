@@ -105,16 +105,16 @@ function QueueRow({
       <Cell oneLine className="queue-number">
         {item.number}
       </Cell>
-      <RowHead className="queue-who">
+      <RowHead className="queue-who" title={`${item.title}, ${item.applicant.name}, ${connection(item)}`}>
         <Link to={applicationPath('reviewer', item.number)} className="link-ink">
-          {item.applicant.name}
+          {item.title}
         </Link>{' '}
         <span className="queue-connection">
-          {connection(item)}
+          {`${item.applicant.name}, ${connection(item)}`}
           <span className="narrow-kv">, {kv} kV</span>
         </span>
       </RowHead>
-      <Cell oneLine className="wide-kv">
+      <Cell oneLine className="wide-kv queue-kv" title={kv}>
         {kv}
       </Cell>
       <Cell number className="wide-lines">
@@ -179,7 +179,7 @@ function Holder({ item, taking, onTake }: HolderProps) {
     <Button
       small
       busy={taking}
-      aria-label={`Take ${item.number}, ${item.applicant.name}`}
+      aria-label={`Take ${item.number}, ${item.title}`}
       onClick={() => onTake(item)}
     >
       Take

@@ -5,11 +5,7 @@ import { WindowMeter } from '../../../components/charts/window-meter';
 import { RevisionTriangle } from '../../../components/ui/revision-triangle';
 import { Stamp } from '../../../components/ui/stamp';
 import { TitleBlock, type TitleBlockCell } from '../../../components/ui/title-block';
-
-function connection({ capacityMw, pointOfConnection }: Application): string {
-  const at = `at ${pointOfConnection}`;
-  return capacityMw === null ? at : `${capacityMw}${THIN_SPACE}MW ${at}`;
-}
+import { connectionWords } from '../model/lead';
 
 function dueCell({ window, dueAt }: Application): TitleBlockCell {
   if (!window || window.closedAt !== null || dueAt === null) {
@@ -38,8 +34,8 @@ export function ApplicationBlock({ application }: { application: Application }) 
       cells={[
         {
           label: 'Application',
-          value: applicant.name,
-          aside: connection(application),
+          value: application.title,
+          aside: `${applicant.name}, ${connectionWords(application)}`,
           span: 8,
           lead: true,
           fold: 'name',

@@ -8,7 +8,7 @@ import { useRevision } from '../../../lib/queries/get-revision';
 import { useDiscrepancies } from '../../../lib/queries/list-discrepancies';
 import { useSelection, type Selection } from '../hooks/use-selection';
 import { isOpen } from '../model/head-steps';
-import { reviewLead } from '../model/lead';
+import { connectionWords, reviewLead } from '../model/lead';
 import { ApplicationBlock } from './application-block';
 import { DecisionSheet } from './decision-sheet';
 import { DiscrepanciesMini } from './discrepancies-mini';
@@ -60,7 +60,14 @@ export function ReviewPage({ number, slots }: ReviewPageProps) {
   );
 }
 
-const crumbsOf = ({ number }: Application) => [{ label: 'Queue', to: '/queue' }, { label: number }];
+const IN_QUEUE: readonly Application['state'][] = ['filed', 'in-review', 'returned'];
+
+const crumbsOf = ({ number, state }: Application) => [
+  IN_QUEUE.includes(state)
+    ? { label: 'Queue', to: '/queue' }
+    : { label: 'Applications', to: '/applications' },
+  { label: number },
+];
 
 interface FiledReviewProps {
   application: Application;
@@ -82,8 +89,8 @@ function FiledReview({ application, current, letter, slots }: FiledReviewProps) 
   return (
     <>
       <PageHead
-        title={`${application.applicant.name}, ${application.title}`}
-        documentTitle={`${number} ${application.applicant.name}`}
+        title={`${application.title}, ${connectionWords(application)}`}
+        documentTitle={`${number} ${application.title}`}
         crumbs={crumbsOf(application)}
         lead={reviewLead(application, discrepancies)}
         actions={

@@ -1,4 +1,14 @@
 import type { Application, Discrepancy } from '#shared/contracts/api.generated';
+import { THIN_SPACE } from '#shared/format/numbers';
+
+/** "480 MW at Sarn", or the place alone. */
+export function connectionWords({
+  capacityMw,
+  pointOfConnection,
+}: Pick<Application, 'capacityMw' | 'pointOfConnection'>): string {
+  const at = `at ${pointOfConnection}`;
+  return capacityMw === null ? at : `${capacityMw}${THIN_SPACE}MW ${at}`;
+}
 
 const NUMBERS = ['no', 'one', 'two', 'three', 'four', 'five', 'six', 'seven', 'eight', 'nine', 'ten'];
 const inWords = (n: number) => NUMBERS[n] ?? String(n);
