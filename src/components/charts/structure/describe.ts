@@ -6,10 +6,10 @@ function across(position: DrawnPosition, unit: DrawingUnit): string {
   return `${lengthText(Math.abs(position.horizontalM), unit)} ${side} of the centre line`;
 }
 
-/** What a position is called: "Phase a", "Phase b of circuit 2", "Ground wire gw 1". */
+/** What a position is called: "Phase a", "Phase 2b" as its disc says, "Ground wire gw 1". */
 export function positionName(position: DrawnPosition, circuits: number): string {
   if (position.kind === 'ground-wire') return `Ground wire ${position.label}`.trimEnd();
-  return circuits > 1 ? `Phase ${position.label} of circuit ${position.circuit}` : `Phase ${position.label}`;
+  return circuits > 1 ? `Phase ${position.circuit}${position.label}` : `Phase ${position.label}`;
 }
 
 /** One position as a sentence. */

@@ -112,7 +112,9 @@ function FormFoot({ missing, backTo, onAsk }: FormFootProps) {
       <ButtonLink to={backTo}>Back to the application</ButtonLink>
       {missing > 0 ? (
         <Button kind="plain" onClick={onAsk}>
-          {missing === 1 ? 'One field is still needed to file' : `${missing} fields are still needed to file`}
+          {missing === 1
+            ? 'One field stands in the way of filing: show it'
+            : `${missing} fields stand in the way of filing: show them`}
         </Button>
       ) : (
         <span className="text-ink-soft">A line with an open error can be saved, not filed.</span>
