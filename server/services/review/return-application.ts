@@ -80,8 +80,10 @@ async function sendLetter(
   });
 }
 
+const NUMBERS = ['No', 'One', 'Two', 'Three', 'Four', 'Five', 'Six', 'Seven', 'Eight', 'Nine', 'Ten'];
+
 function counted(count: number): string {
-  return count === 1 ? 'One discrepancy' : `${count} discrepancies`;
+  return `${NUMBERS[count] ?? count} ${count === 1 ? 'discrepancy' : 'discrepancies'}`;
 }
 
 async function itemsOf({ tx }: Caller, file: CaseFile, open: readonly Discrepancy[]): Promise<LetterItem[]> {
@@ -99,7 +101,12 @@ async function itemsOf({ tx }: Caller, file: CaseFile, open: readonly Discrepanc
       label: `D-${discrepancy.number}`,
       grade: worstGrade(own.map((f) => f.grade)),
       title: discrepancy.title,
-      body: [...own.flatMap(sentencesOf), discrepancy.questioned, ...(last === undefined ? [] : [last.text])],
+      // what only follows from a questioned value is not said again
+      body: [
+        ...own.filter((finding) => finding.follows === null).flatMap(sentencesOf),
+        discrepancy.questioned,
+        ...(last === undefined ? [] : [last.text]),
+      ],
       ask: discrepancy.wouldSettle,
     };
   });
