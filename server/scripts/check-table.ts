@@ -57,7 +57,7 @@ function lineLines(line: LineReport, paint: Paint): string[] {
   return [...circuits, ...ordered.flatMap((finding) => findingLines(finding, told, paint)), ...implied];
 }
 
-const COLUMNS = [18, 12, 12, 10, 22] as const;
+const COLUMNS = [24, 12, 12, 11, 20] as const;
 
 function valueLines({ values }: CircuitReport, paint: Paint): string[] {
   const head = ['', 'declared', 'recomputed', 'off by', 'typical'].map((text, at) => pad(text, at)).join('');
@@ -81,7 +81,11 @@ function valueLine(value: Weighed, paint: Paint): string {
   return `  ${cells.map((text, at) => pad(text, at)).join('')}${paint(`${mark} ${follows}`, colour)}`;
 }
 
+/** Shares below this are rounding of the digits shown. */
+const NOTHING = 5e-5;
+
 function signed(share: number): string {
+  if (Math.abs(share) < NOTHING) return percent(0);
   if (Math.abs(share) >= 9.995) return `× ${figure(share + 1)}`;
   return `${share < 0 ? '\u2212' : '+'}${percent(share)}`;
 }
@@ -110,8 +114,9 @@ function summary({ lines }: CheckReport): string {
   ]);
   const count = (grade: Grade): number =>
     all.filter((one) => one.grade === grade && one.follows === undefined).length;
+  const notes = count('note');
   const size = lines.length === 1 ? '1 line' : `${lines.length} lines`;
-  return `${size}: ${count('must-answer')} must be answered, ${count('explain')} to explain, ${count('note')} notes.`;
+  return `${size}: ${count('must-answer')} must be answered, ${count('explain')} to explain, ${notes === 1 ? '1 note' : `${notes} notes`}.`;
 }
 
 function versions({ engine, bands, tolerances }: CheckReport): string {

@@ -45,6 +45,7 @@ export function quantity(parameter: FindingParameter, value: number, digits = 3)
 /** A share as per cent: two significant digits under 10 %, whole per cent above. */
 export function percent(share: number): string {
   const value = Math.abs(share) * 100;
+  if (value === 0) return `0${THIN}%`;
   const text = value < 10 ? figure(value, 2) : figure(value, Math.max(2, Math.ceil(Math.log10(value + 0.5))));
   return `${text}${THIN}%`;
 }

@@ -10,7 +10,7 @@ import { BAND_CLASSES, CLASSES, randomLine } from './generator/lines';
 import type { Random } from './generator/random';
 import { seeded } from './generator/random';
 import { inOtherUnits, secondLine } from './generator/second-lines';
-import { file } from './generator/slips';
+import { file } from './generator/slip-tools';
 import { twoSlips } from './generator/two-slips';
 
 /** Lines are drawn and solved by the hundred here. */

@@ -6,7 +6,8 @@ import type { Key, LineJson, Structure } from './filing-line';
 import { KEYS, readOne, solve } from './filing-line';
 import type { Random } from './random';
 import { seeded, toDigits } from './random';
-import { file, plant } from './slips';
+import { file } from './slip-tools';
+import { plant } from './slips';
 
 /** Slips that stay in one kind of constant, by the constants that they are planted in. */
 const PARTS: readonly { keys: readonly Key[]; codes: readonly CauseCode[] }[] = [
