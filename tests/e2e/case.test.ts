@@ -1,16 +1,16 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { Person } from './support/person';
-import { startProduct } from './support/product';
-import type { Product } from './support/product';
+import { startProduct } from '../support/running-product';
+import type { RunningProduct } from '../support/running-product';
 
 const APPLICANT = 'sandgate@fellgate.example';
 const REVIEWER = 'thornholt@northmoor.example';
 
-let product: Product;
+let product: RunningProduct;
 let number: string;
 
 beforeAll(async () => {
-  product = await startProduct();
+  product = await startProduct({ DEMO: 'on' });
 });
 afterAll(() => product?.stop());
 
@@ -51,7 +51,7 @@ async function fillLine(person: Person): Promise<void> {
 
 describe('a case from draft to acceptance', () => {
   it('an applicant begins an application and enters a line beside the live check', async () => {
-    const applicant = await Person.signIn(product.url, APPLICANT);
+    const applicant = await Person.signIn(product.baseUrl, APPLICANT);
     await applicant.goTo('/applications');
     await applicant.isAccessible();
     await applicant.goTo('/applications/new');
@@ -75,7 +75,7 @@ describe('a case from draft to acceptance', () => {
   });
 
   it('what was typed stands after a reload, and filing freezes revision A', async () => {
-    const applicant = await Person.signIn(product.url, APPLICANT);
+    const applicant = await Person.signIn(product.baseUrl, APPLICANT);
     await applicant.goTo(`/applications/${number}/lines/L1`);
     await applicant.page.getByLabel('X1', { exact: true }).waitFor();
     expect(await applicant.page.getByLabel('X1', { exact: true }).inputValue()).toBe('0.6135');
@@ -91,7 +91,7 @@ describe('a case from draft to acceptance', () => {
   });
 
   it('a reviewer takes it from the queue, raises a discrepancy and returns it', async () => {
-    const reviewer = await Person.signIn(product.url, REVIEWER);
+    const reviewer = await Person.signIn(product.baseUrl, REVIEWER);
     await reviewer.goTo('/queue');
     await reviewer.isAccessible();
     await reviewer.press(new RegExp(`Take ${number}`));
@@ -108,7 +108,7 @@ describe('a case from draft to acceptance', () => {
   });
 
   it('the applicant puts the proposed value in, answers and files revision B', async () => {
-    const applicant = await Person.signIn(product.url, APPLICANT);
+    const applicant = await Person.signIn(product.baseUrl, APPLICANT);
     await applicant.goTo(`/applications/${number}`);
     await applicant.sees(/File opens once D-1 is answered/);
     await applicant.isAccessible();
@@ -127,7 +127,7 @@ describe('a case from draft to acceptance', () => {
   });
 
   it('the reviewer settles the discrepancy and accepts; the record shows each step', async () => {
-    const reviewer = await Person.signIn(product.url, REVIEWER);
+    const reviewer = await Person.signIn(product.baseUrl, REVIEWER);
     await reviewer.goTo(`/applications/${number}/review`);
     await reviewer.sees('Our table was per mile; X1 is corrected.');
     await reviewer.press('Accept the answer');

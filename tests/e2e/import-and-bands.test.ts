@@ -1,13 +1,14 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { Person } from './support/person';
-import { fileFolder, startProduct } from './support/product';
-import type { Product } from './support/product';
+import { startProduct } from '../support/running-product';
+import type { RunningProduct } from '../support/running-product';
+import { fileFolder } from './support/files';
 
 const files = fileFolder();
-let product: Product;
+let product: RunningProduct;
 
 beforeAll(async () => {
-  product = await startProduct();
+  product = await startProduct({ DEMO: 'on' });
 });
 afterAll(async () => {
   files.remove();
@@ -30,7 +31,7 @@ async function chooseFile(person: Person, path: string): Promise<void> {
 
 describe('a table of lines', () => {
   it('says row and column of a fault, keeps the draft, and takes the mended file', async () => {
-    const applicant = await Person.signIn(product.url, 'holm@skerrow.example');
+    const applicant = await Person.signIn(product.baseUrl, 'holm@skerrow.example');
     await applicant.goTo('/applications/new');
     await applicant.fill('Title', 'Tarn storage');
     await applicant.choose('Kind of connection', 'Storage');
@@ -61,7 +62,7 @@ describe('a table of lines', () => {
 
 describe('the bands', () => {
   it('an administrator moves a bound, publishes it with a reason, and the record keeps it', async () => {
-    const administrator = await Person.signIn(product.url, 'moss@northmoor.example');
+    const administrator = await Person.signIn(product.baseUrl, 'moss@northmoor.example');
     await administrator.goTo('/bands');
     await administrator.isAccessible();
     await administrator.fill('X1, upper bound, Ω/km', '0.50');
@@ -88,7 +89,7 @@ describe('the bands', () => {
 
 describe('on a phone', () => {
   it('queue and review fold without a page that scrolls sideways', async () => {
-    const reviewer = await Person.signIn(product.url, 'thornholt@northmoor.example', {
+    const reviewer = await Person.signIn(product.baseUrl, 'thornholt@northmoor.example', {
       width: 360,
       height: 740,
     });
@@ -106,7 +107,7 @@ describe('on a phone', () => {
 
 describe('a session that has ended', () => {
   it('asks to sign in again over the page, and what was typed stands', async () => {
-    const applicant = await Person.signIn(product.url, 'garth@lintgarth.example');
+    const applicant = await Person.signIn(product.baseUrl, 'garth@lintgarth.example');
     await applicant.goTo('/applications/new');
     await applicant.fill('Title', 'Words that must not be lost');
     await applicant.choose('Kind of connection', 'Load');

@@ -1,6 +1,7 @@
 import { spawn } from 'node:child_process';
 import type { ChildProcess } from 'node:child_process';
 import { randomBytes } from 'node:crypto';
+import { existsSync } from 'node:fs';
 import { resolve } from 'node:path';
 import { inject } from 'vitest';
 import { freePort } from '../../server/scripts/postgres.mjs';
@@ -29,6 +30,8 @@ function whenReady(child: ChildProcess, output: () => string): Promise<void> {
 
 /** The built product (`npm run build`) on a fresh database of the test cluster, on a port of its own. */
 export async function startProduct(environment: Record<string, string> = {}): Promise<RunningProduct> {
+  if (!existsSync(resolve(ROOT, 'dist/server/main.js')))
+    throw new Error('nothing is built yet: npm run build');
   const cluster = inject('postgres');
   const name = randomDatabaseName();
   const databaseUrl = await createDatabase(cluster.ownerUrl, name);
