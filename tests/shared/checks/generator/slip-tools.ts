@@ -2,8 +2,6 @@ import { EPSILON_0 } from '#shared/engine/constants';
 import type { SequenceConstants } from '#shared/engine/index';
 import { handbookData, isChoosable } from '#shared/library/handbook-data';
 import { STARTING_LIBRARY } from '#shared/library/conductors';
-import type { CauseCode } from '#shared/checks/types';
-import { CLASSES } from './lines';
 import type { DeclaredJson, Key, LineJson, PositionJson, SectionJson, Structure } from './filing-line';
 import { KEYS, declare, solve } from './filing-line';
 import type { Random } from './random';
