@@ -1,5 +1,6 @@
 import { MAX_FILE_BYTES } from '../files/read-filing-file';
 import { deleteDraftLine, saveDraftLine } from '../services/drafts/save-draft-line';
+import { IMPORT_FIELDS } from '../services/imports/import-fields';
 import { getImport, readImport } from '../services/imports/read-import';
 import { takeImport } from '../services/imports/take-import';
 import { exportLines } from '../services/reads/export-lines';
@@ -53,10 +54,10 @@ export const draftRoutes = [
     access: { can: 'create', on: 'Import' },
     answers: { 201: 'import' },
     idempotent: true,
-    upload: { maxBytes: MAX_FILE_BYTES, fields: [] },
+    upload: { maxBytes: MAX_FILE_BYTES, fields: IMPORT_FIELDS },
     handler: async (call) => {
       const { applicationId } = call.params;
-      return getImport(call, applicationId, await readImport(call, applicationId, call.file));
+      return getImport(call, applicationId, await readImport(call, applicationId, call.file, call.fields));
     },
   }),
   route('getImport', {

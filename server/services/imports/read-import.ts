@@ -13,9 +13,15 @@ import { MAX_LINES } from '../drafts/save-draft-line';
 import { requireEditable } from '../drafts/update-application';
 import { sha256 } from '../filing/line-hash';
 import { readingContext } from '../rules/reading-context';
+import { correctionsOf } from './import-fields';
 
 /** Reads a JSON or CSV file of lines and stages what it holds; the applicant's word takes it into the draft. */
-export async function readImport(caller: Caller, reference: string, upload: UploadedBytes): Promise<string> {
+export async function readImport(
+  caller: Caller,
+  reference: string,
+  upload: UploadedBytes,
+  fields: Readonly<Record<string, string>> = {},
+): Promise<string> {
   const { tx, actor, ability } = caller;
   const file = await holdCase(caller, reference, 'update');
   const { orgId, id: applicationId } = file.application;
@@ -23,7 +29,7 @@ export async function readImport(caller: Caller, reference: string, upload: Uplo
   requireEditable(file);
   const { library, owner } = await readingContext(tx.manager);
   const name = safeFileName(upload.name);
-  const read = withinLimit(readFilingFile(upload.bytes, name, { library, owner }));
+  const read = withinLimit(readFilingFile(upload.bytes, name, { library, owner, ...correctionsOf(fields) }));
   return insertImport(
     tx.manager,
     {

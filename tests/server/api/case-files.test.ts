@@ -136,10 +136,11 @@ describe('attachments', () => {
   });
 });
 
-function send(bytes: Buffer, filename: string, client = applicant) {
-  return client.agent
+function send(bytes: Buffer, filename: string, fields: Record<string, string> = {}) {
+  return applicant.agent
     .post(at('/imports'))
-    .set('X-CSRF-Token', client.csrfToken)
+    .set('X-CSRF-Token', applicant.csrfToken)
+    .field(fields)
     .attach('file', bytes, { filename, contentType: 'application/octet-stream' });
 }
 const json = (value: unknown) => Buffer.from(JSON.stringify(value));
@@ -233,6 +234,24 @@ describe('imports', () => {
     expect(staged.state).toBe('refused');
     const take = applicant.post(at(`/imports/${staged.id}/take`), { take: 'good' });
     expect((await expecting<Problem>(409, take)).detail).toBe('Nothing in the file can be taken.');
+  });
+
+  it('what was found of a file can be corrected, and nothing else be said', async () => {
+    ({ number } = await aDraft(applicant, []));
+    const text =
+      'name;from;to;nominal_voltage_kv;frequency_hz;length_km;r1;x1;b1;impedance_unit;susceptance_unit\nA;B;C;345;60;4,5;0,04;0,38;4,3;ohm/km;uS/km\n';
+    const found = await expecting<Api.Import>(201, send(Buffer.from(text), 'lines.txt'));
+    expect(found.dialect).toMatchObject({ delimiter: 'semicolon', decimal: 'comma', encoding: 'utf-8' });
+    expect(found.faults).toEqual([]);
+    expect(found.lines).toMatchObject([{ name: 'A', lengthKm: 4.5 }]);
+    const corrected = await expecting<Api.Import>(
+      201,
+      send(Buffer.from(text), 'lines.txt', { decimal: 'point' }),
+    );
+    expect(corrected.dialect).toMatchObject({ decimal: 'point' });
+    expect(corrected.faults.length).toBeGreaterThan(0);
+    const refused = await expecting<Problem>(422, send(Buffer.from(text), 'lines.txt', { decimal: 'dot' }));
+    expect(refused.errors).toMatchObject([{ pointer: '/decimal', value: 'dot', expected: 'point or comma' }]);
   });
 
   it('a file with more lines than an application holds is refused whole', async () => {
