@@ -23,7 +23,7 @@ export function RunComparisonDialog({ number, letter, from, to, onClose }: RunCo
       onOpenChange={(open) => !open && onClose()}
       wide
       title={`Check ${to.ordinal} against check ${from.ordinal}`}
-      description={`Revision ${letter}. ${versions(from)} against ${versions(to)}.`}
+      description={`Revision ${letter}. ${versions(to)}; ${versions(from)}.`}
     >
       <ProblemNotice error={error} />
       {!data && !error && <SkeletonLines lines={4} />}
