@@ -8,13 +8,24 @@ interface FilterInputProps {
   onChange: (value: string) => void;
   placeholder?: string;
   small?: boolean;
+  /** Longest text that the filter takes. */
+  maxLength?: number;
   type?: 'text' | 'search';
 }
 
 const PAUSE_MS = 250;
 
 /** A text filter: what is typed shows at once and is applied after a pause. */
-export function FilterInput({ label, id, value, onChange, placeholder, small, type }: FilterInputProps) {
+export function FilterInput({
+  label,
+  id,
+  value,
+  onChange,
+  placeholder,
+  small,
+  maxLength = 120,
+  type,
+}: FilterInputProps) {
   const [typed, setTyped] = useState(value);
   const [applied, setApplied] = useState(value);
   const pause = useRef<ReturnType<typeof setTimeout>>(undefined);
@@ -39,6 +50,7 @@ export function FilterInput({ label, id, value, onChange, placeholder, small, ty
       type={type}
       aria-label={label}
       placeholder={placeholder}
+      maxLength={maxLength}
       value={typed}
       autoComplete="off"
       spellCheck={false}

@@ -13,6 +13,7 @@ import { FrequencySection } from './frequency-section';
 import { GeometrySection } from './geometry-section';
 import { HandCheckSection } from './hand-check-section';
 import { LineHead } from './line-head';
+import { SinceBeforeSection } from './since-before-section';
 import { WholeLineSection } from './whole-line-section';
 
 interface LineSheetProps {
@@ -49,6 +50,7 @@ export function LineSheet({ applicationNumber, letter, lineKey, findingActions }
         </div>
       )}
       <BalanceSection line={line} circuit={circuit} findingActions={findingActions} />
+      <SinceBeforeSection line={line} circuit={circuit} />
       <CouplingSection
         line={line}
         filed={filed}

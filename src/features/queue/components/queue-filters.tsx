@@ -76,6 +76,7 @@ export function QueueFilterControl({ name, controls, choices, small, id }: Filte
         label={label}
         value={value}
         placeholder={name === 'search' ? 'Name contains' : undefined}
+        maxLength={name === 'number' ? 7 : 120}
         onChange={(next) => controls.setFilter(name, next)}
       />
     );
