@@ -2,7 +2,7 @@ import type { Cause } from '../types';
 import { percent } from '../words';
 import type { Cover } from './cover';
 import type { Item } from './item';
-import { logDensity, namesIn, scatterOf, score, worstResidual } from './item';
+import { inWords, logDensity, namesIn, scatterOf, score, worstResidual } from './item';
 import type { Target } from './problem';
 
 /** Most causes that one matter is given. */
@@ -78,7 +78,6 @@ function sameCorrection(item: Item, chosen: Item): number {
 /** An item as a report gives it. */
 export function toCause(item: Item, targets: readonly Target[]): Cause {
   const residual = worstResidual(item);
-  const words = typeof item.words === 'string' ? item.words : item.words();
   return {
     code: item.code,
     in: item.in,
@@ -86,6 +85,6 @@ export function toCause(item: Item, targets: readonly Target[]): Cause {
     corrected: { ...item.corrected },
     ...(item.where === undefined ? {} : { where: item.where }),
     residual,
-    sentence: `Fits within ${percent(Math.max(residual, 1e-5))} if ${words}.`,
+    sentence: `Fits within ${percent(Math.max(residual, 1e-5))} if ${inWords(item.words)}.`,
   };
 }

@@ -4,6 +4,11 @@ import type { DeclaredParameter, Target } from './problem';
 /** A sentence's end; put into words only when it is told, since most slips never are. */
 export type Words = string | (() => string);
 
+/** The words of a slip, worked out now. */
+export function inWords(words: Words): string {
+  return typeof words === 'string' ? words : words();
+}
+
 /** A slip over a set of declared constants, with how well it brings them back. */
 export interface Item {
   code: CauseCode;

@@ -7,6 +7,7 @@ import type { Cause } from '../types';
 import { figure } from '../words';
 import { MOST_CAUSES } from './alternatives';
 import type { Problem, Target } from './problem';
+import { inWords } from './item';
 import { TIGHT } from './problem';
 import { factorSlips } from './unit-slips';
 import type { FactorSlip } from './unit-slips';
@@ -115,7 +116,7 @@ function bestOfEachCode(trials: readonly Trial[]): Trial[] {
 
 function toCause({ slips, speed }: Trial): Cause {
   const first = slips[0];
-  const words = first?.slip.words ?? '';
+  const words = inWords(first?.slip.words ?? '');
   return {
     code: first?.slip.code ?? 'decimal-shift',
     in: 'declared',

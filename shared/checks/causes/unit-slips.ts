@@ -1,5 +1,6 @@
 import type { CauseCode } from '../types';
 import { figure, withUnit } from '../words';
+import type { Words } from './item';
 import type { Problem, Target } from './problem';
 import { isShunt } from './problem';
 
@@ -15,7 +16,7 @@ export interface FactorSlip {
   /** Made for a whole set of values at once, hardly ever for one. */
   isWhole?: true;
   /** What is assumed, as it follows "Fits within 0.1 % if". */
-  words: string;
+  words: Words;
 }
 
 const KM_PER_MILE = 1.609344;
@@ -42,7 +43,7 @@ export function factorSlips(target: Target, problem: Problem): FactorSlip[] {
 function lengthSlips(target: Target, { lengthKm }: Problem): FactorSlip[] {
   const isPerLength = target.value.form === 'per-length';
   const isPerMile = target.value.unit.endsWith('/mi');
-  const total = withUnit(lengthKm, 'km');
+  const total = (): string => withUnit(lengthKm, 'km');
   return [
     {
       code: 'per-mile',
@@ -65,7 +66,7 @@ function lengthSlips(target: Target, { lengthKm }: Problem): FactorSlip[] {
       // A total read as per mile has been divided by 1.609 on its way to per km already.
       factor: isPerMile ? KM_PER_MILE / lengthKm : 1 / lengthKm,
       prior: isPerLength ? 0 : ODD,
-      words: `the value is that of the whole line of ${total}`,
+      words: () => `the value is that of the whole line of ${total()}`,
     },
     {
       code: 'per-length',
@@ -73,7 +74,7 @@ function lengthSlips(target: Target, { lengthKm }: Problem): FactorSlip[] {
       isWhole: true,
       factor: lengthKm,
       prior: isPerLength ? -1 : 0,
-      words: `the value is per kilometre and was taken as that of the whole line of ${total}`,
+      words: () => `the value is per kilometre and was taken as that of the whole line of ${total()}`,
     },
   ];
 }
@@ -115,7 +116,7 @@ function baseSlips(target: Target, problem: Problem): FactorSlip[] {
     key: String(mva),
     factor: isSusceptance ? mva / filedMva : filedMva / mva,
     prior: price - Math.log(bases.length),
-    words: `the per-unit base is ${withUnit(mva, 'MVA')}, not ${withUnit(filedMva, 'MVA')}`,
+    words: () => `the per-unit base is ${withUnit(mva, 'MVA')}, not ${withUnit(filedMva, 'MVA')}`,
   }));
   const voltage = voltages.map((kv): FactorSlip => ({
     code: 'base-kv',
@@ -123,7 +124,7 @@ function baseSlips(target: Target, problem: Problem): FactorSlip[] {
     factor:
       isSusceptance && unit !== 'Mvar' ? (filedKv / kv) ** 2 : (kv / filedKv) ** (unit === 'Mvar' ? -2 : 2),
     prior: price - 0.3 - Math.log(Math.max(1, voltages.length)),
-    words: `the per-unit base is ${withUnit(kv, 'kV')}, not ${withUnit(filedKv, 'kV')}`,
+    words: () => `the per-unit base is ${withUnit(kv, 'kV')}, not ${withUnit(filedKv, 'kV')}`,
   }));
   return [...power, ...voltage, ...neutralSlips(isSusceptance !== (unit === 'Mvar'), price)];
 }

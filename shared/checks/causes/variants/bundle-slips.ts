@@ -2,6 +2,7 @@ import { figure, withUnit } from '../../words';
 import type { OverheadSection, PhasePosition } from '../../../engine/index';
 import type { Outcome } from '../bench';
 import { fitOne, gridOf } from './fit-one';
+import { gmrOf } from './gmr-of';
 import type { Variant, VariantContext } from './variant';
 import { ENGINE_MODEL, changePhases, overheadSections, sectionPointer } from './variant';
 
@@ -102,6 +103,7 @@ function countSlips(context: VariantContext, filed: Filed): Variant[] {
 function bundleForSingle(context: VariantContext, filed: Filed): Variant[] {
   return [2, 3, 4].flatMap((bundleCount) =>
     BUILT_SIDES_M.flatMap((side): Variant[] => {
+      if (!couldFit(context, lnBundleGmr(filed, bundleCount, side) - lnBundleGmr(filed, 1, 0))) return [];
       const outcome = solve(context, filed, bundleCount, side);
       if (outcome === null) return [];
       const words = (): string =>
@@ -149,8 +151,11 @@ function sideSlips(context: VariantContext, filed: Filed): Variant[] {
     side > 0.02 &&
     side < 5;
   const others = known.filter(isOther);
+  const isNear = (side: number): boolean => filed.isMixed || couldFit(context, lnShift(filed, side));
   return [
-    ...others.flatMap((side) => make(side, 0, -1 - Math.log(others.length) + likelihood(side, filed))),
+    ...others
+      .filter(isNear)
+      .flatMap((side) => make(side, 0, -1 - Math.log(others.length) + likelihood(side, filed))),
     ...fittedSides(context, filed)
       .filter(isOther)
       .flatMap((side) => make(side, 1, -2.5 + likelihood(side, filed))),
@@ -169,6 +174,35 @@ function likelihood(side: number, { sideM, isMixed }: Filed): number {
   return ofFiled + (isBuilt(side) ? 0 : -2);
 }
 
+/** Room that the quick look leaves beside the tight tolerance. */
+const QUICK_LOOK = 0.03;
+
+/** True when a change of ln(GMR of the bundle) brings some declared X1 near, before the engine is asked. */
+function couldFit({ base, bench, declared }: VariantContext, lnGmrShift: number): boolean {
+  const ohmPerKm = 2 * Math.PI * bench.line.frequencyHz * 2e-4;
+  return base.circuits.some(({ x1 }, circuit) => {
+    const wanted = declared[circuit]?.x1;
+    return (
+      wanted === undefined ||
+      x1 === undefined ||
+      Math.abs((x1 - ohmPerKm * lnGmrShift) / wanted - 1) < QUICK_LOOK
+    );
+  });
+}
+
+/** What another side adds to ln(GMR of the bundle). */
+function lnShift({ bundleCount, sideM }: Filed, side: number): number {
+  return ((bundleCount - 1) / bundleCount) * Math.log(side / sideM);
+}
+
+/** ln(GMR) of a bundle of up to four, in ln m. */
+function lnBundleGmr({ position }: Filed, bundleCount: number, side: number): number {
+  const lnOne = Math.log(gmrOf(position.conductor) / 1000);
+  if (bundleCount === 1) return lnOne;
+  const lnDiagonal = bundleCount === 4 ? Math.log(2) / 2 : 0;
+  return (lnOne + (bundleCount - 1) * Math.log(side) + lnDiagonal) / bundleCount;
+}
+
 /** The side that the declared X1 itself would need. */
 function fittedSides(context: VariantContext, filed: Filed): number[] {
   const circuit = context.declared.findIndex((declared) => declared?.x1 !== undefined);
@@ -179,10 +213,20 @@ function fittedSides(context: VariantContext, filed: Filed): number[] {
       const value = solve(context, filed, filed.bundleCount, side)?.circuits[circuit]?.x1;
       return value === undefined ? null : value / wanted - 1;
     },
-    gridOf(0.05, 3, 5, true),
-    6,
+    gridAround(context, filed, wanted, circuit),
+    5,
   );
   return roots.filter(
     (side) => Math.abs(side / filed.sideM - 1) > 0.01 && figure(side) !== figure(filed.sideM),
   );
+}
+
+/** Where to look for a side: around what the change of X1 says, or everywhere. */
+function gridAround(context: VariantContext, filed: Filed, wanted: number, circuit: number): number[] {
+  const x1 = context.base.circuits[circuit]?.x1;
+  if (x1 === undefined || filed.isMixed) return gridOf(0.05, 3, 5, true);
+  const ohmPerKm = 2 * Math.PI * context.bench.line.frequencyHz * 2e-4;
+  const share = (filed.bundleCount - 1) / filed.bundleCount;
+  const guess = filed.sideM * Math.exp((x1 - wanted) / (ohmPerKm * share));
+  return guess > 0.02 && guess < 5 ? [guess * 0.8, guess * 1.25] : [];
 }

@@ -40,6 +40,8 @@ export function coordinateWords(position: Position, index: number, field: Coordi
  * its own lost to one, heights from the lowest arm, a decimal point.
  */
 export function candidatesOf(section: OverheadSection): Candidate[] {
+  const heights = section.positions.map(({ attachmentHeightM }) => attachmentHeightM).sort((a, b) => a - b);
+  const [lowest = 0, second = lowest] = heights;
   return section.positions.flatMap((position, index) =>
     (['horizontalM', 'attachmentHeightM', 'sagM'] as const).flatMap((field) => {
       const found = new Map<number, { prior: number }>();
@@ -52,7 +54,8 @@ export function candidatesOf(section: OverheadSection): Candidate[] {
       for (const value of digitSwaps(position[field])) add(value, -0.7);
       for (const value of siblingValues(section, position, field)) add(value, -1);
       for (const value of patternValues(section, position, field)) add(value, -1);
-      if (field === 'attachmentHeightM') add(position[field] + lowestOther(section, index), -0.5);
+      if (field === 'attachmentHeightM')
+        add(position[field] + (position[field] === lowest ? second : lowest), -0.5);
       if (field !== 'sagM') for (const factor of [10, 0.1]) add(position[field] * factor, -1.5);
       return [...found].map(([value, { prior }]) => ({
         index,
@@ -100,9 +103,4 @@ function patternValues(section: OverheadSection, position: Position, field: Coor
     .map((other) => other[field]);
   if (one === undefined || two === undefined) return [];
   return [2 * one - two, 2 * two - one, (one + two) / 2];
-}
-
-function lowestOther(section: OverheadSection, index: number): number {
-  const heights = section.positions.filter((_, at) => at !== index).map((other) => other.attachmentHeightM);
-  return heights.length === 0 ? 0 : Math.min(...heights);
 }

@@ -90,7 +90,7 @@ function rootsOf(
         ?.x1;
       return x1 === undefined ? null : x1 / wanted - 1;
     };
-    const polished = fitOne(exact, [root - 0.6, root + 0.6], 5);
+    const polished = fitOne(exact, [root - 0.6, root + 0.6], 3);
     return polished.filter((value) => Math.abs(value - filed) > 0.05);
   });
 }
