@@ -133,7 +133,10 @@ describe('a case from draft to acceptance', () => {
     await reviewer.press('Accept the answer');
     await reviewer.sees(/Every discrepancy is settled|D-1.*settled|settled/);
     await reviewer.press('Accept');
-    await reviewer.sees(/replaces no engineering study/);
+    await reviewer.page
+      .getByRole('dialog')
+      .getByText(/replaces no engineering study/)
+      .waitFor();
     await reviewer.confirm(/^Accept/);
     await reviewer.sees('Accepted');
     await reviewer.goTo(`/applications/${number}/record`);
