@@ -8,9 +8,21 @@ export type AuditFilter = (typeof AUDIT_FILTERS)[number];
 /** The trail has one order: newest first. */
 export const AUDIT_LIST: ListSpec<AuditFilter> = { filters: AUDIT_FILTERS, sort: 'newest' };
 
-export const auditQuery = (view: ListView<AuditFilter>) => {
+const WHOLE_NUMBER = /^\d{2}-\d{4}$/;
+
+/** What the server is asked: a number only once it is written out, and no order, since there is one. */
+export function auditRequest(view: ListView<AuditFilter>): ListAuditEventsRequest {
   const { sort: _one, ...asked } = listQueryOf(view);
-  const query: ListAuditEventsRequest = { ...asked, limit: '50' };
+  const { 'filter[application]': number = '', ...others } = asked;
+  return {
+    ...others,
+    ...(WHOLE_NUMBER.test(number) ? { 'filter[application]': number } : {}),
+    limit: '50',
+  };
+}
+
+export const auditQuery = (view: ListView<AuditFilter>) => {
+  const query = auditRequest(view);
   return queryOptions({
     queryKey: ['audit-events', query],
     queryFn: ({ signal }) => call('listAuditEvents', { query, signal }),

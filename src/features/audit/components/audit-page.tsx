@@ -7,19 +7,15 @@ import { SkeletonRows } from '../../../components/feedback/skeleton';
 import { Button } from '../../../components/ui/button';
 import { Disclosure } from '../../../components/ui/disclosure';
 import { FilterInput } from '../../../components/ui/filter-input';
+import { Select } from '../../../components/ui/inputs';
 import { ListPages } from '../../../components/ui/list-pages';
 import { PageHead } from '../../../components/ui/page-head';
 import { Sheet } from '../../../components/ui/sheet';
 import { Cell, HeadCell, Row, RowHead, Table, TableBody, TableHead } from '../../../components/ui/table';
-import { useListView } from '../../../hooks/use-list-view';
+import { useListView, type ListControls } from '../../../hooks/use-list-view';
 import { isFiltered } from '../../../lib/list-view';
+import { useActors } from '../api/list-actors';
 import { AUDIT_LIST, useAuditEvents, type AuditFilter } from '../api/list-audit-events';
-
-const FILTERS: readonly { name: AuditFilter; label: string; placeholder: string }[] = [
-  { name: 'application', label: 'Number of the application', placeholder: 'Application, 27-0418' },
-  { name: 'act', label: 'What was done, or its beginning', placeholder: 'Act, such as discrepancy' },
-  { name: 'actor', label: 'Who did it', placeholder: 'Who' },
-];
 
 /** The audit trail of the whole house, newest first. Nothing in it can be changed. */
 export function AuditPage() {
@@ -32,18 +28,7 @@ export function AuditPage() {
         lead="Everything that happened, newest first. The database itself refuses to change an entry, and each carries a hash over the one before."
       />
       <ProblemNotice error={error} className="mb-4" />
-      <div className="filter-row" role="search" aria-label="Filter the record">
-        {FILTERS.map(({ name, label, placeholder }) => (
-          <FilterInput
-            key={name}
-            type="search"
-            label={label}
-            placeholder={placeholder}
-            value={controls.view.filters[name]}
-            onChange={(value) => controls.setFilter(name, value)}
-          />
-        ))}
-      </div>
+      <AuditFilters controls={controls} />
       <Sheet main label="Record">
         {page ? <AuditTable items={page.items} /> : <SkeletonRows rows={10} label="Loading the record" />}
         {page?.items.length === 0 && (
@@ -57,6 +42,37 @@ export function AuditPage() {
         </div>
       </Sheet>
     </>
+  );
+}
+
+function AuditFilters({ controls: { view, setFilter } }: { controls: ListControls<AuditFilter> }) {
+  const people = useActors();
+  return (
+    <div className="filter-row" role="search" aria-label="Filter the record">
+      <FilterInput
+        type="search"
+        label="What was done, or its beginning"
+        placeholder="Act, such as discrepancy"
+        maxLength={60}
+        value={view.filters.act}
+        onChange={(value) => setFilter('act', value)}
+      />
+      <FilterInput
+        type="search"
+        label="Number of the application"
+        placeholder="Number, 27-0418"
+        maxLength={7}
+        value={view.filters.application}
+        onChange={(value) => setFilter('application', value)}
+      />
+      <Select
+        aria-label="Who did it"
+        none="Anybody"
+        options={people.map(({ id, name }) => ({ value: id, label: name }))}
+        value={view.filters.actor}
+        onChange={(event) => setFilter('actor', event.target.value)}
+      />
+    </div>
   );
 }
 

@@ -7,8 +7,16 @@ export const LINE_FILTERS = ['search', 'voltage', 'state', 'grade'] as const;
 export type LineFilter = (typeof LINE_FILTERS)[number];
 export const LINE_LIST: ListSpec<LineFilter> = { filters: LINE_FILTERS, sort: 'name' };
 
+const VOLTAGE = /^\d+(\.\d+)?$/;
+
+/** What the server is asked: a voltage only where it is a number. */
+function linesRequest(view: ListView<LineFilter>): Record<string, string> {
+  const { 'filter[voltage]': kv = '', ...others } = listQueryOf(view);
+  return { ...others, ...(VOLTAGE.test(kv) ? { 'filter[voltage]': kv } : {}), limit: '50' };
+}
+
 export const linesQuery = (view: ListView<LineFilter>) => {
-  const query = { ...listQueryOf(view), limit: '50' };
+  const query = linesRequest(view);
   return queryOptions({
     queryKey: [...linesKey(), query],
     queryFn: ({ signal }) => call('listLines', { query, signal }),

@@ -74,7 +74,8 @@ function LineFilters({ controls: { view, setFilter } }: { controls: ListControls
         label="Nominal voltage in kV"
         placeholder="kV"
         value={view.filters.voltage}
-        onChange={(value) => setFilter('voltage', /^\d*\.?\d*$/.test(value) ? value : '')}
+        maxLength={6}
+        onChange={(value) => setFilter('voltage', value)}
       />
       <Select
         aria-label="State"
