@@ -60,8 +60,9 @@ export class Person {
     return this.page.getByLabel(label, { exact: true }).selectOption(option);
   }
 
+  /** Waits until the words stand on the page for the eye; what only paper shows does not count. */
   async sees(text: string | RegExp): Promise<void> {
-    await this.page.getByText(text).first().waitFor();
+    await this.page.getByText(text).filter({ visible: true }).first().waitFor();
   }
 
   async isAccessible(): Promise<void> {
