@@ -1,12 +1,13 @@
-import { useRef, useState } from 'react';
-import type { DragEvent } from 'react';
+import { useState } from 'react';
+import type { Import } from '#shared/contracts/api.generated';
 import { ProblemNotice } from '../../../components/feedback/problem-notice';
 import { Progress } from '../../../components/feedback/progress';
-import { Button } from '../../../components/ui/button';
 import { Sheet } from '../../../components/ui/sheet';
 import { addressOf } from '../../../lib/api/call';
 import { fileSize } from '../../../lib/file-size';
 import { useImportFile } from '../api/import-file';
+import type { Correction } from '../model/dialect-words';
+import { FileDrop } from './file-drop';
 import { ImportResult } from './import-result';
 
 interface ImportPanelProps {
@@ -31,77 +32,57 @@ function Exports({ number }: { number: string }) {
   );
 }
 
+function Sending({ file, share }: { file: File; share: number }) {
+  return (
+    <div className="w-full">
+      <Progress
+        label={`Sending ${file.name}`}
+        done={Math.round(share * file.size)}
+        total={file.size}
+        format={fileSize}
+      />
+      {share >= 1 && <p className="mt-1 text-ink-soft">The file has arrived and is being read.</p>}
+    </div>
+  );
+}
+
 /** Takes lines from a JSON or CSV file into the draft: sent, read, shown, and only then taken. */
 export function ImportPanel({ number, hasLines }: ImportPanelProps) {
-  const input = useRef<HTMLInputElement>(null);
   const [file, setFile] = useState<File | null>(null);
   const [share, setShare] = useState(0);
-  const [over, setOver] = useState(false);
-  const read = useImportFile(number, setShare);
+  const [last, setLast] = useState<Import | null>(null);
+  const reading = useImportFile(number, setShare);
+  // While a file is read again, what was read of it before stays on the page.
+  const shown = reading.data ?? (reading.isPending ? last : null);
 
-  const choose = (chosen: File | undefined) => {
-    if (!chosen) return;
+  const read = (chosen: File, correction?: Correction) => {
     setFile(chosen);
+    setLast(correction ? shown : null);
     setShare(0);
-    read.mutate(chosen);
+    reading.mutate({ file: chosen, correction });
   };
-  const drop = (event: DragEvent) => {
-    event.preventDefault();
-    setOver(false);
-    choose(event.dataTransfer.files[0]);
-  };
-  const done = () => {
+  const putAside = () => {
     setFile(null);
-    read.reset();
+    setLast(null);
+    reading.reset();
   };
   return (
     <Sheet title="Import" aside={file && <span className="font-mono text-label">{file.name}</span>}>
       <div className="sheet-body grid gap-4 text-table">
-        {read.data ? (
-          <ImportResult number={number} read={read.data} onDone={done} />
+        {shown ? (
+          <ImportResult
+            number={number}
+            read={shown}
+            rereading={reading.isPending}
+            onReread={(correction) => file && read(file, correction)}
+            onDone={putAside}
+          />
         ) : (
-          <div
-            className={`grid justify-items-start gap-3 border border-dashed p-4 ${over ? 'border-copper bg-copper-wash' : 'border-rule-strong'}`}
-            onDragOver={(event) => {
-              event.preventDefault();
-              setOver(true);
-            }}
-            onDragLeave={() => setOver(false)}
-            onDrop={drop}
-          >
-            <p className="text-ink-soft">
-              Lines from a filing in JSON, or from a table in CSV with one row a section. You see what was
-              read before anything enters the draft.
-            </p>
-            <input
-              ref={input}
-              type="file"
-              className="sr-only"
-              tabIndex={-1}
-              aria-label="File to import"
-              accept=".json,.csv,.txt,application/json,text/csv"
-              onChange={(event) => {
-                choose(event.target.files?.[0]);
-                event.target.value = '';
-              }}
-            />
-            <Button small busy={read.isPending} onClick={() => input.current?.click()}>
-              Choose a file
-            </Button>
-            {read.isPending && file && (
-              <div className="w-full">
-                <Progress
-                  label={`Sending ${file.name}`}
-                  done={Math.round(share * file.size)}
-                  total={file.size}
-                  format={fileSize}
-                />
-                {share >= 1 && <p className="mt-1 text-ink-soft">The file has arrived and is being read.</p>}
-              </div>
-            )}
-          </div>
+          <FileDrop busy={reading.isPending} onFile={(chosen) => read(chosen)}>
+            {reading.isPending && file && <Sending file={file} share={share} />}
+          </FileDrop>
         )}
-        <ProblemNotice error={read.error} />
+        <ProblemNotice error={reading.error} />
         {hasLines && <Exports number={number} />}
       </div>
     </Sheet>

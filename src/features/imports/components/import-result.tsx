@@ -4,18 +4,22 @@ import { ProblemNotice } from '../../../components/feedback/problem-notice';
 import { Button } from '../../../components/ui/button';
 import { Dialog } from '../../../components/ui/dialog';
 import { useCaseWrite } from '../../../lib/queries/use-case-write';
-import { dialectWords, readWords } from '../model/dialect-words';
+import { readWords } from '../model/dialect-words';
+import type { Correction } from '../model/dialect-words';
+import { DialectForm } from './dialect-form';
 import { FaultTable } from './fault-table';
 
 interface ImportResultProps {
   number: string;
   read: Import;
+  rereading: boolean;
+  onReread: (correction: Correction) => void;
   /** Puts the file aside: another may be chosen. */
   onDone: () => void;
 }
 
 /** What was read of a file: how it is written, what can be taken, what must be looked at; then the applicant's word. */
-export function ImportResult({ number, read, onDone }: ImportResultProps) {
+export function ImportResult({ number, read, rereading, onReread, onDone }: ImportResultProps) {
   const [looking, setLooking] = useState(false);
   const take = useCaseWrite('takeImport', number);
   const { id, lines, faults, notices, dialect } = read;
@@ -27,9 +31,7 @@ export function ImportResult({ number, read, onDone }: ImportResultProps) {
   return (
     <div className="grid gap-3 text-table" role="status">
       <p className="text-h3 font-strong">{readWords(read)}</p>
-      {dialect && (
-        <p className="text-ink-soft">{`${dialectWords(dialect)}. If that is not so, save the file anew.`}</p>
-      )}
+      {dialect && <DialectForm key={id} dialect={dialect} busy={rereading} onReread={onReread} />}
       {replaced.length > 0 && <p>{`Replaced in the draft: ${replaced.map((l) => l.name).join(', ')}.`}</p>}
       {aboutPlaces.map((notice, i) => (
         <p key={i} className="text-ink-soft">

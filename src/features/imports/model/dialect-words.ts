@@ -12,6 +12,35 @@ const ENCODINGS: Readonly<Record<Dialect['encoding'], string>> = {
   'windows-1252': 'Windows-1252',
 };
 
+/** How the applicant says that a table is written. */
+export type Correction = Pick<Dialect, 'delimiter' | 'decimal' | 'encoding'>;
+
+/** What can be corrected, with what it can be. */
+export const CHOICES: readonly {
+  name: keyof Correction;
+  label: string;
+  options: readonly { value: string; label: string }[];
+}[] = [
+  {
+    name: 'delimiter',
+    label: 'Columns are parted by',
+    options: Object.entries(DELIMITERS).map(([value, label]) => ({ value, label })),
+  },
+  {
+    name: 'decimal',
+    label: 'Decimal sign',
+    options: [
+      { value: 'point', label: 'point' },
+      { value: 'comma', label: 'comma' },
+    ],
+  },
+  {
+    name: 'encoding',
+    label: 'Encoding',
+    options: Object.entries(ENCODINGS).map(([value, label]) => ({ value, label })),
+  },
+];
+
 /** How a table is written, as it was found: "Columns parted by semicolons, decimal comma, UTF-8". */
 export function dialectWords({ delimiter, decimal, encoding, lineEnds }: Dialect): string {
   const ends = lineEnds === 'mixed' ? ', mixed line ends' : '';
