@@ -69,12 +69,10 @@ function limit(c: Case): Wish {
 }
 
 /** A list or an object with too few or too many in it. */
-const count = (what: string, words: string) => (c: Case) => {
+const count = (one: string, many: string, words: string) => (c: Case) => {
   const n = Number(c.params['limit']);
-  return {
-    expected: `${words} ${numberInWords(n)} ${what}`,
-    message: `${c.label} must hold ${words} ${numberInWords(n)} ${what}.`,
-  };
+  const expected = `${words} ${numberInWords(n)} ${n === 1 ? one : many}`;
+  return { expected, message: `${c.label} must hold ${expected}.` };
 };
 
 /** A value that is none of a closed list; the nearest of the list are named. */
@@ -170,10 +168,10 @@ const WISHES: Readonly<Record<string, (c: Case) => Wish>> = {
     c.params['format'] === 'date'
       ? must(c, 'a day that exists, as YYYY-MM-DD')
       : must(c, `a ${String(c.params['format'])}`),
-  minItems: count('entries', 'at least'),
-  maxItems: count('entries', 'at most'),
-  minProperties: count('fields', 'at least'),
-  maxProperties: count('fields', 'at most'),
+  minItems: count('entry', 'entries', 'at least'),
+  maxItems: count('entry', 'entries', 'at most'),
+  minProperties: count('field', 'fields', 'at least'),
+  maxProperties: count('field', 'fields', 'at most'),
   uniqueItems: (c) => ({
     expected: 'entries that differ',
     message: `${c.label} holds the same entry twice.`,

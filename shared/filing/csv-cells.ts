@@ -38,6 +38,8 @@ export class CellReader {
   readonly written: Record<string, string> = {};
   /** Pointers of which a fault is already told. */
   readonly told = new Set<string>();
+  /** Faults told so far, so that a cell that goes to several places is spoken of once. */
+  private readonly said = new Set<string>();
 
   constructor(readonly table: CsvTable) {}
 
@@ -53,11 +55,14 @@ export class CellReader {
     this.cells.set(pointer, { row: row.row, column });
   }
 
-  /** Tells a fault of a cell, and that the value at `pointer` needs no second one. */
+  /** Tells a fault of a cell, once for all places that the cell goes to; `pointer` needs no second one. */
   fault(row: CsvRow, column: string, expected: string, message: string, pointer?: string): void {
+    if (pointer !== undefined) this.told.add(pointer);
+    const key = `${row.row} ${column} ${message}`;
+    if (this.said.has(key)) return;
+    this.said.add(key);
     const value = shown(row.cells.get(column)?.trim() || null);
     this.faults.push({ row: row.row, column, value, expected, message });
-    if (pointer !== undefined) this.told.add(pointer);
   }
 
   /** A number of a cell; undefined when it is empty or faulty. */

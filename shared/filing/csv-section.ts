@@ -16,10 +16,10 @@ const SECTION_FIELDS = [
   ['ground_wire_bonding', 'groundWireBonding'],
 ] as const;
 
-/** The model that the data are for, where the file does not say it. */
-function impliedModel(data: Draft): string | undefined {
-  if (data['acResistanceOhmPerKm'] !== undefined) return 'handbook';
-  return data['dcResistance20OhmPerKm'] === undefined ? undefined : 'tube';
+/** The model that the data are for, where the file does not say it; a number that cannot be read counts as given. */
+function impliedModel(cells: CellReader, row: CsvRow, prefix: string): string | undefined {
+  if (cells.any(row, [`${prefix}_ac_resistance_ohm_per_km`])) return 'handbook';
+  return cells.any(row, [`${prefix}_dc_resistance_20_ohm_per_km`]) ? 'tube' : undefined;
 }
 
 /** A conductor by its data, or by its library name; null where the row names none. */
@@ -41,7 +41,7 @@ function conductor(cells: CellReader, row: CsvRow, prefix: string, base: string)
   const data: Draft = {};
   cells.put(data, 'name', base, row, prefix);
   for (const [end, field] of CSV_CONDUCTOR_FIELDS) cells.put(data, field, base, row, `${prefix}_${end}`);
-  data['model'] ??= impliedModel(data);
+  data['model'] ??= impliedModel(cells, row, prefix);
   if (data['model'] === undefined) delete data['model'];
   return data;
 }
@@ -98,14 +98,18 @@ function phasePositions(cells: CellReader, row: CsvRow, at: string, out: Draft[]
   }
 }
 
-/** The ground wires, as many as have a place. */
-function groundPositions(cells: CellReader, row: CsvRow, at: string, out: Draft[]): void {
+/** The ground wires, as many as have a place; `isNamed` when the row says which conductor they are. */
+function groundPositions(cells: CellReader, row: CsvRow, at: string, out: Draft[], isNamed: boolean): void {
   for (const n of CSV_GROUND_WIRES) {
     const base = `${at}/positions/${out.length}`;
     const head = { groundWire: true, conductor: 'ground' };
     const placed = position(cells, row, `gw${n}`, 'gw_sag_m', base, head);
     if (!placed) continue;
     cells.at(`${base}/conductor`, row, 'ground_conductor');
+    if (!isNamed) {
+      const message = 'Ground wires hang here, and their conductor is not named.';
+      cells.fault(row, 'ground_conductor', 'the ground wires’ conductor', message, `${base}/conductor`);
+    }
     out.push(placed);
   }
 }
@@ -132,7 +136,7 @@ export function sectionFromRow(cells: CellReader, row: CsvRow, first: CsvRow, at
   }
   const positions: Draft[] = [];
   phasePositions(cells, row, at, positions);
-  groundPositions(cells, row, at, positions);
+  groundPositions(cells, row, at, positions, conductors['ground'] !== undefined);
   cells.at(`${at}/conductors`, row, 'conductor');
   cells.at(`${at}/positions`, row, 'a_x_m');
   if (Object.keys(conductors).length > 0) section['conductors'] = conductors;

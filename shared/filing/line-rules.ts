@@ -21,8 +21,10 @@ function positionConductors(s: Section, at: string): PointerFault[] {
   const keys = Object.keys(s.conductors ?? {});
   return (s.positions ?? []).flatMap((p, i) => {
     if (keys.includes(p.conductor)) return [];
-    const message = `This section has no conductor ${inWords(p.conductor)}.${didYouMean(p.conductor, keys)}`;
-    return [fault(`${at}/positions/${i}/conductor`, p.conductor, `one of ${list(keys)}`, message)];
+    const hint = didYouMean(p.conductor, keys) || (keys.length > 0 ? ` It has ${list(keys)}.` : '');
+    const message = `This section has no conductor ${inWords(p.conductor)}.${hint}`;
+    const expected = keys.length > 0 ? `one of ${list(keys)}` : 'a key of the section’s conductors';
+    return [fault(`${at}/positions/${i}/conductor`, p.conductor, expected, message)];
   });
 }
 

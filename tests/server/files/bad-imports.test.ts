@@ -38,6 +38,22 @@ describe('form of the file', () => {
     ]);
   });
 
+  it('tells a cell that goes to several places once, and asks for no model where its numbers cannot be read', () => {
+    const [header, row] = csv({}).trim().split('\n');
+    const more = 'bundle_count,bundle_spacing_m,ground_conductor,ground_conductor_ac_resistance_ohm_per_km';
+    const faults = cellFaults(`${header},${more},gw1_x_m,gw1_height_m\n${row},2,x,3/8 in steel,y,0,30`);
+    expect(faults.filter((f) => f.startsWith('2 bundle_spacing_m'))).toHaveLength(1);
+    expect(faults.filter((f) => f.startsWith('2 ground_conductor_ac_resistance'))).toHaveLength(1);
+    expect(faults.filter((f) => f.includes('model'))).toEqual([]);
+  });
+
+  it('says that ground wires hang there and no conductor is named for them', () => {
+    const [header, row] = csv({}).trim().split('\n');
+    expect(cellFaults(`${header},gw1_x_m,gw1_height_m\n${row},0,30`)).toEqual([
+      '2 ground_conductor: Ground wires hang here, and their conductor is not named.',
+    ]);
+  });
+
   it('2: a column missing, unknown or doubled, told once and not on every row', () => {
     const renamed = csv({}, {}, {}).replace('length_km', 'lenght_km');
     expect(cellFaults(renamed)).toEqual([

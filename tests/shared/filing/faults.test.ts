@@ -97,7 +97,13 @@ const BREAKS: [name: string, change: (l: Line) => void, pointer: string, words: 
     /must be an object/,
   ],
   ['a missing X1', (l) => delete l['declared'][0].x1, '/lines/0/declared/0/x1', /X1 is missing/],
-  ['nothing declared', (l) => (l['declared'] = []), '/lines/0/declared', /at least 1/],
+  ['nothing declared', (l) => (l['declared'] = []), '/lines/0/declared', /at least 1 entry\./],
+  [
+    'a conductor that the section has not, far from any name',
+    (l) => (section(l).positions[1].conductor = 'x7'),
+    `${at}/positions/1/conductor`,
+    /no conductor “x7”\. It has phase, ground\./,
+  ],
   ['a misspelt field', (l) => (section(l).lenghtKm = 1), `${at}/lenghtKm`, /Did you mean lengthKm/],
   ['a field of another object', (l) => (l['gmrMm'] = 1), '/lines/0/gmrMm', /not a field that is known here/],
   [
