@@ -50,6 +50,12 @@ export function scatterOf(target: Target, scatter: number, model: number): numbe
   return Math.sqrt(scatter ** 2 + target.rounding ** 2 / 3 + model ** 2);
 }
 
+/**
+ * Log density of what a fitted number could have given: values within some 30 % of the recomputed one, in the same
+ * convention as `logDensity`, which leaves ln √2π out.
+ */
+export const SPREAD_OF_FITTED = 2;
+
 /** Log score of an item: its prior and the fit of everything that it touches. */
 export function score(item: Item, targets: readonly Target[], scatter: number): number {
   let total = SLIP_PRIOR + item.prior;
@@ -58,7 +64,7 @@ export function score(item: Item, targets: readonly Target[], scatter: number): 
     if (target !== undefined) total += logDensity(difference, scatterOf(target, scatter, item.model));
   }
   // A number fitted to the values pays back the fit that it bought.
-  return total + item.freedom * (Math.log(Math.hypot(scatter, item.model)) + 0.5);
+  return total + item.freedom * (Math.log(Math.hypot(scatter, item.model)) + SPREAD_OF_FITTED);
 }
 
 /** The largest remaining difference among the constants that the item explains. */

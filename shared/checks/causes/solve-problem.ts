@@ -4,7 +4,7 @@ import type { Cover } from './cover';
 import { bestCover } from './cover';
 import { declaredItems } from './declared-items';
 import type { Item } from './item';
-import { SLIP_PRIOR } from './item';
+import { SLIP_PRIOR, SPREAD_OF_FITTED } from './item';
 import type { DeclaredParameter, Problem } from './problem';
 import { TIGHT, residual } from './problem';
 import type { Reader, VariantFit } from './variant-items';
@@ -85,7 +85,7 @@ function stackOn(fit: VariantFit, problem: Problem, scatter: number): Stack | nu
   const items = declaredItems(shifted);
   const upper = bestCover(items, targets, differences);
   if (upper.items.length === 0) return null;
-  const scopePrice = SLIP_PRIOR + variant.prior + variant.freedom * (Math.log(scatter) + 0.5);
+  const scopePrice = SLIP_PRIOR + variant.prior + variant.freedom * (Math.log(scatter) + SPREAD_OF_FITTED);
   const base = baseItem(fit, problem, direct);
   const matters = [
     { explains: namesOf(base, problem), causes: causesOf(base, [], problem.targets, differences, upper) },
