@@ -91,7 +91,7 @@ function AuditTable({ items }: { items: readonly AuditEvent[] }) {
       </TableHead>
       <TableBody>
         {items.map((event) => (
-          <Row key={event.seq}>
+          <Row key={event.seq} className="align-top">
             <Cell number foldLabel="No.">
               {event.seq}
             </Cell>
@@ -109,7 +109,7 @@ function AuditTable({ items }: { items: readonly AuditEvent[] }) {
             </Cell>
             <Cell fold="row">
               <Disclosure summary={<code>{event.hash.slice(0, 12)}</code>}>
-                <pre className="max-w-[48ch] overflow-x-auto whitespace-pre-wrap break-all py-2">
+                <pre className="max-w-[48ch] overflow-x-auto whitespace-pre-wrap break-words py-2">
                   {JSON.stringify({ before: event.before, after: event.after }, null, 2)}
                 </pre>
               </Disclosure>

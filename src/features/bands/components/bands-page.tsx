@@ -13,6 +13,7 @@ import { useBandDraft } from '../api/get-band-draft';
 import { useRuleSets } from '../api/list-rule-sets';
 import { useDraftEdits } from '../hooks/use-draft-edits';
 import { bandKey, bandsOf, changedBands, classesOf, editedBands } from '../model/band-form';
+import { changedSettings, settingGroups } from '../model/settings-form';
 import { BandTable } from './band-table';
 import { CalendarSheet } from './calendar-sheet';
 import { ClassChoice } from './class-choice';
@@ -31,6 +32,8 @@ export function BandsPage() {
   const [part, setPart] = usePart();
   const inForce = new Map((rules.bands as Band[]).map((band) => [bandKey(band), band]));
   const changed = changedBands(editedBands(draft.bands, edits.bands) ?? draft.bands, [...inForce.values()]);
+  const settingsNow = settingsInForce(rules);
+  const otherChanges = changedSettings(settingGroups(draft), edits.settings, settingsNow);
   const bands = shown ? bandsOf(draft.bands, shown.classKv, shown.frequencyHz) : [];
   return (
     <>
@@ -70,13 +73,11 @@ export function BandsPage() {
               )}
             </Sheet>
           )}
-          {part === 'settings' && (
-            <SettingsSheets draft={draft} edits={edits} inForce={settingsInForce(rules)} />
-          )}
+          {part === 'settings' && <SettingsSheets draft={draft} edits={edits} inForce={settingsNow} />}
           {part === 'calendar' && <CalendarSheet />}
         </div>
         <div>
-          <DraftSheet draft={draft} edits={edits} changed={changed} />
+          <DraftSheet draft={draft} edits={edits} changed={changed} changedSettings={otherChanges} />
           <HistorySheet sets={sets} />
         </div>
       </div>

@@ -15,10 +15,12 @@ interface DraftSheetProps {
   edits: DraftEdits;
   /** Bands that differ from those in force, with everything typed. */
   changed: readonly Band[];
+  /** Other figures that differ, in words. */
+  changedSettings: readonly { place: string; text: string }[];
 }
 
 /** What the draft changes, and the two steps: save it, publish it with a reason. */
-export function DraftSheet({ draft, edits, changed }: DraftSheetProps) {
+export function DraftSheet({ draft, edits, changed, changedSettings }: DraftSheetProps) {
   const [publishing, setPublishing] = useState(false);
   const discard = useDiscardBandDraft();
   return (
@@ -27,15 +29,7 @@ export function DraftSheet({ draft, edits, changed }: DraftSheetProps) {
       aside={edits.unsaved ? 'not saved' : draftState(draft)}
     >
       <div className="sheet-body grid gap-4">
-        {changed.length === 0 ? (
-          <p className="text-control text-ink-soft">No band differs from the ones in force.</p>
-        ) : (
-          <ul aria-label="Bands that differ" className="text-table">
-            {changed.map((band) => (
-              <ChangedBand key={bandKey(band)} band={band} />
-            ))}
-          </ul>
-        )}
+        <WhatDiffers changed={changed} changedSettings={changedSettings} />
         <ProblemNotice error={edits.error ?? discard.error} />
         <div className="grid justify-items-start gap-3">
           <Button
@@ -61,6 +55,24 @@ export function DraftSheet({ draft, edits, changed }: DraftSheetProps) {
       </div>
       {publishing && <PublishDialog draft={draft} onClose={() => setPublishing(false)} />}
     </Sheet>
+  );
+}
+
+function WhatDiffers({ changed, changedSettings }: Pick<DraftSheetProps, 'changed' | 'changedSettings'>) {
+  if (changed.length + changedSettings.length === 0) {
+    return <p className="text-control text-ink-soft">Nothing differs from the rules in force.</p>;
+  }
+  return (
+    <ul aria-label="What differs from the rules in force" className="text-table">
+      {changed.map((band) => (
+        <ChangedBand key={bandKey(band)} band={band} />
+      ))}
+      {changedSettings.map(({ place, text }) => (
+        <li key={place} className="border-t border-rule py-1.5">
+          {text}
+        </li>
+      ))}
+    </ul>
   );
 }
 

@@ -166,3 +166,23 @@ export function settingParts(
   }
   return Object.fromEntries(Object.entries(next).filter(([part]) => touched.has(part)));
 }
+
+/** The figures that differ from those in force, with what was typed over them. */
+export function changedSettings(
+  groups: readonly SettingGroup[],
+  edits: SettingEdits,
+  inForce: ReadonlyMap<string, number>,
+): { place: string; text: string }[] {
+  return groups
+    .flatMap((g) => g.fields)
+    .flatMap((field) => {
+      const now = inForce.get(field.place);
+      const value =
+        edits[field.place] === undefined ? field.value : readSetting(edits[field.place] ?? '', field);
+      if (now === undefined || value === null || value === now) return [];
+      const shown = (v: number) => settingText({ value: v, scale: field.scale });
+      return [
+        { place: field.place, text: `${field.label}: ${shown(value)} ${field.unit}, now ${shown(now)}` },
+      ];
+    });
+}

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { BandDraft } from '#shared/contracts/api.generated';
 import {
+  changedSettings,
   readSetting,
   settingFaults,
   settingGroups,
@@ -45,5 +46,18 @@ describe('figures beside the bands', () => {
     });
     expect(settingParts(DRAFT, {})).toEqual({});
     expect(DRAFT.tolerances['x1']).toEqual({ relative: 0.015, cap: 0.025 });
+  });
+
+  it('say what differs from the rules in force', () => {
+    const inForce = new Map([
+      ['tolerances/x1/relative', 0.015],
+      ['tolerances/x1/cap', 0.02],
+      ['owner/baseMva', 100],
+    ]);
+    const changes = changedSettings(settingGroups(DRAFT), { 'owner/baseMva': '200' }, inForce);
+    expect(changes.map((c) => c.text)).toEqual([
+      'X1, widened to at most: 2.5 %, now 2',
+      'Base of per-unit values: 200 MVA, now 100',
+    ]);
   });
 });
