@@ -1,3 +1,4 @@
+import { conductorResistanceOhmPerKm } from '../../../engine/index';
 import type { ConductorData } from '../../../engine/index';
 import { handbookData } from '../../../library/handbook-data';
 import type { LibraryConductor } from '../../../library/types';
@@ -75,7 +76,10 @@ function couldFit(
     const { r1, x1 } = values;
     if (declared?.x1 === undefined || x1 === undefined || declared.r1 === undefined || r1 === undefined)
       return false;
-    const own = filed.conductor.acResistanceOhmPerKm ?? r1 * filed.bundleCount;
+    const { acResistanceOhmPerKm, temperatureC } = filed.conductor;
+    const own =
+      acResistanceOhmPerKm ??
+      conductorResistanceOhmPerKm(filed.conductor, temperatureC ?? USUAL_C, context.bench.line.frequencyHz);
     const resistance = r1 + (data.acResistanceOhmPerKm - own) / filed.bundleCount;
     return (
       Math.abs((declared.x1 - x1 - shift) / x1) < QUICK_LOOK &&
