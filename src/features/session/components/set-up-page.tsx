@@ -5,6 +5,7 @@ import { ProblemNotice } from '../../../components/feedback/problem-notice';
 import { Button } from '../../../components/ui/button';
 import { FormText } from '../../../components/ui/form-text';
 import { useTexts } from '../../../hooks/use-texts';
+import { ApiProblem } from '../../../lib/api/problem';
 import { faultsByField } from '../../../lib/field-faults';
 import { useFrontDoor } from '../api/get-front-door';
 import { useSetUp } from '../api/set-up';
@@ -13,6 +14,7 @@ import { FrontDoor } from './front-door';
 
 function SetUpForm() {
   const setUp = useSetUp();
+  const tokenIsWrong = setUp.error instanceof ApiProblem && setUp.error.problem === 'gone';
   const form = useTexts(
     { token: '', organisation: '', name: '', email: '', password: '' },
     (t) => ({
@@ -22,7 +24,9 @@ function SetUpForm() {
       email: addressWish(t.email),
       password: passwordWish(t.password),
     }),
-    faultsByField(setUp.error),
+    tokenIsWrong
+      ? { token: 'This token does not hold. Take the one that was printed at the last start.' }
+      : faultsByField(setUp.error),
   );
   const submit = (event: FormEvent) => {
     event.preventDefault();
@@ -30,7 +34,7 @@ function SetUpForm() {
   };
   return (
     <form onSubmit={submit} className="grid gap-4" noValidate>
-      <ProblemNotice error={setUp.error} />
+      {!tokenIsWrong && <ProblemNotice error={setUp.error} />}
       <FormText
         label="Token"
         hint="Printed in the terminal in which the product was started."
