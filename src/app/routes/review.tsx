@@ -100,7 +100,7 @@ function Papers({ number }: { number: string }) {
           <FileList files={items} />
         </div>
       </Sheet>
-      <p className="mt-4 text-table">
+      <p className="no-print mt-4 text-table">
         <Link className="link" to={`/applications/${number}/record`}>
           Record of this application
         </Link>
