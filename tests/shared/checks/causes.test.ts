@@ -107,6 +107,47 @@ describe('causes in the declared values', () => {
   });
 });
 
+describe('slips that are small', () => {
+  const SERIES = 2 * Math.PI * 60 * 2e-4;
+
+  it('the arithmetic mean of 6, 12 and 18 m in place of the geometric one', () => {
+    const uneven = section((one) => (one.positions[1].horizontalM = -3));
+    const values = check(uneven).circuits[0]?.recomputed;
+    for (const key of ['r1', 'x1', 'b1', 'r0', 'x0', 'b0'] as const)
+      uneven.declared[0][key].value = values?.[key];
+    // X = ω·2e-4·ln(spacing ÷ GMR) per km: only the mean spacing changes, by 12 ÷ ∛(6·12·18).
+    const shift = Math.log(12 / Math.cbrt(6 * 12 * 18));
+    uneven.declared[0].x1.value += SERIES * shift;
+    const charge = (2 * Math.PI * 60 * 2 * Math.PI * 1e9) / (4e-7 * Math.PI * 299_792_458 ** 2);
+    uneven.declared[0].b1.value = charge / (charge / uneven.declared[0].b1.value + shift);
+    const [cause] = causesOf(uneven, 'x1');
+    expect(cause?.code).toBe('arithmetic-spacing');
+    expect(cause?.residual).toBeLessThan(1e-4);
+  });
+
+  it('d.c. for a.c. resistance of a conductor so thick that it shows', () => {
+    // Bluebird 84/19 at 50 °C and 60 Hz: 0.03205 Ω/km against 0.02946 Ω/km d.c. (catalogue values).
+    const line = exampleLine((one) => {
+      one.sections[0].conductors.phase = { library: 'Bluebird', temperatureC: 50 };
+      for (const spot of phases(one.sections[0])) {
+        delete spot.bundleCount;
+        delete spot.bundleSpacingM;
+      }
+    });
+    const values = check(line).circuits[0]?.recomputed;
+    for (const key of ['r1', 'x1', 'b1', 'r0', 'x0', 'b0'] as const)
+      line.declared[0][key].value = values?.[key];
+    line.declared[0].r1.value = 0.02628 * (1 + 0.00403 * 30);
+    const [cause] = causesOf(line, 'r1');
+    expect(cause).toMatchObject({ code: 'dc-resistance', explains: ['r1'] });
+  });
+
+  it('below the tolerance is no finding and nobody is asked', () => {
+    const line = declared((entry) => (entry.x1.value += SERIES * Math.log(4 / 3 / Math.cbrt(2))));
+    expect(findings(check(line)).filter(({ grade }) => grade === 'must-answer')).toEqual([]);
+  });
+});
+
 describe('causes in a declared coupling', () => {
   it('all three per mile are one matter at the line', () => {
     const line = doubleLine((one) => {
