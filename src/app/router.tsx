@@ -42,6 +42,7 @@ function toRoute(client: QueryClient, entry: RouteEntry, isOpen = false): RouteO
   return {
     path: entry.path,
     errorElement: <PageError />,
+    hydrateFallbackElement: <SkeletonPage />,
     lazy: async () => {
       const { Component, prefetch } = await entry.lazy();
       const loader = async ({ params, request }: LoaderFunctionArgs) => {
