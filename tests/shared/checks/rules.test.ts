@@ -230,7 +230,7 @@ describe.each(Object.entries(CASES))('%s', (code, { fires, grade, silent }) => {
     expect(found.length).toBeGreaterThan(0);
     expect(found[0]?.grade).toBe(grade);
     expect(ruleOf(code)?.grades.includes(grade) || found[0]?.follows !== undefined).toBe(true);
-    expect(found[0]?.message).toMatch(/\S.*\.$/u);
+    expect(found[0]?.message).toMatch(/^[\p{Lu}\d].*\.$/u);
     expect(found[0]?.where).toMatch(/^\/lines\/0/u);
   });
 

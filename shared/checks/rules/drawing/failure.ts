@@ -1,5 +1,8 @@
-import type { FailureReason } from '../../../engine/types';
+import type { Failure, FailureReason } from '../../../engine/types';
+import type { NormalisedLine } from '../../../filing/types';
+import { listed } from '../../words';
 import type { LineRule } from '../rule';
+import { positionWords } from './places';
 
 /**
  * A rule that passes on why the engine could not compute a line.
@@ -38,9 +41,25 @@ export function failureRule(
           ...(section === undefined ? {} : { section }),
           ...(position === undefined ? {} : { position }),
           where: `${sectionPointer}${positionPart}${fieldPart}`,
-          message: `${failure.detail} ${remedy}`,
+          message: `${asSentence(placed(line, failure))} ${remedy}`,
         },
       ];
     },
   };
+}
+
+/** The engine's words behind the positions that they are about. */
+function placed(line: NormalisedLine, { where, detail }: Failure): string {
+  const section = where.section === undefined ? undefined : line.sections[where.section];
+  if (section?.kind !== 'overhead' || where.position === undefined) return detail;
+  const indices = [where.position, ...(where.other === undefined ? [] : [where.other])].sort((a, b) => a - b);
+  const names = [...new Set(indices)].map((index) => positionWords(section, index));
+  return `${listed(names)}: ${detail.charAt(0).toLowerCase()}${detail.slice(1)}`;
+}
+
+/** Words as a sentence of its own, with true minus signs. */
+function asSentence(words: string): string {
+  const capital = words.charAt(0).toUpperCase() + words.slice(1);
+  const signed = capital.replace(/(^|\s)-(?=\d)/gu, '$1\u2212');
+  return signed.endsWith('.') ? signed : `${signed}.`;
 }

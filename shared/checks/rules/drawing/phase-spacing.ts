@@ -35,7 +35,8 @@ interface Pair {
 
 function weighSection(section: NormalisedOverhead, limits: VoltageDimensions, kv: number): FindingDraft[] {
   const all = pairs(section, null).sort((a, b) => a.spacingM - b.spacingM)[0];
-  if (all === undefined) return [];
+  // Phases at one place have a finding of their own.
+  if (all === undefined || all.spacingM === 0) return [];
   const [low, high] = limits.plainSpacingM;
   const at = withUnit(kv, 'kV');
   if (all.spacingM < low) {
