@@ -41,7 +41,9 @@ export function nextStepSentence(
   draft: Draft | null,
   discrepancies: readonly Discrepancy[],
 ): string {
-  const { state, owner, revision, reviewer, decision } = application;
+  const { state, owner, revision, reviewer, decision, acceptedRevision } = application;
+  // A round that ends without an acceptance leaves the accepted record as it was.
+  const stands = acceptedRevision ? ` Revision ${acceptedRevision} stands as accepted.` : '';
   switch (state) {
     case 'draft':
       return draftSentence(draft);
@@ -54,8 +56,8 @@ export function nextStepSentence(
     case 'accepted':
       return `Revision ${decision?.revision ?? revision ?? ''} is accepted. To change its data later, amend it.`;
     case 'declined':
-      return `${owner.name} declined revision ${decision?.revision ?? revision ?? ''}. The letter says why.`;
+      return `${owner.name} declined revision ${decision?.revision ?? revision ?? ''}. The letter says why.${stands}`;
     case 'withdrawn':
-      return 'You withdrew this application.';
+      return stands === '' ? 'You withdrew this application.' : `You withdrew the amendment.${stands}`;
   }
 }

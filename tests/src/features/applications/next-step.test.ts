@@ -59,6 +59,15 @@ describe('the sentence on what is next', () => {
   it('of a decided one names the revision that it was made on', () => {
     const accepted = anApplication({ state: 'accepted', revision: 'B' });
     expect(nextStepSentence(accepted, null, [])).toMatch(/^Revision B is accepted/);
-    expect(nextStepSentence(anApplication({ state: 'withdrawn' }), null, [])).toMatch(/withdrew/);
+    expect(nextStepSentence(anApplication({ state: 'withdrawn' }), null, [])).toBe(
+      'You withdrew this application.',
+    );
+  });
+
+  it('of an amendment that ended says that the accepted record stands', () => {
+    const withdrawn = anApplication({ state: 'withdrawn', revision: 'C', acceptedRevision: 'B' });
+    expect(nextStepSentence(withdrawn, null, [])).toBe(
+      'You withdrew the amendment. Revision B stands as accepted.',
+    );
   });
 });
