@@ -5,7 +5,12 @@ import type { BalanceEntry, RowFinding } from '../../../components/charts/balanc
 import { BalanceTable } from '../../../components/charts/balance-table';
 import { FindingSays } from '../../../components/charts/finding-says';
 import { GradeTally } from '../../../components/ui/grade-counts';
-import { balanceEntries, parameterName, rowOf } from '../../../components/charts/balance-entries';
+import {
+  BALANCE_ROWS,
+  balanceEntries,
+  parameterName,
+  rowOf,
+} from '../../../components/charts/balance-entries';
 import { arrangeFindings, countStanding } from '../model/arrange-findings';
 import { causeLines, dispositionWords, settledRemark } from '../model/finding-words';
 import { LooseFindings } from './loose-findings';
@@ -21,11 +26,13 @@ interface BalanceSectionProps {
 
 /** The balance rows of one circuit with their findings, and the findings that belong to no row. */
 export function BalanceSection({ line, circuit, findingActions }: BalanceSectionProps) {
-  const arranged = arrangeFindings(line.findings, circuit, rowOf);
+  const arranged = arrangeFindings(line.findings, circuit, rowOf, BALANCE_ROWS);
   const values = line.values.filter((v) => v.circuit === circuit);
   const entries = balanceEntries(
     values.map((v) => ({ ...v, range: v.low === null || v.high === null ? null : [v.low, v.high] })),
-  ).map((entry) => withFindings(entry, arranged.rows.get(entry.key) ?? [], findingActions));
+  ).map((entry) =>
+    withFindings(entry, arranged.rows.get(entry.key) ?? [], arranged.carriers, findingActions),
+  );
   const own = line.findings.filter((f) => f.circuit === null || f.circuit === circuit);
   const followers = values.filter((v) => v.follows !== null && rowOf(v.parameter) === v.parameter);
   const inBalance = entries.filter((e) => e.grade === 'in-balance').length;
@@ -43,7 +50,7 @@ export function BalanceSection({ line, circuit, findingActions }: BalanceSection
           entries={entries}
         />
       )}
-      <LooseFindings findings={arranged.loose} actions={findingActions} />
+      <LooseFindings findings={arranged.loose} carriers={arranged.carriers} actions={findingActions} />
     </div>
   );
 }
@@ -62,6 +69,7 @@ function followWords(parameters: readonly string[]): string | undefined {
 function withFindings(
   entry: BalanceEntry,
   findings: readonly Finding[],
+  carriers: ReadonlySet<Finding>,
   actions: FindingActions | undefined,
 ): BalanceEntry {
   const counted = findings.filter((f) => f.follows === null);
@@ -70,18 +78,18 @@ function withFindings(
     ...entry,
     settled: remark !== undefined,
     remark: remark ?? entry.remark,
-    findings: findings.map((finding) => rowFinding(finding, actions)),
+    findings: findings.map((finding) => rowFinding(finding, carriers.has(finding), actions)),
   };
 }
 
-function rowFinding(finding: Finding, actions: FindingActions | undefined): RowFinding {
+function rowFinding(finding: Finding, carries: boolean, actions: FindingActions | undefined): RowFinding {
   const done = dispositionWords(finding);
   return {
     key: finding.fingerprint,
     grade: finding.grade,
     settled: !finding.stands,
     says: <FindingSays message={finding.message} />,
-    causes: [...causeLines(finding), ...(done ? [done] : [])],
+    causes: [...causeLines(finding, carries), ...(done ? [done] : [])],
     acts: actions?.(finding),
   };
 }

@@ -16,11 +16,12 @@ interface CouplingSectionProps {
   line: RevisionLine;
   filed: FiledLine;
   findings: readonly Finding[];
+  carriers: ReadonlySet<Finding>;
   findingActions?: FindingActions;
 }
 
 /** What two circuits on one structure do to each other in zero sequence: declared beside recomputed. */
-export function CouplingSection({ line, filed, findings, findingActions }: CouplingSectionProps) {
+export function CouplingSection({ line, filed, findings, carriers, findingActions }: CouplingSectionProps) {
   if (line.mutual.length === 0 && findings.length === 0) return null;
   return (
     <SheetSection id="coupling" title="Coupling of the circuits" aside="Zero sequence, per kilometre">
@@ -62,7 +63,7 @@ export function CouplingSection({ line, filed, findings, findingActions }: Coupl
           </Table>
         );
       })}
-      <LooseFindings findings={findings} actions={findingActions} />
+      <LooseFindings findings={findings} carriers={carriers} actions={findingActions} />
     </SheetSection>
   );
 }

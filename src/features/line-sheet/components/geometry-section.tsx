@@ -15,11 +15,12 @@ interface GeometrySectionProps {
   line: RevisionLine;
   filed: FiledLine;
   findings: readonly Finding[];
+  carriers: ReadonlySet<Finding>;
   findingActions?: FindingActions;
 }
 
 /** The structure as filed: drawn to scale, its positions, conductors and earth; one section at a time. */
-export function GeometrySection({ line, filed, findings, findingActions }: GeometrySectionProps) {
+export function GeometrySection({ line, filed, findings, carriers, findingActions }: GeometrySectionProps) {
   const [shown, setShown] = useState('0');
   const { sections } = filed.filed;
   const index = Number(shown);
@@ -45,7 +46,7 @@ export function GeometrySection({ line, filed, findings, findingActions }: Geome
         </div>
       )}
       {section && <SectionGeometry key={shown} line={line} section={section} findings={own} />}
-      <LooseFindings findings={findings} actions={findingActions} />
+      <LooseFindings findings={findings} carriers={carriers} actions={findingActions} />
     </SheetSection>
   );
 }

@@ -3,7 +3,7 @@ import { useSearchParams } from 'react-router-dom';
 import type { RevisionLine } from '#shared/contracts/api.generated';
 import { Notice } from '../../../components/feedback/notice';
 import { SegmentChoice } from '../../../components/ui/segment';
-import { rowOf } from '../../../components/charts/balance-entries';
+import { BALANCE_ROWS, rowOf } from '../../../components/charts/balance-entries';
 import { useRevisionLine } from '../../../lib/queries/get-revision-line';
 import { arrangeFindings } from '../model/arrange-findings';
 import { overheadOf, readFiledLine, type FiledLine } from '../model/filed-line';
@@ -31,7 +31,7 @@ export function LineSheet({ applicationNumber, letter, lineKey, findingActions }
   const titleId = useId();
   const circuits = filed.normalised.circuits.map((c) => c.circuit);
   const [circuit, setCircuit] = useCircuit(circuits);
-  const arranged = arrangeFindings(line.findings, circuit, rowOf);
+  const arranged = arrangeFindings(line.findings, circuit, rowOf, BALANCE_ROWS);
   return (
     <article className="sheet sheet-main" aria-labelledby={titleId}>
       <LineHead line={line} filed={filed} titleId={titleId} jumps={jumpsOf(line, filed)} />
@@ -55,12 +55,14 @@ export function LineSheet({ applicationNumber, letter, lineKey, findingActions }
         line={line}
         filed={filed}
         findings={arranged.coupling}
+        carriers={arranged.carriers}
         findingActions={findingActions}
       />
       <GeometrySection
         line={line}
         filed={filed}
         findings={arranged.drawing}
+        carriers={arranged.carriers}
         findingActions={findingActions}
       />
       <WholeLineSection line={line} circuit={circuit} />

@@ -7,9 +7,12 @@ import type { FindingActions } from './balance-section';
 /** Findings that stand in no row: of the drawing, of a section, of the whole line. */
 export function LooseFindings({
   findings,
+  carriers,
   actions,
 }: {
   findings: readonly Finding[];
+  /** Those of them that carry their group's cause. */
+  carriers: ReadonlySet<Finding>;
   actions?: FindingActions;
 }) {
   return findings.map((finding) => {
@@ -23,7 +26,7 @@ export function LooseFindings({
         says={<FindingSays message={finding.message} />}
         acts={actions?.(finding)}
       >
-        {[...causeLines(finding), ...(done ? [done] : [])].map((line) => (
+        {[...causeLines(finding, carriers.has(finding)), ...(done ? [done] : [])].map((line) => (
           <CauseLine key={line} grade={grade}>
             {line}
           </CauseLine>

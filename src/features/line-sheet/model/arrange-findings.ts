@@ -11,9 +11,25 @@ export interface ArrangedFindings {
   drawing: readonly Finding[];
   /** All others: under the rows. */
   loose: readonly Finding[];
+  /** Findings that carry the cause of their group on this sheet; the others of the group say "Same cause." */
+  carriers: ReadonlySet<Finding>;
 }
 
 const COUPLING = new Set(['r0m', 'x0m', 'b0m']);
+
+/** The first of each group that has causes, in the order in which the sheet shows them. */
+function carriersOf(shown: readonly Finding[]): Set<Finding> {
+  const groups = new Set<number>();
+  return new Set(
+    shown.filter((f) => {
+      if (f.causes.length === 0 || f.follows !== null) return false;
+      if (f.group === null) return true;
+      if (groups.has(f.group)) return false;
+      groups.add(f.group);
+      return true;
+    }),
+  );
+}
 
 const byGrade = (a: Finding, b: Finding) =>
   Number(b.first) - Number(a.first) || GRADES.indexOf(a.grade) - GRADES.indexOf(b.grade);
@@ -26,6 +42,7 @@ export function arrangeFindings(
   findings: readonly Finding[],
   circuit: number,
   rowOf: (parameter: string) => string | null,
+  rowOrder: readonly string[],
 ): ArrangedFindings {
   const own = findings.filter((f) => f.circuit === null || f.circuit === circuit);
   const rows = new Map<string, Finding[]>();
@@ -37,12 +54,12 @@ export function arrangeFindings(
   }
   for (const group of rows.values()) group.sort(byGrade);
   const isCoupling = (f: Finding) => f.parameter !== null && COUPLING.has(f.parameter);
-  return {
-    rows,
-    coupling: rest.filter(isCoupling),
-    drawing: rest.filter((f) => f.family === 'drawing').sort(byGrade),
-    loose: rest.filter((f) => f.family !== 'drawing' && !isCoupling(f)).sort(byGrade),
-  };
+  const coupling = rest.filter(isCoupling);
+  const drawing = rest.filter((f) => f.family === 'drawing').sort(byGrade);
+  const loose = rest.filter((f) => f.family !== 'drawing' && !isCoupling(f)).sort(byGrade);
+  const inRows = rowOrder.flatMap((row) => rows.get(row) ?? []);
+  const carriers = carriersOf([...inRows, ...loose, ...coupling, ...drawing]);
+  return { rows, coupling, drawing, loose, carriers };
 }
 
 /** Findings that still ask for something, by grade; what follows from another value is not counted again. */

@@ -22,15 +22,13 @@ function alsoExplains(cause: Cause, parameter: string | null): string {
  * The lines behind a finding's elbow. One matter stands once: the first of a group carries its causes, the others
  * say so. (Where no slip fits, the finding's own message says it.)
  */
-export function causeLines(finding: Finding): string[] {
+export function causeLines(finding: Finding, carries: boolean): string[] {
   if (finding.follows !== null) {
     return [finding.follows === finding.parameter ? 'Same cause.' : `Follows ${nameOf(finding.follows)}.`];
   }
-  if (finding.causes.length > 0) {
-    return finding.causes.map((cause) => `${cause.sentence}${alsoExplains(cause, finding.parameter)}`);
-  }
-  if (!finding.first && finding.group !== null) return ['Same cause.'];
-  return [];
+  if (finding.causes.length === 0) return !finding.first && finding.group !== null ? ['Same cause.'] : [];
+  if (!carries) return ['Same cause.'];
+  return finding.causes.map((cause) => `${cause.sentence}${alsoExplains(cause, finding.parameter)}`);
 }
 
 const KIND_WORDS = { settled: 'Settled', waived: 'Waived', 'set-aside': 'Set aside' } as const;

@@ -33,17 +33,17 @@ const finding = (over: Partial<Finding>): Finding =>
 
 describe('what a finding says', () => {
   it('names its causes, and what else they explain', () => {
-    expect(causeLines(finding({ causes: [PER_MILE] }))).toEqual([
+    expect(causeLines(finding({ causes: [PER_MILE] }), true)).toEqual([
       'Fits within 0.1 % if the value is per mile. It also explains R1.',
     ]);
   });
 
   it('says that another carries the cause, that it follows, or nothing', () => {
-    expect(causeLines(finding({ first: false }))).toEqual(['Same cause.']);
-    expect(causeLines(finding({ follows: 'x1' }))).toEqual(['Same cause.']);
-    expect(causeLines(finding({ parameter: 'waveSpeed', follows: 'x1' }))).toEqual(['Follows X1.']);
-    expect(causeLines(finding({}))).toEqual([]);
-    expect(causeLines(finding({ family: 'typical', grade: 'explain' }))).toEqual([]);
+    expect(causeLines(finding({ causes: [PER_MILE], first: false }), false)).toEqual(['Same cause.']);
+    expect(causeLines(finding({ follows: 'x1' }), false)).toEqual(['Same cause.']);
+    expect(causeLines(finding({ parameter: 'waveSpeed', follows: 'x1' }), false)).toEqual(['Follows X1.']);
+    expect(causeLines(finding({}), true)).toEqual([]);
+    expect(causeLines(finding({ family: 'typical', grade: 'explain' }), false)).toEqual([]);
   });
 
   it('says what became of it', () => {
