@@ -19,7 +19,9 @@ export function connectionWords({ capacityMw, pointOfConnection }: Place): strin
 
 /** What is to be said behind a title: nothing where the title names the place itself. */
 export const besideTitle = (application: Titled): string | undefined =>
-  application.title.includes(application.pointOfConnection) ? undefined : connectionWords(application);
+  application.title.includes(`at ${application.pointOfConnection}`)
+    ? undefined
+    : connectionWords(application);
 
 /** "5, together 153.9 km". */
 export function linesWords(lineCount: number, totalLengthKm: number): string {

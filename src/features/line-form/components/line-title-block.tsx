@@ -23,7 +23,7 @@ export function LineTitleBlock({ application, lineKey, count, form }: LineTitleB
     capacityMw === null
       ? `at ${pointOfConnection}`
       : `${plainQuantity(capacityMw, 'MW')} at ${pointOfConnection}`;
-  const connection = application.title.includes(pointOfConnection) ? undefined : place;
+  const connection = application.title.includes(`at ${pointOfConnection}`) ? undefined : place;
   return (
     <TitleBlock
       label="Title block"

@@ -47,6 +47,7 @@ describe('words beside an application', () => {
   it('name the place where the title does not', () => {
     expect(plain(besideTitle(anApplication()))).toBe('480 MW at Sarn');
     expect(besideTitle(anApplication({ title: 'Wind at Sarn' }))).toBeUndefined();
+    expect(plain(besideTitle(anApplication({ title: 'Sarn Wind' })))).toBe('480 MW at Sarn');
     expect(besideTitle(anApplication({ capacityMw: null }))).toBe('at Sarn');
   });
 
