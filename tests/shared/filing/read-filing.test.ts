@@ -199,6 +199,33 @@ describe('figures of a declared value', () => {
   });
 });
 
+describe('measures', () => {
+  it('takes a whole structure in centimetres: the check names that slip, the schema does not stop it', () => {
+    const { line } = onlyLine(
+      changed((l) => {
+        for (const p of l['sections'][0].positions) {
+          for (const field of ['horizontalM', 'attachmentHeightM', 'sagM', 'bundleSpacingM'])
+            if (p[field] !== undefined) p[field] *= 100;
+        }
+        l['sections'][0].positions[0].horizontalM = -1850;
+      }),
+    );
+    const [section] = line.engineInput?.sections ?? [];
+    expect(section?.kind === 'overhead' && section.positions[0]?.horizontalM).toBe(-1850);
+  });
+
+  it('refuses a structure wider or higher than any mistaken unit makes it', () => {
+    const faults = faultsOf(
+      changed((l) => {
+        l['sections'][0].positions[0].horizontalM = -10001;
+        l['sections'][0].positions[1].attachmentHeightM = 10001;
+      }),
+    );
+    expect(faults).toHaveLength(2);
+    expect(faults[0]).toMatch(/positions\/0\/horizontalM: Offset must be at least −10.000.m/u);
+  });
+});
+
 describe('sections', () => {
   it('may come without conductors and positions, together', () => {
     const { line } = onlyLine(
