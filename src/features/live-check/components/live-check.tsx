@@ -24,7 +24,7 @@ function rowFindings(circuit: CircuitReport, { report, onPut }: PartProps): Map<
   sortFindings(circuit).inRows.forEach((finding, i) => {
     const row = rowOf(finding.parameter) ?? '';
     const shared = sharesCause(finding, report);
-    const own = finding.causes.map((cause) => cause.sentence);
+    const own = shared ? [] : finding.causes.map((cause) => cause.sentence);
     rows.set(row, [
       ...(rows.get(row) ?? []),
       {
@@ -32,7 +32,7 @@ function rowFindings(circuit: CircuitReport, { report, onPut }: PartProps): Map<
         grade: finding.grade,
         says: <FindingSays message={shared ? `${finding.message} Same cause.` : finding.message} />,
         causes: own,
-        acts: <PutButton finding={finding} onPut={onPut} />,
+        acts: !shared && <PutButton finding={finding} onPut={onPut} />,
       },
     ]);
   });
@@ -62,24 +62,24 @@ function CircuitBalance({ circuit, ...part }: PartProps & { circuit: CircuitRepo
 }
 
 function LooseFindings({ findings, report, onPut }: PartProps & { findings: CircuitReport['findings'] }) {
-  return findings.map((finding, i) => (
-    <LooseFinding
-      key={`${finding.code}-${i}`}
-      grade={finding.grade}
-      says={
-        <FindingSays
-          message={sharesCause(finding, report) ? `${finding.message} Same cause.` : finding.message}
-        />
-      }
-      acts={<PutButton finding={finding} onPut={onPut} />}
-    >
-      {finding.causes.map((cause, c) => (
-        <CauseLine key={c} grade={finding.grade}>
-          {cause.sentence}
-        </CauseLine>
-      ))}
-    </LooseFinding>
-  ));
+  return findings.map((finding, i) => {
+    const shared = sharesCause(finding, report);
+    return (
+      <LooseFinding
+        key={`${finding.code}-${i}`}
+        grade={finding.grade}
+        says={<FindingSays message={shared ? `${finding.message} Same cause.` : finding.message} />}
+        acts={!shared && <PutButton finding={finding} onPut={onPut} />}
+      >
+        {!shared &&
+          finding.causes.map((cause, c) => (
+            <CauseLine key={c} grade={finding.grade}>
+              {cause.sentence}
+            </CauseLine>
+          ))}
+      </LooseFinding>
+    );
+  });
 }
 
 function Waiting({ count }: { count: number }) {

@@ -1,6 +1,6 @@
 import type { CircuitReport, Finding, LineReport } from '#shared/checks/types';
 import type { GradeCounts } from '../../../components/ui/grades';
-import { balanceEntries, rowOf } from '../../../components/charts/balance-entries';
+import { balanceEntries, balanceOrder, rowOf } from '../../../components/charts/balance-entries';
 import type { BalanceEntry } from '../../../components/charts/balance-entry';
 
 /** Every finding of a line, those of its circuits first. */
@@ -23,10 +23,21 @@ export function sortFindings(circuit: CircuitReport): { inRows: Finding[]; loose
   return { inRows: own.filter(hasRow), loose: own.filter((f) => !hasRow(f)) };
 }
 
-/** Whether a finding's group shows its causes at another finding. */
+/** Where a finding stands on the page: its row, or after all rows. */
+const placeOf = (finding: Finding): number => balanceOrder(rowOf(finding.parameter) ?? '');
+
+/** The finding of a group that shows its causes: the uppermost one that has any. */
+function carrierOf(group: number, report: LineReport): Finding | undefined {
+  const withCauses = allFindings(report).filter(
+    (f) => f.group === group && f.causes.length > 0 && !f.follows,
+  );
+  return withCauses.sort((x, y) => placeOf(x) - placeOf(y))[0];
+}
+
+/** Whether a finding's causes are shown at another finding of its group. */
 export function sharesCause(finding: Finding, report: LineReport): boolean {
-  if (finding.causes.length > 0) return false;
-  return allFindings(report).some((f) => f.group === finding.group && f.causes.length > 0);
+  const carrier = carrierOf(finding.group, report);
+  return carrier !== undefined && carrier !== finding;
 }
 
 /** The circuit's rows as the balance shows them. */

@@ -118,6 +118,17 @@ describe('the live check of a line', () => {
     ).toBe(true);
   });
 
+  it('shows one cause once, at the uppermost of the findings that it explains', () => {
+    // X1 and B1 for 50 Hz on a line of 60 Hz: one slip, two findings of one group.
+    const report = reportOf(check({ x1: 0.3812 * (50 / 60), b1: 4.347 * (50 / 60) }));
+    const findings = report.circuits[0]?.findings ?? [];
+    const [x1, b1] = ['geometry.x1', 'geometry.b1'].map((code) => findings.find((f) => f.code === code));
+    if (!x1 || !b1) throw new Error('both are out of tolerance');
+    expect(x1.group).toBe(b1.group);
+    expect(x1.causes[0]?.code).toBe('frequency');
+    expect([x1, b1].map((f) => sharesCause(f, report))).toEqual([false, true]);
+  });
+
   it('says at which field a fault sits, with pointers within the line', () => {
     const outcome = check({ lengthKm: 'long' });
     expect(blockersOf(outcome)).toMatchObject([
