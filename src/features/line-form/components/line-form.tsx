@@ -62,7 +62,8 @@ export function LineForm({ editor, notes, view, backTo, clearanceM, badPositions
       <div className="form-columns">
         <form
           noValidate
-          className="min-w-0"
+          // What takes the focus is never left behind the count at the foot of a phone.
+          className="min-w-0 [&_input]:scroll-mb-16 [&_select]:scroll-mb-16"
           onSubmit={(event) => {
             event.preventDefault();
             void saveLine();
