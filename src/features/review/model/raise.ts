@@ -18,9 +18,13 @@ const joined = (words: readonly string[]) =>
 
 const firstSentence = (message: string) => `${message.split(/: |\. /)[0]?.replace(/\.$/, '') ?? message}.`;
 
+/** What a finding is about: its own value, and the others that its likeliest cause explains with it. */
+const aboutOf = ({ parameter, causes }: Finding): string[] =>
+  parameter === null ? [] : [parameter, ...(causes[0]?.explains ?? [])];
+
 /** "X1 of L1", "X1 and B1 of L1 and L3"; for findings without a parameter the place alone. */
 function titleOf(findings: readonly Finding[], nameOf: (parameter: string) => string): string {
-  const names = unique(findings.flatMap((f) => (f.parameter === null ? [] : [nameOf(f.parameter)])));
+  const names = unique(findings.flatMap(aboutOf).map(nameOf));
   const lines = joined(unique(findings.map((f) => f.lineKey)));
   return (names.length > 0 ? `${joined(names)} of ${lines}` : `Drawing of ${lines}`).slice(0, MOST_TITLE);
 }

@@ -18,7 +18,10 @@ const finding = (over: Partial<Finding>) =>
     ...over,
   }) as Finding;
 
-const cause = { sentence: 'Fits within 0.1 % if the value is per mile.' } as Finding['causes'][number];
+const cause = {
+  sentence: 'Fits within 0.1 % if the value is per mile.',
+  explains: ['x1'],
+} as Finding['causes'][number];
 
 describe('a discrepancy from findings', () => {
   it('is named after the values and the line, and begins with what is found and its cause', () => {
@@ -49,6 +52,13 @@ describe('a discrepancy from findings', () => {
     expect(draft.question).not.toContain('Too slow');
     expect(draft.question.match(/per mile/g)).toHaveLength(1);
     expect(draft.fingerprints).toEqual(['f1', 'f2', 'f3']);
+  });
+
+  it('names every value that one matter explains', () => {
+    const wide = { ...cause, explains: ['r1', 'x1', 'b1'] };
+    expect(draftFrom([finding({ parameter: 'r1', causes: [wide] })], nameOf).title).toBe(
+      'R1, X1 and B1 of L1',
+    );
   });
 
   it('asks for a sentence only where nothing must be answered', () => {
