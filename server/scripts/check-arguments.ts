@@ -54,7 +54,7 @@ export function readArguments(words: readonly string[]): ReadArguments {
     if (word === '--json') result.isJson = true;
     else if (word === '--matrices') result.wantsMatrices = true;
     else if (isWithValue(name)) {
-      const value = joined.length > 0 ? joined.join('=') : left.shift();
+      const value = joined.length > 0 ? joined.join('=') : valueBehind(left);
       if (value === undefined) wrong(name, 'a value behind it');
       else takeValue(result, name, value, wrong);
     } else if (word.startsWith('--') || (word.startsWith('-') && word !== '-')) {
@@ -66,6 +66,11 @@ export function readArguments(words: readonly string[]): ReadArguments {
   return faults.length > 0
     ? { kind: 'wrong', isJson: result.isJson, faults }
     : { kind: 'check', arguments: result };
+}
+
+/** The word behind an option, taken off the list; an option is no value of another one. */
+function valueBehind(left: string[]): string | undefined {
+  return left[0]?.startsWith('--') === true ? undefined : left.shift();
 }
 
 function isWithValue(name: string): name is WithValue {

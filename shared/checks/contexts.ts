@@ -76,11 +76,25 @@ export function pairContext(
       weighings[parameter] = weigh(value, reference, rules.tolerances[parameter]);
     }
   }
-  const selves = mutual.circuits.map(
-    (number): Partial<Record<LineParameter, number>> =>
-      circuits.find(({ circuit }) => circuit.circuit === number)?.declared ?? {},
+  const selves = mutual.circuits.map((number) =>
+    perLengthValues(circuits.find(({ circuit }) => circuit.circuit === number)),
   );
   return { lineContext: context, mutual, selves, weighings };
+}
+
+/**
+ * Declared values as values per length: an equivalent pi, whose resistance falls short of length × per-length value by
+ * several per cent on a long line, is no measure for a coupling per length.
+ */
+function perLengthValues(context: CircuitContext | undefined): Partial<Record<LineParameter, number>> {
+  const values: Partial<Record<LineParameter, number>> = { ...context?.declared };
+  for (const parameter of LINE_PARAMETERS) {
+    const weighing = context?.weighings[parameter];
+    const perKm = context?.constants?.[parameter];
+    if (weighing?.form !== 'equivalent-pi' || perKm === undefined || weighing.recomputed === 0) continue;
+    values[parameter] = weighing.declared.perKm * (perKm / weighing.recomputed);
+  }
+  return values;
 }
 
 function isSamePair(one: readonly number[], other: readonly number[]): boolean {

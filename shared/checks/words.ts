@@ -14,7 +14,7 @@ const GROUP = '\u202f';
  * @example figure(0.38119, 3) // "0.381"
  */
 export function figure(value: number, digits = 3): string {
-  if (!Number.isFinite(value)) return 'not a number';
+  if (!Number.isFinite(value)) return value === Infinity ? 'beyond measure' : 'not a number';
   const rounded = Number(value.toPrecision(digits));
   const size = Math.abs(rounded);
   const text =

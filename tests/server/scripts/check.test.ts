@@ -168,6 +168,14 @@ describe('the command line', () => {
     ]);
   });
 
+  it('takes no option for the value of another one', () => {
+    expect(readArguments(['a', '--frequencies', '--json'])).toMatchObject({
+      kind: 'wrong',
+      isJson: true,
+      faults: [{ value: '--frequencies', expected: 'a value behind it' }],
+    });
+  });
+
   it('wants a file', () => {
     expect(readArguments(['--json'])).toMatchObject({ kind: 'wrong', isJson: true });
     expect(readArguments(['--help'])).toEqual({ kind: 'help' });

@@ -9,6 +9,9 @@ import { ENGINE_MODEL, changePhases, overheadSections, sectionPointer } from './
 /** Sides of bundles that are built, m. */
 const BUILT_SIDES_M = [0.2, 0.25, 0.3, 0.3048, 0.35, 0.375, 0.4, 0.45, 0.4572, 0.5, 0.55, 0.6] as const;
 
+/** Subconductors of bundles that are built. */
+const BUILT_COUNTS = [2, 3, 4, 6] as const;
+
 /** Ways in which a side is mistaken for another length: half, diagonal, inches. */
 const SIDE_FACTORS = [0.5, 2, Math.SQRT2, Math.SQRT1_2, 0.0254] as const;
 
@@ -101,7 +104,7 @@ function countSlips(context: VariantContext, filed: Filed): Variant[] {
 }
 
 function bundleForSingle(context: VariantContext, filed: Filed): Variant[] {
-  return [2, 3, 4].flatMap((bundleCount) =>
+  return BUILT_COUNTS.flatMap((bundleCount) =>
     BUILT_SIDES_M.flatMap((side): Variant[] => {
       if (!couldFit(context, lnBundleGmr(filed, bundleCount, side) - lnBundleGmr(filed, 1, 0))) return [];
       const outcome = solve(context, filed, bundleCount, side);
@@ -113,7 +116,7 @@ function bundleForSingle(context: VariantContext, filed: Filed): Variant[] {
           ...COMMON,
           code: 'bundle-count',
           outcome,
-          prior: -1 - Math.log(3 * BUILT_SIDES_M.length),
+          prior: -1 - Math.log(BUILT_COUNTS.length * BUILT_SIDES_M.length),
           freedom: 0,
           where: filed.where,
           corrected: { bundleCount, bundleSpacingM: side },
@@ -162,16 +165,21 @@ function sideSlips(context: VariantContext, filed: Filed): Variant[] {
   ];
 }
 
-/** Ratios that are feet or centimetres taken as metres: slips with codes of their own. */
+/** A ratio that is centimetres taken as metres: no side is mistaken by so much. */
 function isOtherUnit(ratio: number): boolean {
-  return [0.01, 0.3048].some((unit) => Math.abs(ratio / unit - 1) < 0.05);
+  return Math.abs(ratio / 0.01 - 1) < 0.05;
+}
+
+/** Log price of a ratio that is feet taken as metres: it stands behind the slip with that code. */
+function feetPrice(ratio: number): number {
+  return Math.abs(ratio / 0.3048 - 1) < 0.05 ? -4 : 0;
 }
 
 /** Log price of taking a side for another: a side as built is rarely wrong, odd or mixed ones rarely right. */
 function likelihood(side: number, { sideM, isMixed }: Filed): number {
   const isBuilt = (metres: number): boolean => metres >= 0.28 && metres <= 0.62;
   const ofFiled = isMixed ? 2 : isBuilt(sideM) ? -1.5 : 0.7;
-  return ofFiled + (isBuilt(side) ? 0 : -2);
+  return ofFiled + (isBuilt(side) ? 0 : -2) + (isMixed ? 0 : feetPrice(side / sideM));
 }
 
 /** Room that the quick look leaves beside the tight tolerance. */
@@ -195,12 +203,15 @@ function lnShift({ bundleCount, sideM }: Filed, side: number): number {
   return ((bundleCount - 1) / bundleCount) * Math.log(side / sideM);
 }
 
-/** ln(GMR) of a bundle of up to four, in ln m. */
+/** ln of the product of the distances from one subconductor to the others, in sides: square and hexagon. */
+const LN_DISTANCES: Readonly<Record<number, number>> = { 4: Math.log(2) / 2, 6: Math.log(6) };
+
+/** ln(GMR) of a bundle as built, in ln m. */
 function lnBundleGmr({ position }: Filed, bundleCount: number, side: number): number {
   const lnOne = Math.log(gmrOf(position.conductor) / 1000);
   if (bundleCount === 1) return lnOne;
-  const lnDiagonal = bundleCount === 4 ? Math.log(2) / 2 : 0;
-  return (lnOne + (bundleCount - 1) * Math.log(side) + lnDiagonal) / bundleCount;
+  const lnDistances = LN_DISTANCES[bundleCount] ?? 0;
+  return (lnOne + (bundleCount - 1) * Math.log(side) + lnDistances) / bundleCount;
 }
 
 /** The side that the declared X1 itself would need. */

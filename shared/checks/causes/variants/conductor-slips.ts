@@ -142,9 +142,7 @@ export function resistanceSlips({ bench }: VariantContext): Variant[] {
         recipe,
         bench.changed((section, index) => {
           const other = change(section, index);
-          return other === null || other.positions.every(({ kind }) => kind === 'phase')
-            ? null
-            : alone(other);
+          return other === null ? null : alone(other);
         }),
         -0.7,
       ),

@@ -1,4 +1,4 @@
-import { withUnit } from '../../words';
+import { figure, withUnit } from '../../words';
 import type { Outcome } from '../bench';
 import { fitOne, gridOf } from './fit-one';
 import type { Variant, VariantContext } from './variant';
@@ -11,6 +11,9 @@ const ASSUMED_OHM_M = [
 
 /** What a fitted resistivity may be, Ω·m. */
 const FITTED_OHM_M = [0.5, 1e5] as const;
+
+/** What a fitted multiple of every section’s resistivity may be. */
+const FITTED_FACTORS = [0.02, 50] as const;
 
 /**
  * Another earth resistivity: each that people assume, and the one that the declared X0 (or R0) itself would need.
@@ -28,14 +31,32 @@ export function earthSlips(context: VariantContext, violated: ReadonlySet<string
     const common = { code: 'earth-resistivity', in: 'declared', model: ENGINE_MODEL } as const;
     return outcome === null ? [] : [{ ...common, outcome, prior, freedom, words }];
   };
-  const fitted = fittedTo(context, solve);
+  const fitted = fittedTo(context, solve, FITTED_OHM_M);
   const assumed = ASSUMED_OHM_M.filter((ohmM) => !(filed.size === 1 && filed.has(ohmM)));
   return [
+    ...(filed.size > 1 ? commonFactor(context) : []),
     ...assumed
       .filter((ohmM) => couldFit(ohmM, fitted))
       .flatMap((ohmM) => make(ohmM, 0, -0.5 - Math.log(assumed.length))),
     ...(fitted ?? []).flatMap((ohmM) => make(ohmM, 1, -2)),
   ];
+}
+
+/** Sections of different earth, each taken as the same multiple of what it is filed with. */
+function commonFactor(context: VariantContext): Variant[] {
+  const solve = (factor: number): Outcome | null =>
+    context.bench.changed((section) => ({
+      ...section,
+      earthResistivityOhmM: section.earthResistivityOhmM * factor,
+    }));
+  const common = { code: 'earth-resistivity', in: 'declared', model: ENGINE_MODEL } as const;
+  const roots = fittedTo(context, solve, FITTED_FACTORS) ?? [];
+  return roots.flatMap((factor): Variant[] => {
+    const outcome = solve(factor);
+    const words = (): string =>
+      `every section’s earth resistivity was taken as ${figure(factor)} times as much`;
+    return outcome === null ? [] : [{ ...common, outcome, prior: -2.5, freedom: 1, words }];
+  });
 }
 
 /** A resistivity this far (in ln ρ) from what X0 needs is more than the tight tolerance away from it. */
@@ -45,8 +66,12 @@ function couldFit(ohmM: number, fitted: readonly number[] | null): boolean {
   return fitted === null || fitted.some((root) => Math.abs(Math.log(ohmM / root)) < NEAR);
 }
 
-/** The resistivities that the declared X0 of each circuit needs; null when none is declared. */
-function fittedTo(context: VariantContext, solve: (ohmM: number) => Outcome | null): number[] | null {
+/** The resistivities (or multiples) that the declared X0 of each circuit needs; null when none is declared. */
+function fittedTo(
+  context: VariantContext,
+  solve: (ohmM: number) => Outcome | null,
+  [low, high]: readonly [number, number],
+): number[] | null {
   if (context.declared.every((declared) => declared?.x0 === undefined)) return null;
   return context.declared.flatMap((declared, circuit) => {
     const wanted = declared?.x0;
@@ -56,7 +81,7 @@ function fittedTo(context: VariantContext, solve: (ohmM: number) => Outcome | nu
         const value = solve(ohmM)?.circuits[circuit]?.x0;
         return value === undefined ? null : value / wanted - 1;
       },
-      gridOf(FITTED_OHM_M[0], FITTED_OHM_M[1], 5, true),
+      gridOf(low, high, 5, true),
       7,
     );
   });

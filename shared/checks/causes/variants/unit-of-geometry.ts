@@ -111,7 +111,9 @@ function entries(section: OverheadSection, fields: readonly Field[], factor: num
 
 const DIMENSION_SETS: readonly { dimensions: readonly Dimension[]; words: string }[] = [
   { dimensions: ['diameterMm', 'gmrMm', 'coreDiameterMm'], words: 'diameter and GMR' },
+  { dimensions: ['diameterMm', 'gmrMm'], words: 'diameter and GMR' },
   { dimensions: ['diameterMm', 'coreDiameterMm'], words: 'the diameter' },
+  { dimensions: ['diameterMm'], words: 'the diameter' },
   { dimensions: ['gmrMm'], words: 'the GMR' },
 ];
 
@@ -135,7 +137,7 @@ export function inchSlips(context: VariantContext): Variant[] {
           ...place,
           outcome,
           prior: -1 - Math.log(3),
-          words: `${words} of the ${kind.length === 2 ? 'conductors' : kind[0] === 'phase' ? 'phase conductor' : 'ground wire'} ${dimensions.length === 3 ? 'are' : 'is'} in inches`,
+          words: `${words} of the ${kind.length === 2 ? 'conductors' : kind[0] === 'phase' ? 'phase conductor' : 'ground wire'} ${dimensions.includes('gmrMm') && dimensions.length > 1 ? 'are' : 'is'} in inches`,
         },
       ];
     }),
@@ -151,6 +153,7 @@ function inInches(
   const positions = section.positions.map((position): Position => {
     if (!kinds.includes(position.kind)) return position;
     const conductor: ConductorData = { ...position.conductor };
+    if (!isSameUnit(conductor, dimensions)) return position;
     for (const dimension of dimensions) {
       const value = conductor[dimension];
       if (value === undefined) continue;
@@ -160,6 +163,14 @@ function inInches(
     return { ...position, conductor };
   });
   return touched ? { ...section, positions } : null;
+}
+
+/** A core or a GMR thicker than a diameter in inches is in millimetres itself; a thinner core goes with the diameter. */
+function isSameUnit(conductor: ConductorData, dimensions: readonly Dimension[]): boolean {
+  if (!dimensions.includes('diameterMm')) return true;
+  const { coreDiameterMm = 0, gmrMm = 0, diameterMm, model } = conductor;
+  if (dimensions.includes('gmrMm') && (model === 'tube' || gmrMm >= diameterMm)) return false;
+  return dimensions.includes('coreDiameterMm') === coreDiameterMm < diameterMm;
 }
 
 function conductorPlace(

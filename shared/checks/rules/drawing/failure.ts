@@ -1,4 +1,5 @@
 import type { Failure, FailureReason } from '../../../engine/types';
+import { pointerToken } from '../../../contracts/faults';
 import type { NormalisedLine } from '../../../filing/types';
 import { listed } from '../../words';
 import type { LineRule } from '../rule';
@@ -30,22 +31,38 @@ export function failureRule(
     apply: ({ line, recomputation }) => {
       const failure = recomputation.ok ? null : recomputation.failure;
       if (failure === null || !reasons.includes(failure.reason)) return [];
-      const { section, position, field } = failure.where;
-      const sectionPointer =
-        section === undefined ? line.pointer : (line.sections[section]?.pointer ?? line.pointer);
-      const positionPart = position === undefined ? '' : `/positions/${position}`;
-      const fieldPart = position === undefined || field === undefined ? '' : `/${field}`;
+      const { section, position } = failure.where;
       return [
         {
           grade: 'must-answer',
           ...(section === undefined ? {} : { section }),
           ...(position === undefined ? {} : { position }),
-          where: `${sectionPointer}${positionPart}${fieldPart}`,
+          where: placeOf(line, failure.where),
           message: `${asSentence(placed(line, failure))} ${remedy}`,
         },
       ];
     },
   };
+}
+
+/** Fields that stand at a position; all others of a wire stand at its conductor. */
+const POSITION_FIELDS = new Set([
+  'horizontalM',
+  'attachmentHeightM',
+  'sagM',
+  'bundleCount',
+  'bundleSpacingM',
+]);
+
+/** JSON Pointer of what the engine stumbled over. */
+function placeOf(line: NormalisedLine, { section, position, field }: Failure['where']): string {
+  const at = section === undefined ? line.pointer : (line.sections[section]?.pointer ?? line.pointer);
+  if (section === undefined || position === undefined) return at;
+  const wire = `${at}/positions/${position}`;
+  if (field === undefined || POSITION_FIELDS.has(field))
+    return field === undefined ? wire : `${wire}/${field}`;
+  const key = line.sheet.line.sections[section]?.positions?.[position]?.conductor;
+  return key === undefined ? wire : `${at}/conductors/${pointerToken(key)}/${field}`;
 }
 
 /** The engine's words behind the positions that they are about. */

@@ -21,7 +21,8 @@ export const mutualExceedsSelves: PairRule = {
       const value = context.mutual.declared[parameter];
       const [one, two] = context.selves.map((self) => self[SELF_OF[parameter]]);
       if (value === undefined || one === undefined || two === undefined || one <= 0 || two <= 0) return [];
-      if (value.perKm ** 2 <= one * two) return [];
+      // What rounding of the declared digits explains is no contradiction.
+      if (Math.max(0, Math.abs(value.perKm) - value.halfDigitPerKm) ** 2 <= one * two) return [];
       return [
         {
           grade: 'must-answer',
