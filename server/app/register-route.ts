@@ -9,6 +9,7 @@ import type { KeptAnswer } from '../database/idempotency';
 import { inTransaction } from '../database/transaction';
 import type { ActorSource, Transaction } from '../database/transaction';
 import { forbidden, invalidContent, Problem } from '../errors/problem';
+import { unkeptText } from '../files/kept-text';
 import { refuseCrossSite, requireToken } from '../middleware/cross-site';
 import type { SessionDoor, SessionState } from '../integrations/session-door';
 import { HttpSessionDoor } from '../middleware/http-session-door';
@@ -63,6 +64,8 @@ function uploadedFile(
       { pointer: `/${name}`, value: null, expected: 'nothing', message: `The form has no field "${name}".` },
     ]);
   }
+  const faults = unkeptText(fields);
+  if (faults.length > 0) throw invalidContent(faults);
   return { file: { name: file.originalname, mediaType: file.mimetype, bytes: file.buffer }, fields };
 }
 
@@ -92,7 +95,8 @@ async function answerOnce(route: Route, call: AnyCall, key: string): Promise<Ans
     userId: call.actor.userId,
     key,
     operationId: route.operationId,
-    content: [call.params, call.query, call.body, call.fields, hashOf(call.file)],
+    // a consultant who changes the organisation means another request
+    content: [call.actor.orgId, call.params, call.query, call.body, call.fields, hashOf(call.file)],
   };
   const work = async () => kept(route, await route.handler(call as never));
   const { status, body, replayed } = await oncePerKey(call.tx, request, work);

@@ -3,6 +3,7 @@ import * as validators from '../../shared/contracts/api-validators.generated.js'
 import { faultsAgainst } from '../../shared/contracts/validators-by-name';
 import type { SchemaPath } from '../../shared/contracts/validators-by-name';
 import { invalidContent, Problem } from '../errors/problem';
+import { unkeptText } from '../files/kept-text';
 import type { Route } from '../routes/route';
 
 export const inQuery = ({ method }: Pick<Route, 'method'>) => method === 'GET' || method === 'DELETE';
@@ -72,6 +73,7 @@ export function readContent(route: Route, request: Request): Content {
     });
   }
   const faults = faultsAgainst(schema, content);
+  if (faults.length === 0) faults.push(...unkeptText(content));
   if (faults.length > 0) throw invalidContent(faults);
   return hasBody ? { query: {}, body: content } : { query: content, body: {} };
 }

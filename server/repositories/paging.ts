@@ -1,4 +1,5 @@
 import type { EntityManager } from 'typeorm';
+import { postgresCode } from '../errors/postgres-code';
 import { Problem } from '../errors/problem';
 
 /** Where a page ended: the sort value and the id of its last row. */
@@ -29,8 +30,11 @@ export function decodeCursor(text: string | undefined): Cursor | null {
   } catch {
     // told below
   }
-  throw new Problem('invalid-request', { detail: 'The cursor is not one that this list gave.' });
+  throw foreignCursor();
 }
+
+const foreignCursor = () =>
+  new Problem('invalid-request', { detail: 'The cursor is not one that this list gave.' });
 
 export function readLimit(text: string | undefined): number {
   return text === undefined ? DEFAULT_LIMIT : Number(text);
@@ -76,11 +80,17 @@ export async function readPage<T extends { id: string }>(
   );
   const after = cursorSql(sort, descending, query.cursor, parameters);
   const direction = descending ? 'DESC' : 'ASC';
-  const rows = await manager.query<(T & { sortValue: string | number })[]>(
-    `${withs} SELECT *, ${sort} AS "sortValue" FROM ${from} WHERE ${after}
+  const rows = await manager
+    .query<(T & { sortValue: string | number })[]>(
+      `${withs} SELECT *, ${sort} AS "sortValue" FROM ${from} WHERE ${after}
      ORDER BY ${sort} ${direction}, id::text ${direction} LIMIT ${parameters.add(query.limit + 1)}`,
-    parameters.values,
-  );
+      parameters.values,
+    )
+    .catch((error: unknown) => {
+      // a place that this order does not have: of another sort, or made up
+      const isOfCursor = query.cursor !== null && /^22/.test(postgresCode(error) ?? '');
+      throw isOfCursor ? foreignCursor() : error;
+    });
   const items = rows.slice(0, query.limit);
   const last = items.at(-1);
   const more = rows.length > query.limit && last !== undefined;

@@ -30,5 +30,7 @@ export function safeFileName(name: string): string {
   const plain = last.replace(/[\p{Cc}\p{Cf}]/gu, '').trim();
   if (plain.length <= LONGEST_NAME) return plain === '' ? 'file' : plain;
   const ending = /\.[a-zA-Z0-9]{1,5}$/.exec(plain)?.[0] ?? '';
-  return `${plain.slice(0, LONGEST_NAME - ending.length)}${ending}`;
+  const start = plain.slice(0, LONGEST_NAME - ending.length);
+  // a cut through a character would leave half of it
+  return `${start.replace(/\p{Cs}$/u, '')}${ending}`;
 }

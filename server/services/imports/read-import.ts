@@ -1,4 +1,5 @@
 import { forbidden, notFound } from '../../errors/problem';
+import { fitToKeep } from '../../files/kept-text';
 import { readFilingFile, type FilingFile } from '../../files/read-filing-file';
 import { draftLines } from '../../repositories/draft.repository';
 import { findImport, importRows, insertImport } from '../../repositories/import.repository';
@@ -40,8 +41,8 @@ export async function readImport(
       fileName: name,
       fileSha256: sha256(upload.bytes),
       dialect: { format: read.format, csv: read.dialect } as never,
-      faults: read.faults as never,
-      notices: read.notices as never,
+      faults: fitToKeep(read.faults) as never,
+      notices: fitToKeep(read.notices) as never,
       rowCount: read.rowCount,
       lineCount: read.sound.lines.length,
       createdBy: actor.userId,
