@@ -1,4 +1,4 @@
-import { IsNull, type EntityManager, type QueryDeepPartialEntity } from 'typeorm';
+import { In, IsNull, type EntityManager, type QueryDeepPartialEntity } from 'typeorm';
 import { Countersign, Disposition } from '../entities/review.entities';
 import { accessibleBy } from '../policies/accessible-by';
 import type { AppAbility } from '../../shared/policies/subjects';
@@ -25,6 +25,10 @@ export async function revokeDispositions(
   now: Date,
 ): Promise<void> {
   await manager.update(Disposition, { revisionId, discrepancyId, revokedAt: IsNull() }, { revokedAt: now });
+}
+
+export async function revokeByIds(manager: EntityManager, ids: readonly string[], now: Date): Promise<void> {
+  if (ids.length > 0) await manager.update(Disposition, { id: In([...ids]) }, { revokedAt: now });
 }
 
 /** Proposals that wait for a second reviewer on a revision. */

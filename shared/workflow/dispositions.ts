@@ -45,24 +45,76 @@ function figure(value: number | null): string | null {
   return value === null ? null : value.toPrecision(9);
 }
 
-/** A disposition as far as carrying over needs it. */
-export interface StandingDisposition {
+/** A finding, or a disposition of one, by what makes it the same. */
+export interface SameFinding {
   lineKey: string;
   fingerprint: string;
+}
+
+/** A disposition as far as carrying over needs it. */
+export interface StandingDisposition extends SameFinding {
+  kind: DispositionKind;
+  /** The second reviewer's word, where there is one. */
+  countersignId: string | null;
+}
+
+/** A finding as far as carrying over needs it. */
+export interface GradedFinding extends SameFinding {
+  grade: Grade;
+}
+
+/**
+ * Tells whether a disposition is enough for a grade. A finding's figures may stay while new rules make a Must answer of
+ * it: then setting aside is not enough any more, and a waiver needs the second reviewer.
+ * @param disposition what stands, and whether it was countersigned
+ * @param grade grade of the finding
+ * @returns true where it goes on standing
+ */
+export function isEnoughFor(
+  disposition: Pick<StandingDisposition, 'kind' | 'countersignId'>,
+  grade: Grade,
+): boolean {
+  const { kind, countersignId } = disposition;
+  if (kind === 'set-aside') return grade !== 'must-answer';
+  return countersignId !== null || !needsCountersign(kind, grade);
 }
 
 /**
  * Picks the dispositions that hold for the next revision too.
  * @param before dispositions that stand on the revision before
  * @param findings findings of the new revision's governing run
- * @returns those whose finding is there again with equal code, circuit and figures
+ * @returns those whose finding is there again with equal code, circuit and figures, and that are enough for its grade
  */
 export function carryOver<D extends StandingDisposition>(
   before: readonly D[],
-  findings: readonly StandingDisposition[],
+  findings: readonly GradedFinding[],
 ): D[] {
-  const present = new Set(findings.map((f) => `${f.lineKey} ${f.fingerprint}`));
-  return before.filter((d) => present.has(`${d.lineKey} ${d.fingerprint}`));
+  const grades = gradesOf(findings);
+  return before.filter((d) => {
+    const grade = grades.get(`${d.lineKey} ${d.fingerprint}`);
+    return grade !== undefined && isEnoughFor(d, grade);
+  });
+}
+
+/**
+ * Picks the dispositions that stand no more once another run governs.
+ * @param standing dispositions of the revision
+ * @param findings findings of the run that governs from now on
+ * @returns those that are not enough for the grade that their finding has now
+ */
+export function outgrown<D extends StandingDisposition>(
+  standing: readonly D[],
+  findings: readonly GradedFinding[],
+): D[] {
+  const grades = gradesOf(findings);
+  return standing.filter((d) => {
+    const grade = grades.get(`${d.lineKey} ${d.fingerprint}`);
+    return grade !== undefined && !isEnoughFor(d, grade);
+  });
+}
+
+function gradesOf(findings: readonly GradedFinding[]): Map<string, Grade> {
+  return new Map(findings.map((f) => [`${f.lineKey} ${f.fingerprint}`, f.grade]));
 }
 
 /**

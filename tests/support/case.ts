@@ -118,9 +118,9 @@ export async function saveLine(
 }
 
 /** Does the worker's share: every check that waits. */
-export async function runChecks(db: TestDatabase): Promise<number> {
+export async function runChecks(db: TestDatabase, tools = db.surroundings.tools): Promise<number> {
   const waiting = await db.owner.manager.findBy(CheckRun, { status: 'queued' });
-  for (const run of waiting) await runCheck({ ...db.surroundings, dataSource: db.worker }, run.id);
+  for (const run of waiting) await runCheck({ dataSource: db.worker, tools }, run.id);
   return waiting.length;
 }
 

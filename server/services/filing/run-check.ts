@@ -19,10 +19,13 @@ import type { CheckReport } from '../../../shared/checks/types';
 import type { ConductorLibrary } from '../../../shared/library/types';
 import { readLine } from '../../../shared/filing/read-filing';
 import type { LineSheet, NormalisedFiling } from '../../../shared/filing/types';
-import { carryOver } from '../../../shared/workflow/dispositions';
+import { carryOver, type GradedFinding } from '../../../shared/workflow/dispositions';
 import { findingRows, valueRows } from './run-rows';
 
 const ACTOR = system('check');
+
+/** For how long a check may compute; the queue gives the job to another worker a little later. */
+const LONGEST_CHECK_MS = 540_000;
 
 interface Work {
   run: RunHead;
@@ -39,7 +42,9 @@ export async function runCheck(surroundings: Surroundings, runId: string): Promi
   const work = await inTransaction(surroundings, ACTOR, (tx) => begin(tx, runId));
   if (work === null) return;
   try {
-    const report = await surroundings.tools.checker.check({ filing: work.filing, rules: work.rules });
+    const { filing, rules } = work;
+    const limit = AbortSignal.timeout(LONGEST_CHECK_MS);
+    const report = await surroundings.tools.checker.check({ filing, rules }, limit);
     await inTransaction(surroundings, ACTOR, (tx) => finish(tx, work, report));
   } catch (error) {
     await inTransaction(surroundings, ACTOR, (tx) => giveUp(tx, runId));
@@ -96,7 +101,7 @@ async function finish(tx: Transaction, { run, lines }: Work, report: CheckReport
 export async function carryDispositions(
   tx: Transaction,
   revision: Revision,
-  findings: readonly { lineKey: string; fingerprint: string }[],
+  findings: readonly GradedFinding[],
 ): Promise<void> {
   const before = await revisionBefore(tx.manager, revision);
   if (before === null) return;
@@ -131,6 +136,7 @@ async function giveUp(tx: Transaction, runId: string): Promise<void> {
   await updateRun(tx.manager, runId, {
     status: 'failed',
     finishedAt: tx.now,
-    failure: 'The check stopped before its end. It will be tried again.',
+    failure:
+      'The check stopped before its end. It is tried again by itself; a reviewer can ask for another one.',
   });
 }

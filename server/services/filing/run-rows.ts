@@ -13,12 +13,16 @@ export function findingRows(
   report: CheckReport,
 ): FindingRow[] {
   const rows: FindingRow[] = [];
+  const seen = new Map<string, number>();
   report.lines.forEach((line, i) => {
     const lineKey = lineKeys[i];
     if (lineKey === undefined) throw new Error('the report has more lines than the revision');
     const add = (finding: Noticed, circuit: number | null) =>
       rows.push(
-        rowOf(run, lineKey, { ...finding, circuit: finding.circuit ?? circuit ?? undefined }, rows.length),
+        apart(
+          rowOf(run, lineKey, { ...finding, circuit: finding.circuit ?? circuit ?? undefined }, rows.length),
+          seen,
+        ),
       );
     for (const circuit of line.circuits)
       for (const finding of circuit.findings) add(finding, circuit.circuit);
@@ -26,6 +30,15 @@ export function findingRows(
   });
   return rows;
 }
+
+/** Two findings of one place with equal figures are told apart by their order: each is disposed of by itself. */
+function apart(row: FindingRow, seen: Map<string, number>): FindingRow {
+  const before = seen.get(row.fingerprint) ?? 0;
+  seen.set(row.fingerprint, before + 1);
+  return before === 0 ? row : { ...row, fingerprint: digest(`${row.fingerprint} ${before + 1}`) };
+}
+
+const digest = (text: string) => createHash('sha256').update(text).digest('hex').slice(0, 32);
 
 function rowOf(
   { id: runId, orgId }: Pick<RunHead, 'id' | 'orgId'>,
@@ -57,7 +70,7 @@ function rowOf(
     groupNumber: finding.group,
     causes: finding.causes,
     follows: finding.follows ?? null,
-    fingerprint: createHash('sha256').update(fingerprintText(lineKey, figures)).digest('hex').slice(0, 32),
+    fingerprint: digest(fingerprintText(lineKey, figures)),
   };
 }
 

@@ -1,8 +1,12 @@
 import { conflict, forbidden, notFound } from '../../errors/problem';
+import type { Transaction } from '../../database/transaction';
 import type { Revision } from '../../entities/filed.entities';
+import type { Finding } from '../../entities/verdict.entities';
+import { revokeByIds, standingDispositions } from '../../repositories/disposition.repository';
 import { findRevision } from '../../repositories/revision.repository';
 import { findingsOfRun, findRun, listRuns, updateRun } from '../../repositories/run.repository';
 import type { AdoptRunRequest } from '../../../shared/contracts/api.generated';
+import { outgrown } from '../../../shared/workflow/dispositions';
 import type { Caller } from '../cases/caller';
 import { holdCase, readCase, type CaseFile } from '../cases/case-file';
 import { recordStep } from '../cases/record-step';
@@ -55,8 +59,20 @@ export async function adoptRun(
   if (run.status !== 'done') throw conflict('A run is adopted once it is done.');
   if (file.run !== null) await updateRun(tx.manager, file.run.id, { governing: false });
   await updateRun(tx.manager, run.id, { governing: true });
-  await carryDispositions(tx, revision, await findingsOfRun(tx.manager, run.id));
+  const findings = await findingsOfRun(tx.manager, run.id);
+  // first what stands no more, so that it is not in the way of what may be carried over
+  await revokeOutgrown(tx, revision, findings);
+  await carryDispositions(tx, revision, findings);
   recordStep(tx, file, 'check.adopted', { run: ordinal, reason: request.reason }, { run: file.run?.ordinal });
+}
+
+async function revokeOutgrown({ manager, now }: Transaction, { id }: Revision, findings: readonly Finding[]) {
+  const left = outgrown(await standingDispositions(manager, id), findings);
+  await revokeByIds(
+    manager,
+    left.map((disposition) => disposition.id),
+    now,
+  );
 }
 
 /** Runs of a revision, newest first. */

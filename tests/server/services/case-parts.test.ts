@@ -175,6 +175,15 @@ describe('rows of a run', () => {
     expect(other?.fingerprint).not.toBe(first?.fingerprint);
   });
 
+  it('tell two findings of one place apart, so that each is disposed of by itself', () => {
+    const same = finding({ declared: 0.6, recomputed: 0.4 });
+    const prints = findingRows(run, ['L7'], report([same, same, same])).map((row) => row.fingerprint);
+    expect(new Set(prints).size).toBe(4);
+    expect(findingRows(run, ['L7'], report([same, same, same])).map((row) => row.fingerprint)).toEqual(
+      prints,
+    );
+  });
+
   it('leave figures out that no column takes', () => {
     const [row] = findingRows(run, ['L7'], report([finding({ deviation: Infinity, declared: Number.NaN })]));
     expect(row).toMatchObject({ deviation: null, declared: null });

@@ -5,10 +5,12 @@ import {
   carryOver,
   fingerprintText,
   needsCountersign,
+  outgrown,
   refuseCountersign,
   refuseDisposition,
   worstGrade,
   type FindingFigures,
+  type Grade,
 } from '#shared/workflow/dispositions';
 
 const finding: FindingFigures = {
@@ -48,20 +50,30 @@ describe('fingerprints', () => {
 
 describe('carrying over', () => {
   const before = [
-    { lineKey: 'L1', fingerprint: 'aa', kind: 'waived' },
-    { lineKey: 'L1', fingerprint: 'bb', kind: 'settled' },
-    { lineKey: 'L2', fingerprint: 'aa', kind: 'set-aside' },
-  ];
+    { lineKey: 'L1', fingerprint: 'aa', kind: 'waived', countersignId: 'c' },
+    { lineKey: 'L1', fingerprint: 'bb', kind: 'settled', countersignId: null },
+    { lineKey: 'L2', fingerprint: 'aa', kind: 'set-aside', countersignId: null },
+    { lineKey: 'L3', fingerprint: 'aa', kind: 'waived', countersignId: null },
+  ] as const;
+  const found = (lineKey: string, fingerprint: string, grade: Grade) => ({ lineKey, fingerprint, grade });
   it('keeps what is there again on the same line', () => {
-    expect(
-      carryOver(before, [
-        { lineKey: 'L1', fingerprint: 'bb' },
-        { lineKey: 'L2', fingerprint: 'cc' },
-      ]),
-    ).toEqual([before[1]]);
+    const findings = [found('L1', 'bb', 'must-answer'), found('L2', 'cc', 'note')];
+    expect(carryOver(before, findings)).toEqual([before[1]]);
   });
   it('keeps nothing when nothing is found', () => {
     expect(carryOver(before, [])).toEqual([]);
+  });
+  it('takes neither setting aside nor one reviewer’s waiver for an answer once it must be answered', () => {
+    const graver = [
+      found('L1', 'aa', 'must-answer'),
+      found('L2', 'aa', 'must-answer'),
+      found('L3', 'aa', 'must-answer'),
+    ];
+    expect(carryOver(before, graver)).toEqual([before[0]]);
+    expect(outgrown(before, graver)).toEqual([before[2], before[3]]);
+    const lighter = graver.map((f) => ({ ...f, grade: 'explain' as const }));
+    expect(carryOver(before, lighter)).toEqual([before[0], before[2], before[3]]);
+    expect(outgrown(before, lighter)).toEqual([]);
   });
 });
 
