@@ -101,7 +101,7 @@ export interface Finding {
   group: number;
   /** The constant that it follows from; such a finding is a Note and is not counted again. */
   follows?: FindingParameter;
-  /** At most three, best first; they stand at the first finding of a group only. */
+  /** At most three a group, best first; each stands at the findings of what it explains. */
   causes: Cause[];
 }
 

@@ -14,7 +14,7 @@ const GROUP = '\u202f';
  * @example figure(0.38119, 3) // "0.381"
  */
 export function figure(value: number, digits = 3): string {
-  if (!Number.isFinite(value)) return value === Infinity ? 'beyond measure' : 'not a number';
+  if (!Number.isFinite(value)) return 'not a number';
   const rounded = Number(value.toPrecision(digits));
   const size = Math.abs(rounded);
   const text =
@@ -35,6 +35,15 @@ function plain(rounded: number, digits: number): string {
 /** A figure with its unit behind a thin space; a ratio stands alone. */
 export function withUnit(value: number, unit: string, digits = 3): string {
   return unit === '' ? figure(value, digits) : `${figure(value, digits)}${THIN}${unit}`;
+}
+
+/**
+ * Significant digits, from three on, at which two different figures do not print alike.
+ *
+ * @example digitsApart(10.96, 11) // 4
+ */
+export function digitsApart(one: number, other: number): number {
+  return [3, 4, 5].find((digits) => figure(one, digits) !== figure(other, digits)) ?? 6;
 }
 
 /** A value of a parameter with the parameter's unit. */
@@ -70,7 +79,7 @@ export function partsBy(
   const name = label(parameter);
   if (ratio < 0) return `${name} has the opposite sign of ${against}`;
   if (ratio >= 3) return `${name} is ${figure(ratio, 3)} times ${against}`;
-  if (ratio > 0 && ratio <= 0.1) return `${name} is 1/${figure(1 / ratio, 3)} of ${against}`;
+  if (ratio > 1e-6 && ratio <= 0.1) return `${name} is 1/${figure(1 / ratio, 3)} of ${against}`;
   return `${name} is ${percent(ratio - 1)} ${ratio >= 1 ? 'above' : 'below'} ${against}`;
 }
 

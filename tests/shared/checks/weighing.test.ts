@@ -7,7 +7,7 @@ import { BAND_PARAMETERS } from '#shared/checks/parameters';
 import { readBands, readTolerances } from '#shared/checks/rule-set-file';
 import { dimensionsAt } from '#shared/checks/rules/drawing/voltage-table';
 import { toleranceInUse } from '#shared/checks/tolerance';
-import { figure, partsBy, percent } from '#shared/checks/words';
+import { digitsApart, figure, partsBy, percent } from '#shared/checks/words';
 import { bareLine, check, exampleLine, findings } from './example-line';
 
 describe('default bands', () => {
@@ -261,6 +261,29 @@ describe('words', () => {
     [0, 3, '0.00'],
   ])('figure(%d, %d)', (value, digits, text) => {
     expect(figure(value, digits)).toBe(text);
+  });
+
+  it('print a value and its limit apart where three digits would print them alike', () => {
+    expect(digitsApart(10.9, 11)).toBe(3);
+    expect(digitsApart(10.96, 11)).toBe(4);
+    expect(digitsApart(11, 11)).toBe(6);
+    const [finding] = findings(check(bareLine(345, 60, { r1: 0.04, x1: 0.2999, b1: 5.2 }))).filter(
+      ({ code }) => code === 'typical.x1',
+    );
+    expect(finding?.message).toContain('X1 is 0.2999\u2009Ω/km, below 0.300');
+  });
+
+  it('stay words for values that vanish', () => {
+    const vanishing = exampleLine((line) => {
+      for (const key of ['r1', 'x1', 'b1', 'r0', 'x0', 'b0']) line.declared[0][key].value = 5e-324;
+    });
+    const all = findings(check(vanishing));
+    expect(all.filter(({ grade }) => grade === 'must-answer').length).toBeGreaterThan(5);
+    for (const { message, declared, deviation } of all) {
+      expect(message).not.toContain('not a number');
+      expect(Number.isFinite(declared ?? 0) && Number.isFinite(deviation ?? 0)).toBe(true);
+    }
+    expect(partsBy('r1', 1e-320)).toBe('R1 is 100\u2009% below what the geometry gives');
   });
 
   it('say how a value parts from another', () => {

@@ -1,5 +1,5 @@
 import { SAG_SHARE } from '../../../engine/constants';
-import { withUnit } from '../../words';
+import { digitsApart, withUnit } from '../../words';
 import type { FindingDraft, LineRule } from '../rule';
 import { drawnSections, phasesOf, positionPointer, positionWords } from './places';
 import { dimensionsAt } from './voltage-table';
@@ -28,8 +28,8 @@ export const phaseHeight: LineRule = {
       if (pointM >= leastHeightM) return [];
       const isMust = meanM < leastHeightM;
       const what = isMust
-        ? `a mean height of ${withUnit(meanM, 'm')}`
-        : `its lowest point at ${withUnit(pointM, 'm')}`;
+        ? `a mean height of ${withUnit(meanM, 'm', digitsApart(meanM, leastHeightM))}`
+        : `its lowest point at ${withUnit(pointM, 'm', digitsApart(pointM, leastHeightM))}`;
       return [
         {
           grade: isMust ? 'must-answer' : 'explain',

@@ -1,5 +1,5 @@
 import type { NormalisedOverhead } from '../../../filing/types';
-import { withUnit } from '../../words';
+import { digitsApart, withUnit } from '../../words';
 import type { FindingDraft, LineRule } from '../rule';
 import { drawnSections, phasesOf, positionPointer, positionWords } from './places';
 import { dimensionsAt } from './voltage-table';
@@ -44,7 +44,13 @@ function weighSection(section: NormalisedOverhead, limits: VoltageDimensions, kv
     const isLeast = all.atStructureM < limits.leastSpacingM;
     const limit = isLeast ? limits.leastSpacingM : low;
     return [
-      draft(section, all, isLeast, `closer than the ${withUnit(limit, 'm')} that ${at} makes plausible`),
+      draft(
+        section,
+        all,
+        isLeast,
+        limit,
+        `closer than the ${withUnit(limit, 'm')} that ${at} makes plausible`,
+      ),
     ];
   }
   const circuits = new Set(phasesOf(section).map(({ position }) => position.circuit));
@@ -52,17 +58,30 @@ function weighSection(section: NormalisedOverhead, limits: VoltageDimensions, kv
     const nearest = pairs(section, circuit).sort((a, b) => a.spacingM - b.spacingM)[0];
     if (nearest === undefined || nearest.spacingM <= high) return [];
     return [
-      draft(section, nearest, false, `farther than the ${withUnit(high, 'm')} that is usual up to ${at}`),
+      draft(
+        section,
+        nearest,
+        false,
+        high,
+        `farther than the ${withUnit(high, 'm')} that is usual up to ${at}`,
+      ),
     ];
   });
 }
 
-function draft(section: NormalisedOverhead, pair: Pair, isMust: boolean, words: string): FindingDraft {
+function draft(
+  section: NormalisedOverhead,
+  pair: Pair,
+  isMust: boolean,
+  limitM: number,
+  words: string,
+): FindingDraft {
+  const spacing = withUnit(pair.spacingM, 'm', digitsApart(pair.spacingM, limitM));
   return {
     grade: isMust ? 'must-answer' : 'explain',
     position: pair.two,
     where: positionPointer(section, pair.two),
-    message: `The nearest phases, ${positionWords(section, pair.one)} and ${positionWords(section, pair.two)}, hang ${withUnit(pair.spacingM, 'm')} apart, ${words}.`,
+    message: `The nearest phases, ${positionWords(section, pair.one)} and ${positionWords(section, pair.two)}, hang ${spacing} apart, ${words}.`,
   };
 }
 

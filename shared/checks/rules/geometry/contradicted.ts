@@ -52,7 +52,12 @@ function sentences(parameter: LineParameter | MutualParameter, weighing: Weighin
   const form =
     weighing.form !== null && weighing.formsPart > FORMS_PART ? ` (${FORM_WORDS[weighing.form]})` : '';
   const figures = `${quantity(parameter, declared.perKm, 4)} declared, ${quantity(parameter, recomputed, 4)} recomputed`;
-  const allowed = `tolerance ${percent(tolerance.total)}: ${percent(tolerance.administrator)} by rule, ${percent(tolerance.inputs)} by what the inputs are known to, most of it ${tolerance.dominantInput}`;
+  // A cable's values are taken as declared: no input stands behind them.
+  const known =
+    tolerance.inputs > 0
+      ? `, ${percent(tolerance.inputs)} by what the inputs are known to, most of it ${tolerance.dominantInput}`
+      : '';
+  const allowed = `tolerance ${percent(tolerance.total)}: ${percent(tolerance.administrator)} by rule${known}`;
   const inside = weighing.insideRange
     ? ` It lies inside the plausible range of ${label(parameter)}, and beyond the cap of the tolerance.`
     : '';

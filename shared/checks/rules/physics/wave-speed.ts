@@ -23,6 +23,8 @@ export const waveSpeedRule: CircuitRule = {
     if (!context.lineContext.isOverhead || x1 === undefined || b1 === undefined) return [];
     if (!(x1 > 0 && b1 > 0)) return [];
     const declared = waveSpeed(x1, b1, context.lineContext.line.frequencyHz);
+    // Values that vanish even in their product are no wave; other rules speak of them.
+    if (!Number.isFinite(declared)) return [];
     const rounding =
       (roundingShare(context.circuit.declared.x1) + roundingShare(context.circuit.declared.b1)) / 2;
     if (declared <= Math.max(FASTEST_WAVE, 1 / Math.max(1 - rounding, 0.01))) return [];

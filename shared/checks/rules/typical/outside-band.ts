@@ -5,7 +5,7 @@ import type { PartialConstants } from '../../derive';
 import { MADE_OF, isLineParameter } from '../../parameters';
 import type { BandParameter } from '../../parameters';
 import type { Band } from '../../rule-set';
-import { figure, label, quantity } from '../../words';
+import { digitsApart, figure, label, quantity } from '../../words';
 import { pointerOf } from '../rule';
 import type { CircuitRule, FindingDraft } from '../rule';
 
@@ -89,9 +89,11 @@ function outside(value: number, rounding: number, [low, high]: readonly [number,
 function sentence(parameter: BandParameter, value: number, side: Side, isOuter: boolean, band: Band): string {
   const [low, high] = isOuter ? band.outer : band.typical;
   const subject = side === 'declared' ? label(parameter) : `${label(parameter)} of the geometry`;
-  const beyond = value < low ? `below ${figure(low)}` : `above ${figure(high)}`;
+  const limit = value < low ? low : high;
+  const digits = digitsApart(value, limit);
+  const beyond = `${value < low ? 'below' : 'above'} ${figure(limit)}`;
   const range = isOuter ? 'the outer limit' : 'the typical limit';
-  return `${subject} is ${quantity(parameter, value)}, ${beyond}, ${range} at ${figure(band.classKv)}\u2009kV.`;
+  return `${subject} is ${quantity(parameter, value, digits)}, ${beyond}, ${range} at ${figure(band.classKv)}\u2009kV.`;
 }
 
 /** A rule that holds one parameter against its band. */
