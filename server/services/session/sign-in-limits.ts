@@ -57,16 +57,25 @@ export class SignInLimits {
     }
   }
 
+  /** Counts a failure. Of guesses that run at once, those beyond the limit are not told that they were wrong. */
   async failed(email: string, address: string): Promise<void> {
+    const refusals: RateLimiterRes[] = [];
     for (const [name, key] of this.keys(email, address)) {
       await this.limiters[name].consume(key).catch((refusal: unknown) => {
         if (!(refusal instanceof RateLimiterRes)) throw refusal;
+        refusals.push(refusal);
       });
     }
+    const [refusal] = refusals;
+    if (refusal) throw tooMany(refusal.msBeforeNext);
   }
 
-  /** The right password clears what was counted against this account from this address. */
+  /**
+   * The right password clears what was counted against this account from this address; not where others that were
+   * tried at the same time have reached the limit meanwhile.
+   */
   async succeeded(email: string, address: string): Promise<void> {
+    await this.require(email, address);
     const [[, pair] = ['pair', '']] = this.keys(email, address);
     await this.limiters.pair.delete(pair);
   }

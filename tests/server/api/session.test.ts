@@ -82,6 +82,16 @@ describe('signing in', () => {
     await test.signInAs('applicant');
   });
 
+  it('lets no more guesses through when they come all at once', async () => {
+    const { email } = await test.account('applicant', await test.db.asSystem((tx) => anOrganisation(tx)));
+    const guess = (password: string) => test.visitor().post('/api/session').send({ email, password });
+    const answers = await Promise.all(Array.from({ length: 24 }, (_, i) => guess(`a wrong guess ${i}`)));
+    const statuses = answers.map((answer) => answer.status);
+    expect(statuses.filter((status) => status === 401).length).toBeLessThanOrEqual(10);
+    expect(statuses.filter((status) => status === 429).length).toBeGreaterThanOrEqual(14);
+    expect((await guess(PASSWORD)).status).toBe(429);
+  });
+
   it.each([
     ['no password', { email: 'a@example.org' }, '/password'],
     ['an unknown key', { email: 'a@example.org', password: 'x', role: 'administrator' }, '/role'],
