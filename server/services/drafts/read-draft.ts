@@ -1,3 +1,4 @@
+import { setImmediate } from 'node:timers/promises';
 import type { Transaction } from '../../database/transaction';
 import type { DraftLine, TypedField } from '../../entities/case.entities';
 import { draftLines } from '../../repositories/draft.repository';
@@ -21,12 +22,20 @@ export interface ReadDraft {
   unchanged: boolean;
 }
 
-/** Reads the whole draft of a round. */
-export async function readDraft(tx: Transaction, file: CaseFile): Promise<ReadDraft> {
+const drafts = new WeakMap<CaseFile, Promise<ReadDraft>>();
+
+/** Reads the whole draft of a round, once for each reading of its case. */
+export function readDraft(tx: Transaction, file: CaseFile): Promise<ReadDraft> {
+  const known = drafts.get(file) ?? readOnce(tx, file);
+  drafts.set(file, known);
+  return known;
+}
+
+async function readOnce(tx: Transaction, file: CaseFile): Promise<ReadDraft> {
   const rows = await draftLines(tx.manager, file.round.id);
   if (rows.length === 0) return { rows, lines: [], faults: [], unchanged: false };
   const context = await readingContext(tx.manager);
-  const { lines, faults } = readRows(rows, context);
+  const { lines, faults } = await readRows(rows, context);
   return {
     rows,
     lines,
@@ -45,7 +54,7 @@ export function faultyLines({ faults, rows }: Pick<ReadDraft, 'faults' | 'rows'>
   return [...new Set(faults.flatMap((fault) => lineKeyOf(fault, rows) ?? []))];
 }
 
-function readRows(rows: readonly DraftLine[], context: ReadContext) {
+async function readRows(rows: readonly DraftLine[], context: ReadContext) {
   const json = { format: 'filing/1', lines: rows.map((row) => row.body) };
   const written = Object.assign(
     {},
@@ -54,7 +63,22 @@ function readRows(rows: readonly DraftLine[], context: ReadContext) {
   const read = readFiling(json, { ...context, written });
   const lines = [...(read.ok ? read.filing.lines : read.sound.lines)];
   const faults = read.ok ? [] : [...read.faults];
-  return { lines, faults: [...faults, ...lines.flatMap(geometryFaults)] };
+  return { lines, faults: [...faults, ...(await geometryOfAll(lines))] };
+}
+
+/** For how long the geometry of a large draft is solved before others' requests have their turn. */
+const TURN_MS = 20;
+
+async function geometryOfAll(lines: readonly NormalisedLine[]): Promise<PointerFault[]> {
+  const faults: PointerFault[] = [];
+  let since = performance.now();
+  for (const line of lines) {
+    faults.push(...geometryFaults(line));
+    if (performance.now() - since < TURN_MS) continue;
+    await setImmediate();
+    since = performance.now();
+  }
+  return faults;
 }
 
 /** Reads one line of a draft; pointers count from the line. */
