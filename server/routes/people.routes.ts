@@ -30,6 +30,7 @@ export const peopleRoutes = [
     summary: 'Shut an account out, or let it in again',
     access: { can: 'administer', on: 'User' },
     answers: { 200: 'people-entry' },
+    idempotent: true,
     handler: async ({ tx, ability, params, body }) => {
       await setPersonStatus(tx, ability, { ...params, ...body });
       return person(tx, params.userId);
@@ -57,6 +58,7 @@ export const peopleRoutes = [
     summary: 'Keep a reviewer from an organisation’s cases',
     access: { can: 'administer', on: 'User' },
     answers: { 201: 'people-entry' },
+    idempotent: true,
     handler: async ({ tx, ability, params, body }) => {
       await barReviewer(tx, ability, { ...params, ...body });
       return new Answer(await person(tx, params.userId), 201);
@@ -98,6 +100,7 @@ export const peopleRoutes = [
     summary: 'Grant an account that was asked for, or send an invitation again',
     access: { can: 'update', on: 'Invitation' },
     answers: { 200: 'invitation' },
+    idempotent: true,
     handler: async ({ tx, actor, params, body }) =>
       presentInvitation(await approveInvitation(tx, actor, { ...params, ...body })),
   }),
@@ -105,6 +108,7 @@ export const peopleRoutes = [
     summary: 'Refuse an account that was asked for, or take an invitation back',
     access: { can: 'update', on: 'Invitation' },
     answers: { 200: 'invitation' },
+    idempotent: true,
     handler: async ({ tx, actor, params, body }) =>
       presentInvitation(await refuseInvitation(tx, actor, { ...params, ...body })),
   }),
