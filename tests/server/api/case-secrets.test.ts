@@ -1,7 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { ROUTES } from '#server/routes/route-table';
 import type { Checker } from '#server/integrations/checker';
-import { parameterNames } from '#server/app/path-parameters';
 import { fillPath } from '#shared/contracts/api-paths';
 import type { Problem } from '#shared/contracts/errors';
 import type * as Api from '#shared/contracts/api.generated';
