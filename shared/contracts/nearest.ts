@@ -69,6 +69,20 @@ export function nearestNames(written: string, names: readonly string[], count = 
     .map((s) => s.name);
 }
 
+/**
+ * The names closest in spelling, however far: for a name that is near none.
+ * @returns `count` names, best first; none for a text too long to be a name
+ */
+export function closestNames(written: string, names: readonly string[], count = 3): string[] {
+  if (written.length > 80) return [];
+  const wanted = folded(written);
+  return names
+    .map((name) => ({ name, distance: editDistance(wanted, folded(name), 160) }))
+    .sort((a, b) => a.distance - b.distance)
+    .slice(0, count)
+    .map((s) => s.name);
+}
+
 /** "Did you mean A, B or C?" with a leading space, or nothing. */
 export function didYouMean(written: string, names: readonly string[]): string {
   const near = nearestNames(written, names);

@@ -2,7 +2,7 @@
 import { inWords, pointerToken, shown } from '../contracts/faults';
 import type { PointerFault } from '../contracts/faults';
 import type { Conductor, FilingLine, Section } from '../contracts/filing.generated';
-import { nearestNames } from '../contracts/nearest';
+import { closestNames, nearestNames } from '../contracts/nearest';
 import { handbookData, handbookLacks, isChoosable } from '../library/handbook-data';
 import type { ConductorLibrary, LibraryConductor } from '../library/types';
 import type { Notice } from './types';
@@ -32,11 +32,15 @@ function choosableNames(library: ConductorLibrary): string[] {
 
 /** The fault of a name that the library does not have, with the nearest that it has. */
 function unknown(name: string, pointer: string, library: ConductorLibrary): PointerFault {
-  const near = nearestNames(name, choosableNames(library));
-  const hint = near.length ? ` The nearest are: ${near.join(', ')}.` : ' Give its data instead.';
-  const expected = near.length
-    ? `a conductor of the library, such as ${near.join(', ')}`
-    : 'a conductor of the library';
+  const names = choosableNames(library);
+  const near = nearestNames(name, names);
+  const closest = near.length > 0 ? near : closestNames(name, names);
+  const list = closest.join(', ');
+  const hint =
+    near.length > 0
+      ? ` The nearest ${near.length === 1 ? 'is' : 'are'} ${list}.`
+      : `${list && ` No name comes near; closest in spelling are ${list}.`} Give its data instead.`;
+  const expected = list ? `a conductor of the library, such as ${list}` : 'a conductor of the library';
   return {
     pointer,
     value: shown(name),

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { didYouMean, editDistance, nearestNames } from '#shared/contracts/nearest';
+import { closestNames, didYouMean, editDistance, nearestNames } from '#shared/contracts/nearest';
 import { STARTING_LIBRARY } from '#shared/library/conductors';
 
 describe('nearest names', () => {
@@ -18,6 +18,13 @@ describe('nearest names', () => {
     expect(nearestNames('3/8 steel', names)).toContain('3/8 in EHS 7-strand steel');
     expect(nearestNames('Zzyzx Special 9', names)).toEqual([]);
     expect(nearestNames('x'.repeat(100_000), names)).toEqual([]);
+  });
+
+  it('finds the closest in spelling where none is near, and gives up on what is no name', () => {
+    expect(closestNames('Drxkq', ['Cardinal', 'Drake', 'Hawk'], 2)).toEqual(['Drake', 'Hawk']);
+    const names = STARTING_LIBRARY.conductors.map((c) => c.name);
+    expect(closestNames('Zzyzx Special 9', names)).toHaveLength(3);
+    expect(closestNames('x'.repeat(81), names)).toEqual([]);
   });
 
   it('says them in a sentence, or nothing', () => {

@@ -159,7 +159,7 @@ const BREAKS: [name: string, change: (l: Line) => void, pointer: string, words: 
     'an unknown conductor',
     (l) => (section(l).conductors.phase = { library: 'Darke', temperatureC: 50 }),
     `${at}/conductors/phase/library`,
-    /no conductor “Darke”\. The nearest are: Drake/,
+    /no conductor “Darke”\. The nearest is Drake\./,
   ],
   [
     'a library row that lacks data',
