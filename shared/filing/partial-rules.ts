@@ -6,13 +6,24 @@ import type { ConductorLibrary } from '../library/types';
 import { libraryFaults } from './library-resolve';
 import { sectionRuleFaults } from './line-rules';
 
-/** A JSON object and no list. */
-const isObject = (value: unknown): value is Record<string, unknown> =>
+/** Whether a value is a JSON object and no list. */
+export const isObject = (value: unknown): value is Record<string, unknown> =>
   typeof value === 'object' && value !== null && !Array.isArray(value);
 
-/** Whether nothing at or below a pointer is at fault. */
-function holds(pointer: string, faults: readonly PointerFault[]): boolean {
-  return !faults.some((f) => f.pointer === pointer || f.pointer.startsWith(`${pointer}/`));
+/**
+ * Whether nothing at or below a place is at fault.
+ * @param pointer JSON Pointer of the place
+ * @param faults faults with pointers from the same root
+ * @param save pointers whose faults do not count
+ */
+export function holds(
+  pointer: string,
+  faults: readonly PointerFault[],
+  save: readonly string[] = [],
+): boolean {
+  return !faults.some(
+    (f) => !save.includes(f.pointer) && (f.pointer === pointer || f.pointer.startsWith(`${pointer}/`)),
+  );
 }
 
 /** Library names of a section, each looked up whatever else is wrong. */

@@ -113,7 +113,7 @@ function LinePage({ input }: { input: LineEditorInput }) {
         clearanceM={settings.clearanceM}
         badPositions={(section) => badPositions(outcome, section)}
       >
-        <LiveCheckPanel check={check} onPut={put} />
+        <LiveCheckPanel check={check} owed={notes.all.length} onPut={put} />
       </LineForm>
       <FindingCount check={check} />
     </>

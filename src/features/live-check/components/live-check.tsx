@@ -10,7 +10,15 @@ import { FINDING_GRADES, GRADE_WORDS } from '../../../components/ui/grades';
 import { Sheet } from '../../../components/ui/sheet';
 import { rowOf } from '../../../components/charts/balance-entries';
 import type { LiveCheck } from '../hooks/use-live-check';
-import { countFindings, entriesOf, sharesCause, sortFindings } from '../model/report-view';
+import {
+  countFindings,
+  entriesOf,
+  partWords,
+  reportIn,
+  sharesCause,
+  sortFindings,
+} from '../model/report-view';
+import type { Preview } from '../worker/messages';
 import { PutButton } from './put-button';
 import type { OnPut } from './put-button';
 
@@ -82,21 +90,27 @@ function LooseFindings({ findings, report, onPut }: PartProps & { findings: Circ
   });
 }
 
-function Waiting({ count }: { count: number }) {
+/** What is said while a line cannot be filed yet: what the check speaks of so far, and how much is owed. */
+function Owed({ count, preview }: { count: number; preview: Preview | null }) {
+  const fields = count === 1 ? 'one more field' : `${count} more fields`;
+  const part = preview && partWords(preview);
+  const begins = 'The check begins with the voltage and a declared value, or a section’s whole geometry.';
   return (
-    <p className="px-6 pb-6 text-control text-ink-soft">
-      {count === 1
-        ? 'The check begins once one more field holds a value it can use.'
-        : `The check begins once ${count} more fields hold values it can use.`}
+    <p className="px-6 pb-4 text-control text-ink-soft">
+      {!preview && `${begins} `}
+      {part && `Recomputed from ${part} so far; declared values are weighed once every section is whole. `}
+      {preview && !part && preview.whole.length === 0 && 'Recomputed once the geometry is whole. '}
+      {`Filing needs ${fields} with a value that can be used.`}
     </p>
   );
 }
 
 /** How many findings of each grade, at the head of the sheet. */
-function Counts({ report }: { report: LineReport }) {
+function Counts({ report, partial }: { report: LineReport; partial: boolean }) {
   const counts = countFindings(report);
   const shown = FINDING_GRADES.filter((grade) => counts[grade] > 0);
-  if (shown.length === 0) return <GradeLabel grade="in-balance" />;
+  // Of a line that is not whole nobody can say that it is in balance.
+  if (shown.length === 0) return partial ? null : <GradeLabel grade="in-balance" />;
   return (
     <span className="flex flex-wrap justify-end gap-x-4">
       {shown.map((grade) => (
@@ -110,15 +124,18 @@ function Counts({ report }: { report: LineReport }) {
 
 interface LiveCheckPanelProps {
   check: LiveCheck;
+  /** How many fields stand in the way of filing. */
+  owed: number;
   onPut: OnPut;
 }
 
 /** The check beside the form: the same rules as the server's, and a preview of it only. */
-export function LiveCheckPanel({ check, onPut }: LiveCheckPanelProps) {
+export function LiveCheckPanel({ check, owed, onPut }: LiveCheckPanelProps) {
   const { outcome, failed } = check;
-  const report = outcome?.kind === 'report' ? outcome.report : null;
+  const report = reportIn(outcome);
+  const partial = outcome?.kind === 'faults';
   return (
-    <Sheet id="live-check" title="Live check" aside={report && <Counts report={report} />}>
+    <Sheet id="live-check" title="Live check" aside={report && <Counts report={report} partial={partial} />}>
       <div aria-busy={check.pending || undefined}>
         {failed && (
           <Notice grade="explain" className="mx-6 mb-6">
@@ -131,7 +148,7 @@ export function LiveCheckPanel({ check, onPut }: LiveCheckPanelProps) {
             <SkeletonLines lines={5} label="The check is starting" />
           </div>
         )}
-        {outcome?.kind === 'faults' && <Waiting count={outcome.faults.length} />}
+        {partial && <Owed count={owed} preview={outcome.preview} />}
         {report && (
           <>
             {report.circuits.map((circuit) => (

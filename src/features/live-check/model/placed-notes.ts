@@ -1,7 +1,7 @@
 import type { Finding, LineReport } from '#shared/checks/types';
 import type { PointerFault } from '#shared/contracts/faults';
 import type { CheckOutcome } from '../worker/messages';
-import { allFindings } from './report-view';
+import { allFindings, reportIn } from './report-view';
 
 /** A word at a place of the line. */
 export interface Placed {
@@ -45,16 +45,18 @@ export function blockersOf(outcome: CheckOutcome | null): Placed[] {
 
 /** Findings about the geometry itself, to be said at the field that they are about. */
 export function drawingNotes(outcome: CheckOutcome | null): Placed[] {
-  if (outcome?.kind !== 'report') return [];
-  return allFindings(outcome.report)
+  const report = reportIn(outcome);
+  if (!report) return [];
+  return allFindings(report)
     .filter((f) => isOfDrawing(f) && namesAnEntry(f))
     .map(placed);
 }
 
 /** Positions of a section, by index, that a Must answer about the drawing names. */
 export function badPositions(outcome: CheckOutcome | null, section: number): Set<number> {
-  if (outcome?.kind !== 'report') return new Set();
-  const named = allFindings(outcome.report).filter(
+  const report = reportIn(outcome);
+  if (!report) return new Set();
+  const named = allFindings(report).filter(
     (f) => f.family === 'drawing' && f.grade === 'must-answer' && f.section === section,
   );
   return new Set(named.flatMap((f) => (f.position === undefined ? [] : [f.position])));

@@ -2,6 +2,22 @@ import type { CircuitReport, Finding, LineReport } from '#shared/checks/types';
 import type { GradeCounts } from '../../../components/ui/grades';
 import { balanceEntries, balanceOrder, rowOf } from '../../../components/charts/balance-entries';
 import type { BalanceEntry } from '../../../components/charts/balance-entry';
+import type { CheckOutcome, Preview } from '../worker/messages';
+
+/** The check of the line, or of what holds in it; null while there is nothing to weigh. */
+export function reportIn(outcome: CheckOutcome | null): LineReport | null {
+  if (!outcome) return null;
+  return outcome.kind === 'report' ? outcome.report : (outcome.preview?.report ?? null);
+}
+
+/** Of which sections the recomputed side speaks, where it does not speak of all: "section 1 of 2". */
+export function partWords({ whole, sections }: Preview): string | null {
+  if (whole.length === 0 || whole.length === sections) return null;
+  const numbers = whole.map((i) => i + 1);
+  const last = numbers.pop();
+  const list = numbers.length > 0 ? `${numbers.join(', ')} and ${last}` : `${last}`;
+  return `section${numbers.length > 0 ? 's' : ''} ${list} of ${sections}`;
+}
 
 /** Every finding of a line, those of its circuits first. */
 export const allFindings = (report: LineReport): Finding[] => [

@@ -19,9 +19,19 @@ export interface CheckQuestion {
 
 export type ToWorker = { kind: 'basis'; basis: CheckBasis } | { kind: 'check'; question: CheckQuestion };
 
-/** What came of a line: what keeps it from being checked, or what the check found. */
+/** The check of what holds in a line that cannot be filed yet. */
+export interface Preview {
+  report: LineReport;
+  /** Indices of the sections whose geometry is whole. */
+  whole: readonly number[];
+  /** How many sections the line has. */
+  sections: number;
+}
+
+/** What came of a line: what keeps it from being filed, with the check of its parts; or what the check found. */
 export type CheckOutcome =
-  { kind: 'faults'; faults: PointerFault[] } | { kind: 'report'; report: LineReport };
+  | { kind: 'faults'; faults: PointerFault[]; preview: Preview | null }
+  | { kind: 'report'; report: LineReport };
 
 export interface FromWorker {
   id: number;

@@ -11,6 +11,8 @@ import {
 import {
   countFindings,
   entriesOf,
+  partWords,
+  reportIn,
   sharesCause,
   sortFindings,
 } from '../../../../src/features/live-check/model/report-view';
@@ -127,6 +129,24 @@ describe('the live check of a line', () => {
     expect(x1.group).toBe(b1.group);
     expect(x1.causes[0]?.code).toBe('frequency');
     expect([x1, b1].map((f) => sharesCause(f, report))).toEqual([false, true]);
+  });
+
+  it('checks the parts of a line that cannot be filed yet, and says that they are parts', () => {
+    const { name: _, ...unnamed } = line({ x1: 0.6135 });
+    const outcome = checkDraftLine({ id: 1, line: unnamed, written: {} }, basis);
+    if (outcome.kind !== 'faults' || !outcome.preview) throw new Error('a preview was to be there');
+    expect(outcome.faults.map((f) => f.pointer)).toEqual(['/name']);
+    expect(outcome.preview).toMatchObject({ whole: [0], sections: 1 });
+    expect(partWords(outcome.preview)).toBeNull();
+    expect(countFindings(outcome.preview.report)['must-answer']).toBe(1);
+    expect(reportIn(outcome)).toBe(outcome.preview.report);
+  });
+
+  it('says of which sections the recomputed side speaks', () => {
+    const report = reportOf(check());
+    expect(partWords({ report, whole: [1], sections: 2 })).toBe('section 2 of 2');
+    expect(partWords({ report, whole: [0, 1, 3], sections: 4 })).toBe('sections 1, 2 and 4 of 4');
+    expect(partWords({ report, whole: [], sections: 2 })).toBeNull();
   });
 
   it('says at which field a fault sits, with pointers within the line', () => {
