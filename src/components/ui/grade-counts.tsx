@@ -1,5 +1,12 @@
 import { GradeLabel, GradeMark } from './grade-mark';
-import { FINDING_GRADES, GRADE_WORDS, gradeSentence, worstGrade, type GradeCounts } from './grades';
+import {
+  FINDING_GRADES,
+  GRADE_WORDS,
+  countWords,
+  gradeSentence,
+  worstGrade,
+  type GradeCounts,
+} from './grades';
 
 /** Counts in three fixed slots, so that a column of them can be compared; for dense tables. */
 export function GradeSlots({ counts }: { counts: GradeCounts }) {
@@ -55,10 +62,9 @@ export function GradeTally({
   return (
     <p className="tally">
       {FINDING_GRADES.filter((grade) => (counts[grade] ?? 0) > 0).map((grade) => (
-        <GradeLabel
-          key={grade}
-          grade={grade}
-        >{`${counts[grade]} ${GRADE_WORDS[grade].toLowerCase()}`}</GradeLabel>
+        <GradeLabel key={grade} grade={grade}>
+          {countWords(counts[grade] ?? 0, grade)}
+        </GradeLabel>
       ))}
       {inBalance !== undefined && inBalance > 0 && (
         <GradeLabel grade="in-balance">{`${inBalance} in balance`}</GradeLabel>

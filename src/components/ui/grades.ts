@@ -21,10 +21,14 @@ export function worstGrade(counts: GradeCounts): Grade {
   return FINDING_GRADES.find((grade) => (counts[grade] ?? 0) > 0) ?? 'in-balance';
 }
 
+/** So many findings of a grade: "1 note", "3 notes"; what must be answered or explained has no plural. */
+export const countWords = (count: number, grade: FindingGrade): string =>
+  `${count} ${grade === 'note' && count !== 1 ? 'notes' : GRADE_WORDS[grade].toLowerCase()}`;
+
 /** Counts as words for a name: "1 must answer, 2 explain", or "In balance". */
 export function gradeSentence(counts: GradeCounts): string {
-  const parts = FINDING_GRADES.filter((grade) => (counts[grade] ?? 0) > 0).map(
-    (grade) => `${counts[grade]} ${GRADE_WORDS[grade].toLowerCase()}`,
+  const parts = FINDING_GRADES.filter((grade) => (counts[grade] ?? 0) > 0).map((grade) =>
+    countWords(counts[grade] ?? 0, grade),
   );
   return parts.length > 0 ? parts.join(', ') : GRADE_WORDS['in-balance'];
 }

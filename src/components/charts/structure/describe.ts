@@ -6,7 +6,7 @@ function across(position: DrawnPosition, unit: DrawingUnit): string {
   return `${lengthText(Math.abs(position.horizontalM), unit)} ${side} of the centre line`;
 }
 
-/** What a position is called: "Phase a", "Phase 2b" as its disc says, "Ground wire gw 1". */
+/** What a position is called: "Phase a", "Phase 2b" as its disc says, "Ground wire 1". */
 export function positionName(position: DrawnPosition, circuits: number): string {
   if (position.kind === 'ground-wire') return `Ground wire ${position.label}`.trimEnd();
   return circuits > 1 ? `Phase ${position.circuit}${position.label}` : `Phase ${position.label}`;

@@ -1,8 +1,10 @@
+import { quantity } from '#shared/format/numbers';
+
 /** A place where wires hang, as the drawing needs it. Metres; horizontal from the centre line, to the right. */
 export interface DrawnPosition {
   id: string;
   kind: 'phase' | 'ground-wire';
-  /** The letter in the disc: a, b, c. Ground wires have none in the drawing. */
+  /** The letter in the disc: a, b, c. Of ground wires their number, for their name only. */
   label: string;
   /** Numbered from 1; of ground wires meaningless. */
   circuit: number;
@@ -47,6 +49,11 @@ export function lengthText(lengthM: number, unit: DrawingUnit): string {
 /** A bundle spacing with its unit. */
 export function smallLengthText(lengthM: number, { small }: DrawingUnit): string {
   return `${(lengthM / small.metres).toFixed(small.digits)}\u2009${small.symbol}`;
+}
+
+/** A limit with its unit, in three significant digits: it was not measured to the centimetre. */
+export function limitText(lengthM: number, unit: DrawingUnit): string {
+  return quantity(lengthM / unit.metres, unit.name === 'feet' ? 'ft' : 'm');
 }
 
 /** Height left at mid-span. */

@@ -2,7 +2,7 @@ import { useWidth } from '../../../hooks/use-width';
 import { BundleLens } from './bundle-lens';
 import { describeStructure } from './describe';
 import { DimensionLine } from './dimension-line';
-import { lengthText, METRES, type DrawingUnit, type DrawnPosition } from './drawn-position';
+import { limitText, METRES, type DrawingUnit, type DrawnPosition } from './drawn-position';
 import { PositionMark, SagDrop } from './position-mark';
 import { layOutStructure, type StructureLayout } from './structure-layout';
 import { usePositionDrag, type Moved } from './use-position-drag';
@@ -75,9 +75,7 @@ export function StructureDrawing({
   const layout = layOutStructure(positions, { width, tallest, unit, clearanceM, extent: keptExtent });
   const { frame, marks, discRadius: radius, circuits, extent } = layout;
   const height = layout.height + 18;
-  const symbol = unit.name === 'feet' ? 'ft' : 'm';
-  const clearance =
-    clearanceM === null ? '' : `${lengthText(clearanceM, unit)}\u2009${symbol}, the least clearance`;
+  const clearance = clearanceM === null ? '' : `${limitText(clearanceM, unit)}, the least clearance`;
   const description = describeStructure(positions, circuits, unit, clearanceM);
   return (
     <div ref={box} className="min-w-0">

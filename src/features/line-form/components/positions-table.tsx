@@ -81,10 +81,10 @@ function PositionRow({
     <Row className="[&>*]:!border-b-0 [&>*]:!py-1">
       <RowHead className="!pr-1 font-semibold">
         <span className="inline-flex items-center gap-2">
-          <PositionMark position={position} />
+          <PositionMark position={position} circuits={form.circuits} />
           <span className="sr-only field:not-sr-only">{words}</span>
           <span aria-hidden="true" className="text-label field:hidden">
-            {position.kind === 'phase' && form.circuits === 2 ? position.circuit : name.replace(/\D/g, '')}
+            {position.kind === 'phase' ? '' : name.replace(/\D/g, '')}
           </span>
         </span>
       </RowHead>

@@ -11,13 +11,13 @@ function metres(field: Typed): number {
 const metresOr = (field: Typed, otherwise: number): number =>
   field.text.trim() === '' ? otherwise : metres(field);
 
-function drawn(position: PositionForm, index: number, bad: boolean): DrawnPosition {
+function drawn(position: PositionForm, index: number, label: string, bad: boolean): DrawnPosition {
   const phase = position.kind === 'phase' ? position : null;
   const count = phase ? readNumber(phase.bundleCount) : null;
   return {
     id: String(index),
     kind: position.kind,
-    label: phase?.phase ?? '',
+    label,
     circuit: phase?.circuit ?? 0,
     horizontalM: metres(position.horizontalM),
     attachmentHeightM: metres(position.attachmentHeightM),
@@ -28,10 +28,19 @@ function drawn(position: PositionForm, index: number, bad: boolean): DrawnPositi
   };
 }
 
+/** The letter of a phase; the number of a ground wire where there are several. */
+function labelAt(section: SectionForm, index: number): string {
+  const at = section.positions[index];
+  if (at?.kind === 'phase') return at.phase;
+  const isGround = (p: PositionForm): boolean => p.kind === 'ground-wire';
+  if (section.positions.filter(isGround).length < 2) return '';
+  return String(section.positions.slice(0, index + 1).filter(isGround).length);
+}
+
 /** The positions of a section that can be drawn: those whose figures are numbers. Ids are their indices. */
 export function drawnPositions(section: SectionForm, bad?: ReadonlySet<number>): DrawnPosition[] {
   return section.positions
-    .map((p, i) => drawn(p, i, bad?.has(i) ?? false))
+    .map((p, i) => drawn(p, i, labelAt(section, i), bad?.has(i) ?? false))
     .filter((p) => [p.horizontalM, p.attachmentHeightM, p.sagM].every(Number.isFinite))
     .map((p) => (Number.isFinite(p.bundleSpacingM) ? p : { ...p, bundleSpacingM: 0 }));
 }

@@ -43,7 +43,7 @@ describe('grades', () => {
   it('counts have their words in the accessible name, in tables and in lists', () => {
     render(<GradeSlots counts={{ 'must-answer': 1, note: 2 }} />);
     render(<GradeCountsInline counts={{ explain: 4 }} />);
-    expect(screen.getByRole('img', { name: '1 must answer, 2 note' })).toBeInTheDocument();
+    expect(screen.getByRole('img', { name: '1 must answer, 2 notes' })).toBeInTheDocument();
     expect(screen.getByRole('img', { name: '4 explain' })).toBeInTheDocument();
   });
 });

@@ -14,6 +14,15 @@ describe('form and drawing are one state', () => {
     expect(ground).toMatchObject({ id: '3', kind: 'ground-wire' });
   });
 
+  it('numbers ground wires where there are several', () => {
+    const labels = (count: number) =>
+      drawnPositions(applyTemplate(setGroundWires(blankSection(1), count), 'flat', 345))
+        .filter((p) => p.kind === 'ground-wire')
+        .map((p) => p.label);
+    expect(labels(1)).toEqual(['']);
+    expect(labels(3)).toEqual(['1', '2', '3']);
+  });
+
   it('leaves out what is not entered yet or is no number, and takes a missing sag for none', () => {
     const positions = section.positions.map((p, i) =>
       i === 1

@@ -1,6 +1,7 @@
 import { fireEvent, render, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { describe, expect, it, vi } from 'vitest';
+import { FEET } from '../../../../../src/components/charts/structure/drawn-position';
 import { StructureDrawing } from '../../../../../src/components/charts/structure/structure-drawing';
 import { DELTA, FLAT, TWO_CIRCUITS } from './positions';
 
@@ -21,6 +22,13 @@ describe('structure drawing', () => {
     unmount();
     const two = render(<StructureDrawing positions={TWO_CIRCUITS} />).container;
     expect([...two.querySelectorAll('text.font-bold')].map((t) => t.textContent)).toContain('2b');
+  });
+
+  it('writes the least clearance in three digits, whatever the unit', () => {
+    const low = FLAT.map((p) => ({ ...p, sagM: p.attachmentHeightM - 5 }));
+    // 7.5 m are 24.606 ft.
+    const { container } = render(<StructureDrawing positions={low} unit={FEET} clearanceM={7.5} />);
+    expect(container).toHaveTextContent('24.6\u2009ft, the least clearance');
   });
 
   it('moves a position by the arrow keys and tells which one has the focus', async () => {
