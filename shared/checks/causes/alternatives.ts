@@ -1,5 +1,7 @@
+import { SEQUENCE_KEYS } from '../../engine/index';
 import type { Cause } from '../types';
-import { percent } from '../words';
+import { PARAMETER_WORDS } from '../parameters';
+import { quantity } from '../words';
 import type { Cover } from './cover';
 import type { Item } from './item';
 import { inWords, logDensity, namesIn, scatterOf, score, worstResidual } from './item';
@@ -85,6 +87,24 @@ export function toCause(item: Item, targets: readonly Target[]): Cause {
     corrected: { ...item.corrected },
     ...(item.where === undefined ? {} : { where: item.where }),
     residual,
-    sentence: `Fits within ${percent(Math.max(residual, 1e-5))} if ${inWords(item.words)}.`,
+    sentence: `Fits within ${fitOf(residual)} if ${inWords(item.words)}${valuesIn(item)}.`,
   };
+}
+
+/** Most values that a sentence names; the table shows the others. */
+const MOST_VALUES = 3;
+
+/** How well a slip fits, rounded up to a tenth of a per cent: no reader's data are known better than that. */
+function fitOf(residual: number): string {
+  return `${Math.max(1, Math.ceil(residual * 1000 - 1e-6)) / 10}\u2009%`;
+}
+
+/** The values that a slip in the declared data gives, as they end its sentence. */
+function valuesIn(item: Item): string {
+  if (item.in !== 'declared') return '';
+  const names = SEQUENCE_KEYS.filter((key) => item.corrected[key] !== undefined).slice(0, MOST_VALUES);
+  const values = names.map(
+    (key) => `${PARAMETER_WORDS[key].label} is ${quantity(key, item.corrected[key] ?? 0, 4)}`,
+  );
+  return values.length === 0 ? '' : `: ${values.join(', ')}`;
 }

@@ -28,6 +28,7 @@ describe('causes in the declared values', () => {
     // 0.6135 ÷ 1.609344 = 0.381211…, 3e-5 above 0.381199.
     expect(cause?.corrected['x1']).toBeCloseTo(0.381211, 6);
     expect(cause?.residual).toBeLessThan(5e-5);
+    expect(cause?.sentence).toBe('Fits within 0.1\u2009% if the value is per mile: X1 is 0.3812\u2009Ω/km.');
   });
 
   it('all of Z and B per mile are one matter with one cause', () => {
