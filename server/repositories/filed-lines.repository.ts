@@ -57,7 +57,7 @@ function linesSql(seen: string, sight: Sight): string {
     lines AS (
       SELECT revision.id::text || ' ' || l.line_key AS id, l.line_key AS "lineKey", l.ordinal, c.name,
         c.nominal_voltage_kv AS "nominalVoltageKv", c.frequency_hz AS "frequencyHz", c.length_km AS "lengthKm", c.body,
-        a.id AS "applicationId", a.number AS "applicationNumber", a.title AS "applicationTitle", a.org_id AS "orgId",
+        a.id AS "applicationId", a.number AS "applicationNumber", revision.title AS "applicationTitle", a.org_id AS "orgId",
         org.name AS applicant, round.state, revision.letter AS revision, coalesce(run.status = 'done', false) AS checked,
         coalesce(grades.must_answer, 0) AS "mustAnswer", coalesce(grades.explain, 0) AS explain,
         coalesce(grades.note, 0) AS note
@@ -66,7 +66,7 @@ function linesSql(seen: string, sight: Sight): string {
       JOIN organisations org ON org.id = a.org_id
       JOIN LATERAL (SELECT r.state FROM rounds r WHERE r.application_id = a.id ${filedOnly}
                      ORDER BY r.ordinal DESC LIMIT 1) round ON true
-      JOIN LATERAL (SELECT v.id, v.letter FROM revisions v WHERE v.application_id = a.id
+      JOIN LATERAL (SELECT v.id, v.letter, v.particulars ->> 'title' AS title FROM revisions v WHERE v.application_id = a.id
                      ORDER BY v.ordinal DESC LIMIT 1) revision ON true
       JOIN revision_lines l ON l.revision_id = revision.id
       JOIN line_versions c ON c.org_id = l.org_id AND c.hash = l.line_hash

@@ -50,7 +50,7 @@ export async function listLetters(
   }
   const withs = `WITH seen AS (${seen}), all_letters AS (
       SELECT l.id::text AS id, l.number, a.id AS "applicationId", a.number AS "applicationNumber",
-        a.title AS "applicationTitle", l.kind, l.subject, v.letter AS revision, l.sha256,
+        v.particulars ->> 'title' AS "applicationTitle", l.kind, l.subject, v.letter AS revision, l.sha256,
         octet_length(l.bytes) AS "byteLength", l.issued_at AS "sentAt", l.issued_by AS "sentById", l.due_at AS "dueAt"
       FROM seen JOIN applications a ON a.id = seen.id JOIN letters l ON l.application_id = a.id
       JOIN revisions v ON v.id = l.revision_id),

@@ -65,12 +65,18 @@ function overviewSql(seen: string, sight: Sight): string {
       : '';
   const draftLines =
     sight === 'drafts' ? '(SELECT count(*)::int FROM draft_lines d WHERE d.round_id = round.id)' : '0';
+  // what the applicant changes for the next revision is a draft until it is filed
+  const particular = (key: string, column: string, type: string) =>
+    sight === 'drafts'
+      ? `a.${column}`
+      : `(CASE WHEN revision.id IS NULL THEN a.${column} ELSE (revision.particulars ->> '${key}')::${type} END)`;
   return `
     seen AS (${seen}),
     overview AS (
-      SELECT a.id, a.number, a.title, a.org_id AS "orgId", org.name AS applicant,
-        a.connection_kind AS "connectionKind", a.capacity_mw AS "capacityMw",
-        a.point_of_connection AS "pointOfConnection", a.created_at AS "createdAt", a.updated_at AS "updatedAt",
+      SELECT a.id, a.number, ${particular('title', 'title', 'text')} AS title, a.org_id AS "orgId", org.name AS applicant,
+        ${particular('connectionKind', 'connection_kind', 'text')} AS "connectionKind",
+        ${particular('capacityMw', 'capacity_mw', 'double precision')} AS "capacityMw",
+        ${particular('pointOfConnection', 'point_of_connection', 'text')} AS "pointOfConnection", a.created_at AS "createdAt", a.updated_at AS "updatedAt",
         round.id AS "roundId", round.ordinal AS "roundOrdinal", round.state, round.version,
         round.reviewer_id AS "reviewerId", reviewer.display_name AS reviewer,
         revision.id AS "revisionId", revision.letter AS revision, coalesce(revision.ordinal, 0) AS "revisionOrdinal",

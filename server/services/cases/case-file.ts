@@ -39,10 +39,17 @@ export async function holdCase(caller: Caller, reference: string, action: Action
   return complete(caller, application, await lockRound(tx.manager, round.id));
 }
 
-async function complete({ tx }: Caller, application: Application, round: Round): Promise<CaseFile> {
-  const revision = await latestRevision(tx.manager, application.id);
+async function complete({ tx, actor }: Caller, live: Application, round: Round): Promise<CaseFile> {
+  const revision = await latestRevision(tx.manager, live.id);
   const run = revision === null ? null : await governingRun(tx.manager, revision.id);
+  const application = actor.role === 'applicant' || revision === null ? live : asFiled(live, revision);
   return { application, round, revision, run };
+}
+
+/** What the applicant changes of the head for the next revision is a draft, which the owner's people do not see. */
+function asFiled(application: Application, { particulars }: Revision): Application {
+  const { note: _note, ...head } = particulars;
+  return { ...application, ...(head as Partial<Application>) };
 }
 
 /** The current revision of a case whose state says that there is one. */

@@ -286,3 +286,25 @@ describe('an adopted run', () => {
     expect(proposed.disposition).toMatchObject({ kind: 'waived', inForce: false });
   });
 });
+
+it('what the applicant changes of the head before filing again is no business of the owner’s people', async () => {
+  number = await aCaseInReview(app, applicant, reviewer, [aLine('Sarn tie')]);
+  const raise = { revision: 'A', title: 'Length', question: 'Is it 40 km?', lineKeys: ['L1'] };
+  await expecting(201, reviewer.post(at('/discrepancies'), raise));
+  const { version } = await step(reviewer, number, 'return', { revision: 'A' });
+  const contact = { name: 'A. Draft', email: 'draft@fellgate.example', phone: '1' };
+  const head = { title: 'Unfiled title', capacityMw: null, pointOfConnection: 'Unfiled', contact };
+  await expecting(200, applicant.patch(at(), { version, ...head }));
+  expect((await applicant.get(at())).body).toMatchObject(head);
+  const filed = { title: PARTICULARS.title, capacityMw: 480, contact: PARTICULARS.contact };
+  expect((await reviewer.get(at())).body).toMatchObject(filed);
+  for (const path of ['/api/queue', '/api/applications', '/api/letters', '/api/lines']) {
+    const { status, text } = await reviewer.get(path);
+    expect(status, path).toBe(200);
+    expect(text, path).not.toMatch(/Unfiled|A\. Draft/);
+  }
+  const answer = { by: 'explanation', text: 'It is.' };
+  await expecting(200, applicant.post(at('/discrepancies/1/answer'), answer));
+  await step(applicant, number, 'file');
+  expect((await reviewer.get(at())).body).toMatchObject(head);
+});
