@@ -3,36 +3,34 @@ import { Field } from '../../../components/ui/field';
 import { Select } from '../../../components/ui/inputs';
 import { useLineFormView } from '../hooks/form-context';
 import { useFieldTies } from '../hooks/use-field';
-import {
-  chooseFromLibrary,
-  conductorWords,
-  familyOf,
-  isForGroundWires,
-  ownData,
-} from '../model/conductor-choice';
+import { chooseFromLibrary, conductorWords, ownData } from '../model/conductor-choice';
+import { offeredFor } from '../model/conductor-groups';
+import type { ConductorUse } from '../model/conductor-groups';
 import type { ConductorForm } from '../model/form-types';
 import { OwnConductor } from './own-conductor';
 import { TypedField } from './typed-field';
 
 const OWN = '\u0000own';
 
-/** The library's conductors by family; those that lack what the model needs stand there but cannot be chosen. */
-function LibraryOptions({ conductors, current }: { conductors: readonly Conductor[]; current: string }) {
-  const shown = conductors.filter((c) => !c.retired || c.name === current);
-  const families = [...new Set(shown.map(familyOf))];
-  const unknown = current !== '' && !shown.some((c) => c.name === current);
+interface LibraryOptionsProps {
+  conductors: readonly Conductor[];
+  current: string;
+  use: ConductorUse;
+}
+
+/** The library's conductors, those of the use first; what lacks data stands at the end, closed. */
+function LibraryOptions({ conductors, current, use }: LibraryOptionsProps) {
+  const unknown = current !== '' && !conductors.some((c) => c.name === current);
   return (
     <>
       {unknown && <option value={current}>{`${current} (not in the list)`}</option>}
-      {families.map((family) => (
-        <optgroup key={family} label={family}>
-          {shown
-            .filter((c) => familyOf(c) === family)
-            .map((c) => (
-              <option key={c.name} value={c.name} disabled={!c.choosable}>
-                {!c.choosable ? `${c.name} (data missing)` : c.name}
-              </option>
-            ))}
+      {offeredFor(use, conductors, current).map(({ label, closed, items }) => (
+        <optgroup key={label} label={label} disabled={closed}>
+          {items.map((c) => (
+            <option key={c.name} value={c.name}>
+              {c.name}
+            </option>
+          ))}
         </optgroup>
       ))}
     </>
@@ -52,11 +50,6 @@ export function ConductorFields({ section, name, conductor, label }: ConductorFi
   const path = ['sections', section, 'conductors', name] as const;
   const { error, hint: _, ...ties } = useFieldTies([...path, 'library']);
   const chosen = conductors.find((c) => c.name === conductor.library);
-  const grounds = name.startsWith('ground');
-  const offered = [...conductors].sort(
-    (a, b) =>
-      Number(isForGroundWires(familyOf(b)) === grounds) - Number(isForGroundWires(familyOf(a)) === grounds),
-  );
   const choose = (value: string) =>
     set(path, value === OWN ? ownData(conductor, chosen) : chooseFromLibrary(conductor, conductors, value));
   return (
@@ -73,7 +66,11 @@ export function ConductorFields({ section, name, conductor, label }: ConductorFi
             >
               <option value="">choose one</option>
               <option value={OWN}>Own data sheet</option>
-              <LibraryOptions conductors={offered} current={conductor.library} />
+              <LibraryOptions
+                conductors={conductors}
+                current={conductor.library}
+                use={name.startsWith('ground') ? 'ground' : 'phase'}
+              />
             </Select>
           )}
         </Field>

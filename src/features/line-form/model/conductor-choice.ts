@@ -12,9 +12,6 @@ export const rowOf = ({ row }: Conductor): LibraryConductor => row as unknown as
 
 export const familyOf = (conductor: Conductor): string => rowOf(conductor).family;
 
-/** Families that are offered first where a ground wire is asked for. */
-export const isForGroundWires = (family: string): boolean => /shield|ground/i.test(family);
-
 /** What a conductor is meant at while nobody says otherwise, °C: where most tables have a value. */
 const USUAL_C = 50;
 

@@ -6,7 +6,7 @@ import { FindingSays } from '../../../components/charts/finding-says';
 import { Notice } from '../../../components/feedback/notice';
 import { SkeletonLines } from '../../../components/feedback/skeleton';
 import { GradeLabel } from '../../../components/ui/grade-mark';
-import { FINDING_GRADES, GRADE_WORDS } from '../../../components/ui/grades';
+import { FINDING_GRADES, countWords } from '../../../components/ui/grades';
 import { Sheet } from '../../../components/ui/sheet';
 import { rowOf } from '../../../components/charts/balance-entries';
 import type { LiveCheck } from '../hooks/use-live-check';
@@ -20,14 +20,14 @@ import {
 } from '../model/report-view';
 import type { Preview } from '../worker/messages';
 import { PutButton } from './put-button';
-import type { OnPut } from './put-button';
+import type { Corrections } from './put-button';
 
 interface PartProps {
   report: LineReport;
-  onPut: OnPut;
+  corrections: Corrections;
 }
 
-function rowFindings(circuit: CircuitReport, { report, onPut }: PartProps): Map<string, RowFinding[]> {
+function rowFindings(circuit: CircuitReport, { report, corrections }: PartProps): Map<string, RowFinding[]> {
   const rows = new Map<string, RowFinding[]>();
   sortFindings(circuit).inRows.forEach((finding, i) => {
     const row = rowOf(finding.parameter) ?? '';
@@ -40,7 +40,7 @@ function rowFindings(circuit: CircuitReport, { report, onPut }: PartProps): Map<
         grade: finding.grade,
         says: <FindingSays message={shared ? `${finding.message} Same cause.` : finding.message} />,
         causes: own,
-        acts: !shared && <PutButton finding={finding} onPut={onPut} />,
+        acts: !shared && <PutButton finding={finding} corrections={corrections} />,
       },
     ]);
   });
@@ -69,7 +69,11 @@ function CircuitBalance({ circuit, ...part }: PartProps & { circuit: CircuitRepo
   );
 }
 
-function LooseFindings({ findings, report, onPut }: PartProps & { findings: CircuitReport['findings'] }) {
+function LooseFindings({
+  findings,
+  report,
+  corrections,
+}: PartProps & { findings: CircuitReport['findings'] }) {
   return findings.map((finding, i) => {
     const shared = sharesCause(finding, report);
     return (
@@ -77,7 +81,7 @@ function LooseFindings({ findings, report, onPut }: PartProps & { findings: Circ
         key={`${finding.code}-${i}`}
         grade={finding.grade}
         says={<FindingSays message={shared ? `${finding.message} Same cause.` : finding.message} />}
-        acts={!shared && <PutButton finding={finding} onPut={onPut} />}
+        acts={!shared && <PutButton finding={finding} corrections={corrections} />}
       >
         {!shared &&
           finding.causes.map((cause, c) => (
@@ -115,7 +119,7 @@ function Counts({ report, partial }: { report: LineReport; partial: boolean }) {
     <span className="flex flex-wrap justify-end gap-x-4">
       {shown.map((grade) => (
         <GradeLabel key={grade} grade={grade}>
-          {`${counts[grade]} ${GRADE_WORDS[grade].toLowerCase()}`}
+          {countWords(counts[grade], grade)}
         </GradeLabel>
       ))}
     </span>
@@ -126,11 +130,11 @@ interface LiveCheckPanelProps {
   check: LiveCheck;
   /** How many fields stand in the way of filing. */
   owed: number;
-  onPut: OnPut;
+  corrections: Corrections;
 }
 
 /** The check beside the form: the same rules as the server's, and a preview of it only. */
-export function LiveCheckPanel({ check, owed, onPut }: LiveCheckPanelProps) {
+export function LiveCheckPanel({ check, owed, corrections }: LiveCheckPanelProps) {
   const { outcome, failed } = check;
   const report = reportIn(outcome);
   const partial = outcome?.kind === 'faults';
@@ -152,12 +156,17 @@ export function LiveCheckPanel({ check, owed, onPut }: LiveCheckPanelProps) {
         {report && (
           <>
             {report.circuits.map((circuit) => (
-              <CircuitBalance key={circuit.circuit} circuit={circuit} report={report} onPut={onPut} />
+              <CircuitBalance
+                key={circuit.circuit}
+                circuit={circuit}
+                report={report}
+                corrections={corrections}
+              />
             ))}
             <LooseFindings
               findings={report.findings.filter((f) => !f.follows)}
               report={report}
-              onPut={onPut}
+              corrections={corrections}
             />
           </>
         )}
