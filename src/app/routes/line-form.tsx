@@ -80,7 +80,7 @@ function LinePage({ input }: { input: LineEditorInput }) {
   const findings = useMemo(() => drawingNotes(outcome), [outcome]);
   const notes = useFieldNotes(editor.form, [...editor.textNotes, ...blockers], findings);
   const settings = useFormSettings(editor.form);
-  const { put, values, keep, undo } = usePut(editor);
+  const { put, offer, values, keep, undo } = usePut(editor);
   usePutFromElsewhere(put);
   useLeaveGuard(editor.save.kind === 'failed' || editor.save.kind === 'conflict');
   const isNew = !draft.lines.some((l) => l.lineKey === lineKey);
@@ -113,7 +113,7 @@ function LinePage({ input }: { input: LineEditorInput }) {
         clearanceM={settings.clearanceM}
         badPositions={(section) => badPositions(outcome, section)}
       >
-        <LiveCheckPanel check={check} owed={notes.all.length} onPut={put} />
+        <LiveCheckPanel check={check} owed={notes.all.length} corrections={{ offer, put }} />
       </LineForm>
       <FindingCount check={check} />
     </>

@@ -59,7 +59,8 @@ export function lengthUnitSlips(context: VariantContext): Variant[] {
         const place = {
           where: group.length === 1 ? sectionPointer(context, first.index) : context.line.pointer,
         };
-        const corrected = group.length === 1 ? entries(first.section, fields, factor) : { factor };
+        const corrected =
+          group.length === 1 ? entries(first.section, fields, factor) : entriesOf(group, fields, factor);
         const common = { in: 'geometry', model: ENGINE_MODEL, freedom: 0 } as const;
         return [{ ...common, ...place, code, outcome, corrected, prior, words: `${words} are in ${unit}` }];
       }),
@@ -96,6 +97,21 @@ function scaled(section: OverheadSection, fields: readonly Field[], factor: numb
 function fieldOf(position: Position, field: Field): number | undefined {
   if (field === 'bundleSpacingM') return position.kind === 'phase' ? position.bundleSpacingM : undefined;
   return position[field];
+}
+
+/** The corrected entries of several sections, named from the line. */
+function entriesOf(
+  group: readonly { section: OverheadSection; index: number }[],
+  fields: readonly Field[],
+  factor: number,
+): Record<string, number> {
+  const named = group.flatMap(({ section, index }) =>
+    Object.entries(entries(section, fields, factor)).map(([key, value]) => [
+      `sections/${index}/${key}`,
+      value,
+    ]),
+  );
+  return Object.fromEntries(named) as Record<string, number>;
 }
 
 function entries(section: OverheadSection, fields: readonly Field[], factor: number): Record<string, number> {

@@ -1,8 +1,9 @@
 import { useState } from 'react';
 import { getAt, setAt } from '../model/edit';
 import type { LineForm } from '../model/form-types';
-import { fieldId } from '../model/pointers';
+import { fieldId, pathOf } from '../model/pointers';
 import { putCorrection } from '../model/put-values';
+import { putWords } from '../model/put-words';
 import type { Correction, PutValue } from '../model/put-values';
 import type { LineEditor } from './use-line-editor';
 
@@ -26,11 +27,13 @@ export function usePut(editor: Pick<LineEditor, 'form' | 'change'>) {
     if (!standing) return;
     editor.change((form) =>
       standing.values.reduce((next, { pointer }) => {
-        const path = pointer.split('/').slice(1);
+        const path = pathOf(pointer);
         return setAt(next, path, getAt(standing.before, path));
       }, form),
     );
     setStanding(null);
   };
-  return { put, undo, keep: () => setStanding(null), values: standing?.values ?? null };
+  const offer = (correction: Correction, circuit: number | undefined) =>
+    putWords(editor.form, correction, circuit ?? 1);
+  return { put, offer, undo, keep: () => setStanding(null), values: standing?.values ?? null };
 }

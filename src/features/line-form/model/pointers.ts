@@ -8,7 +8,8 @@ export const fieldId = (pointer: string): string => `line${pointer.replace(/[^A-
 export const pointerOf = (path: FormPath): string =>
   path.map((step) => `/${String(step).replace(/~/g, '~0').replace(/\//g, '~1')}`).join('');
 
-const steps = (pointer: string): string[] =>
+/** The path that a JSON Pointer names. */
+export const pathOf = (pointer: string): string[] =>
   pointer
     .split('/')
     .slice(1)
@@ -33,7 +34,7 @@ function placeInForm(pointer: string): string {
  * nearest place above it. A fault always finds some field, at worst the line's name.
  */
 export function fieldPointer(form: LineForm, pointer: string): string {
-  const path = steps(placeInForm(pointer));
+  const path = pathOf(placeInForm(pointer));
   for (let n = path.length; n > 0; n -= 1) {
     const head = path.slice(0, n);
     const node = getAt(form, head);
@@ -131,7 +132,7 @@ function fieldName(path: readonly string[]): string {
 
 /** The name of a field with its place: "Phase c: Height", "X1". */
 export function fieldLabel(form: LineForm, pointer: string): string {
-  const path = steps(placeInForm(pointer));
+  const path = pathOf(placeInForm(pointer));
   const place = placeWords(form, path);
   const name = fieldName(path);
   return place ? `${place}: ${name}` : name;
@@ -139,7 +140,7 @@ export function fieldLabel(form: LineForm, pointer: string): string {
 
 /** A fault as the error summary says it: its sentence, after its place where the sentence does not name one. */
 export function faultSentence(form: LineForm, pointer: string, message: string): string {
-  const path = steps(placeInForm(pointer));
+  const path = pathOf(placeInForm(pointer));
   const place = placeWords(form, path);
   if (place) return `${place}: ${message}`;
   const name = fieldName(path);
@@ -183,7 +184,7 @@ function rank(step: string): number {
 
 /** Sorts pointers as their fields stand on the page. */
 export function inFormOrder(a: string, b: string): number {
-  const [left, right] = [steps(a), steps(b)];
+  const [left, right] = [pathOf(a), pathOf(b)];
   for (let i = 0; i < Math.max(left.length, right.length); i += 1) {
     const difference = rank(left[i] ?? '') - rank(right[i] ?? '');
     if (difference !== 0) return difference;

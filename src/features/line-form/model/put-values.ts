@@ -1,10 +1,10 @@
-import { figure } from '#shared/format/numbers';
+import { figure, THIN_SPACE } from '#shared/format/numbers';
 import { convert } from './convert';
 import { getAt, setAt } from './edit';
-import type { FormPath, LineForm, Typed } from './form-types';
+import type { FormPath, LineForm, PhaseForm, Typed } from './form-types';
 import { MUTUAL_KEYS, SEQUENCE_KEYS } from './form-types';
 import { writeNumber } from './number-text';
-import { fieldLabel, fieldPointer, pointerOf } from './pointers';
+import { fieldLabel, fieldPointer, pathOf, pointerOf } from './pointers';
 import { unitLabel } from './unit-choices';
 
 /** A correction that the check offers, as far as the form needs it. */
@@ -36,7 +36,8 @@ function digitsOf(text: string): number {
   return Math.min(6, Math.max(LEAST_DIGITS, digits));
 }
 
-const words = ({ text, unit }: Typed): string => (text ? `${text} ${unitLabel(unit)}`.trim() : 'empty');
+const words = ({ text, unit }: Typed): string =>
+  text ? [text, unitLabel(unit)].filter(Boolean).join(THIN_SPACE) : 'empty';
 
 function declaredPath(form: LineForm, key: string, circuit: number): FormPath | null {
   if ((MUTUAL_KEYS as readonly string[]).includes(key)) return ['declaredMutual', key];
@@ -45,25 +46,71 @@ function declaredPath(form: LineForm, key: string, circuit: number): FormPath | 
   return index < 0 ? null : ['declared', index, key];
 }
 
-function replace(put: Put, path: FormPath, value: number, unit: string): Put {
-  const field = getAt(put.form, path);
-  if (typeof field === 'string')
-    return record(put, path, { text: field, unit: '' }, { text: writeNumber(value), unit: '' }, true);
-  if (typeof field !== 'object' || field === null || !('text' in field)) return put;
-  const before = field as Typed;
-  const perLength = unit !== '';
-  const shown = perLength || before.unit === 'm' ? value : convert(value, 'm', before.unit);
-  const text = perLength ? figure(value, digitsOf(before.text)) : writeNumber(Number(shown.toPrecision(6)));
-  return record(put, path, before, { ...before, text, unit: perLength ? unit : before.unit }, false);
+/** The unit in which the check gives an entry of the geometry. */
+const unitOfEntry = (key: string): string => (key.endsWith('Mm') ? 'mm' : 'm');
+
+const LENGTH_DIGITS = 6;
+
+/** A length of the geometry as the form writes it: its own digits, three at least. */
+function lengthText(value: number): string {
+  return figure(value, digitsOf(String(Number(value.toPrecision(LENGTH_DIGITS)))));
 }
 
-function record(put: Put, path: FormPath, before: Typed, after: Typed, plain: boolean): Put {
+/** Puts a declared value in, per kilometre. */
+function replaceDeclared(put: Put, path: FormPath, value: number, unit: string): Put {
+  const before = getAt(put.form, path) as Typed;
+  return record(put, path, before, { ...before, text: figure(value, digitsOf(before.text)), unit });
+}
+
+/** Puts an entry of the geometry in, in the unit that its field is written in. */
+function replaceEntry(put: Put, path: FormPath, value: number): Put {
+  const field = getAt(put.form, path);
+  if (typeof field === 'string')
+    return record(put, path, { text: field, unit: '' }, { text: writeNumber(value), unit: '' });
+  if (typeof field !== 'object' || field === null || !('text' in field)) return put;
+  const before = field as Typed;
+  const shown = convert(value, unitOfEntry(String(path.at(-1))), before.unit);
+  return Number.isFinite(shown) ? record(put, path, before, { ...before, text: lengthText(shown) }) : put;
+}
+
+function record(put: Put, path: FormPath, before: Typed, after: Typed): Put {
+  const plain = typeof getAt(put.form, path) === 'string';
   const pointer = pointerOf(path);
   const label = fieldLabel(put.form, pointer);
   return {
     form: setAt(put.form, path, plain ? after.text : after),
     values: [...put.values, { pointer, label, before: words(before), after: words(after) }],
   };
+}
+
+/** Whether two phases carry the same bundle, as typed. */
+const sameBundle = (a: PhaseForm, b: PhaseForm): boolean =>
+  a.bundleCount === b.bundleCount && same(a.bundleSpacingM, b.bundleSpacingM);
+
+const same = (a: Typed, b: Typed): boolean => a.text === b.text && a.unit === b.unit;
+
+/**
+ * Every field that a correction of one field is of: a bundle is that of all phases that carry it, a conductor that
+ * of all sections that name it with the same value. A coordinate is of its position alone.
+ */
+function alike(form: LineForm, path: readonly string[]): FormPath[] {
+  const [, at, kind, name, key = ''] = path;
+  const section = form.sections[Number(at)];
+  if (kind === 'positions' && key.startsWith('bundle')) {
+    const own = section?.positions[Number(name)];
+    if (own?.kind !== 'phase') return [];
+    return form.sections.flatMap((s, i) =>
+      s.positions.flatMap((p, j): FormPath[] =>
+        p.kind === 'phase' && sameBundle(p, own) ? [['sections', i, 'positions', j, key]] : [],
+      ),
+    );
+  }
+  if (kind !== 'conductors') return [path];
+  const own = getAt(form, path) as Typed;
+  return form.sections.flatMap((s, i): FormPath[] => {
+    const other = getAt(s.conductors[name ?? ''], [key]) as Typed | undefined;
+    return other && same(other, own) ? [['sections', i, 'conductors', name ?? '', key]] : [];
+  });
 }
 
 /** The corrected values that are numbers, as their fields stand on the page. */
@@ -81,13 +128,13 @@ export function putCorrection(form: LineForm, correction: Correction, circuit: n
   for (const [key, value] of inFieldOrder(correction.corrected)) {
     if (correction.in === 'declared') {
       const path = declaredPath(form, key, circuit);
-      if (path) put = replace(put, path, value, key.startsWith('b') ? 'uS/km' : 'ohm/km');
+      if (path) put = replaceDeclared(put, path, value, key.startsWith('b') ? 'uS/km' : 'ohm/km');
       continue;
     }
     const place = `${(correction.where ?? '').replace(/^\/lines\/\d+/, '')}`;
     const exact = place.endsWith(`/${key}`) ? place : `${place}/${key}`;
-    const pointer = fieldPointer(form, exact);
-    if (pointer === exact) put = replace(put, pointer.split('/').slice(1), value, '');
+    if (fieldPointer(form, exact) !== exact) continue;
+    for (const path of alike(form, pathOf(exact))) put = replaceEntry(put, path, value);
   }
   return put;
 }

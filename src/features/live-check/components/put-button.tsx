@@ -1,30 +1,25 @@
 import type { Cause, Finding } from '#shared/checks/types';
-import { figure } from '#shared/format/numbers';
 import { Button } from '../../../components/ui/button';
-import { parameterName } from '../../../components/charts/balance-entries';
 
-/** Puts a cause's correction into the form, for the applicant to confirm. */
-export type OnPut = (cause: Cause, circuit: number | undefined) => void;
-
-const unitOf = (parameter: string): string => (parameter.startsWith('b') ? 'µS/km' : 'Ω/km');
-
-/** What the button says: the value and its field where there is one, else how many. */
-export function putWords({ in: where, corrected }: Pick<Cause, 'in' | 'corrected'>): string {
-  const entries = Object.entries(corrected);
-  const [first] = entries;
-  if (!first || entries.length > 1) return entries.length > 1 ? `Put these ${entries.length} values in` : '';
-  const [name, value] = first;
-  if (where === 'geometry') return `Put ${figure(value, 4)} in`;
-  return `Put ${figure(value, 4)}\u2009${unitOf(name)} into ${parameterName(name)}`;
+/** Corrections as the form takes them. */
+export interface Corrections {
+  /** What a button would say that puts a cause's correction in; null where the form has no place for it. */
+  offer: (cause: Cause, circuit: number | undefined) => string | null;
+  /** Puts it into the form, for the applicant to confirm. */
+  put: (cause: Cause, circuit: number | undefined) => void;
 }
 
-/** The best cause of a finding as a button; a finding without one has none. */
-export function PutButton({ finding, onPut }: { finding: Finding; onPut: OnPut }) {
-  const cause = finding.causes.find((c) => Object.keys(c.corrected).length > 0);
-  if (!cause) return null;
-  return (
-    <Button small onClick={() => onPut(cause, finding.circuit)}>
-      {putWords(cause)}
-    </Button>
-  );
+/** The best cause of a finding that can be put in, as a button; a finding without one has none. */
+export function PutButton({ finding, corrections }: { finding: Finding; corrections: Corrections }) {
+  const { causes, circuit } = finding;
+  for (const cause of causes) {
+    const words = corrections.offer(cause, circuit);
+    if (words === null) continue;
+    return (
+      <Button small onClick={() => corrections.put(cause, circuit)}>
+        {words}
+      </Button>
+    );
+  }
+  return null;
 }

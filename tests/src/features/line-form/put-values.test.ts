@@ -15,7 +15,7 @@ describe('a correction put into the form', () => {
     const put = putCorrection(form, { in: 'declared', corrected: { x1: 0.381211 } }, 1);
     expect(put.form.declared[0]?.x1).toMatchObject({ text: '0.3812', unit: 'ohm/km' });
     expect(put.values).toEqual([
-      { pointer: '/declared/0/x1', label: 'X1', before: '0.6135 Ω/km', after: '0.3812 Ω/km' },
+      { pointer: '/declared/0/x1', label: 'X1', before: '0.6135\u2009Ω/km', after: '0.3812\u2009Ω/km' },
     ]);
   });
 

@@ -16,7 +16,6 @@ import {
   sharesCause,
   sortFindings,
 } from '../../../../src/features/live-check/model/report-view';
-import { putWords } from '../../../../src/features/live-check/components/put-button';
 
 const basis = { rules: DEFAULT_RULE_SET, library: STARTING_LIBRARY };
 
@@ -108,8 +107,6 @@ describe('the live check of a line', () => {
     expect(own?.causes[0]?.code).toBe('per-mile');
     // 0.6135 ÷ 1.609344, the international mile
     expect(own?.causes[0]?.corrected['x1']).toBeCloseTo(0.381211, 5);
-    const words = own?.causes[0] ? putWords(own.causes[0]).replace(/\u2009/g, ' ') : '';
-    expect(words).toBe('Put 0.3812 Ω/km into X1');
     const follows = entriesOf(circuit).filter((e) => e.remark);
     expect(follows.map((e) => [e.name, e.remark])).toEqual([
       ['Zc', 'follows X1'],

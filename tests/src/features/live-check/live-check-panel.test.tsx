@@ -35,7 +35,7 @@ function show(form: LineForm) {
       <LiveCheckPanel
         check={check}
         owed={outcome.kind === 'faults' ? outcome.faults.length : 0}
-        onPut={() => {}}
+        corrections={{ offer: () => null, put: () => {} }}
       />
       <FindingCount check={check} />
     </>,
@@ -70,7 +70,7 @@ describe('the live check of a line that is being written', () => {
     expect(screen.queryByText('In balance')).toBeNull();
     expect(screen.getByText(/Filing needs \d+ more fields/)).toBeVisible();
     expect(screen.getByText(/A preview by the rules in force/)).toBeVisible();
-    expect(screen.getByRole('link', { name: /go to the check/ })).toHaveTextContent(/^\d note/);
+    expect(screen.getByRole('link', { name: /go to the check/ })).toHaveTextContent(/^1 explain, 1 note/);
   });
 
   it('weighs the first declared value at once', () => {
