@@ -1,5 +1,6 @@
 import type { QueryClient } from '@tanstack/react-query';
 import type { RouteObject } from 'react-router-dom';
+import { MAIL_PAGES } from '#shared/contracts/mail-pages';
 import type { Action, Subject } from '#shared/policies/subjects';
 import type { Role } from '../lib/api/session';
 
@@ -26,6 +27,8 @@ export const OPEN_ROUTES: readonly RouteEntry[] = [
   { path: '/set-up', lazy: () => import('./routes/set-up') },
   { path: '/ask-for-account', lazy: () => import('./routes/ask-for-account') },
   { path: '/new-password', lazy: () => import('./routes/new-password') },
+  { path: MAIL_PAGES.passwordReset, lazy: () => import('./routes/password-reset') },
+  { path: MAIL_PAGES.invitation, lazy: () => import('./routes/invitation') },
 ];
 
 /** Pages inside the frame with the bar on top. */

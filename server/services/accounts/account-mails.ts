@@ -1,3 +1,4 @@
+import { MAIL_PAGES } from '../../../shared/contracts/mail-pages';
 import { queueMail } from '../../database/outbox';
 import type { Transaction } from '../../database/transaction';
 import { TOKEN_MINUTES } from './tokens';
@@ -28,7 +29,7 @@ export async function mailInvitation(
     body: [
       `${to.name},`,
       `you are invited to work on applications to connect for ${organisation}. Choose a password here:`,
-      link(tx, '/invitation', made.token),
+      link(tx, MAIL_PAGES.invitation, made.token),
       `The link works once and for ${TOKEN_MINUTES} minutes. If it has run out, ask for a new one.`,
     ].join('\n\n'),
   });
@@ -44,7 +45,7 @@ export async function mailReset(tx: Transaction, to: Recipient, made: { token: s
     body: [
       `${to.name},`,
       'somebody asked for a new password for your account. If it was you, choose one here:',
-      link(tx, '/password-reset', made.token),
+      link(tx, MAIL_PAGES.passwordReset, made.token),
       `The link works once and for ${TOKEN_MINUTES} minutes. If it was not you, nothing has changed; you need do nothing.`,
     ].join('\n\n'),
   });

@@ -1,0 +1,18 @@
+import type { QueryClient } from '@tanstack/react-query';
+import { Suspense } from 'react';
+import { useLocation } from 'react-router-dom';
+import { SkeletonPage } from '../../components/feedback/skeleton';
+import { frontDoorQuery } from '../../features/session/api/get-front-door';
+import { NewPasswordPage } from '../../features/session/components/new-password-page';
+
+export const prefetch = (client: QueryClient) => client.prefetchQuery(frontDoorQuery());
+
+/** Where the link of a mail leads. Its token stands behind the #, where no server log sees it. */
+export function Component() {
+  const { hash } = useLocation();
+  return (
+    <Suspense fallback={<SkeletonPage />}>
+      <NewPasswordPage key={hash} token={hash.slice(1) || null} />
+    </Suspense>
+  );
+}
