@@ -15,6 +15,8 @@ export interface CaseFacts {
   hasAcceptedRecord: boolean;
   reviewerId: string | null;
   reviewerName: string | null;
+  /** The case's reviewer cannot see it any more: has left, is shut out, or is barred from the applicant. */
+  isReviewerGone?: boolean;
   draft: {
     lineCount: number;
     /** Keys of lines with faults by schema, or with geometry that cannot be computed. */

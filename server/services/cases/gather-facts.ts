@@ -1,6 +1,6 @@
 import { discrepanciesOfRound } from '../../repositories/discrepancy.repository';
 import { pendingCountersigns, standingDispositions } from '../../repositories/disposition.repository';
-import { namesOf } from '../../repositories/people-names.repository';
+import { namesOf, reviewersFor } from '../../repositories/people-names.repository';
 import { findingsOfRun } from '../../repositories/run.repository';
 import type { Finding } from '../../entities/verdict.entities';
 import type { CaseFacts } from '../../../shared/workflow/case-facts';
@@ -27,6 +27,7 @@ export async function gatherFacts(caller: Caller, file: CaseFile): Promise<CaseF
     hasAcceptedRecord: file.application.acceptedRevisionId !== null,
     reviewerId: round.reviewerId,
     reviewerName: names.get(round.reviewerId ?? '')?.name ?? null,
+    isReviewerGone: await isReviewerGone(caller, file),
     draft,
     run: run === null ? null : { state: run.status, linesChecked: run.linesDone, lineCount: run.linesTotal },
     discrepancies: discrepancies.map(({ number, state, answeredBy }) => ({ number, state, answeredBy })),
@@ -42,6 +43,12 @@ async function openMustAnswers({ tx }: Caller, { run, revision }: CaseFile): Pro
   );
   const findings = await findingsOfRun(tx.manager, run.id);
   return findings.filter((f) => f.grade === 'must-answer' && !done.has(`${f.lineKey} ${f.fingerprint}`));
+}
+
+async function isReviewerGone({ tx, actor }: Caller, { application, round }: CaseFile): Promise<boolean> {
+  if (actor.role !== 'reviewer' || round.reviewerId === null || round.reviewerId === actor.userId)
+    return false;
+  return (await reviewersFor(tx.manager, application.orgId)).every((r) => r.id !== round.reviewerId);
 }
 
 /** The draft matters to the applicant, and only while it can be filed. */

@@ -17,9 +17,10 @@ export async function handOverApplication(
 ): Promise<void> {
   const { tx, actor } = caller;
   const file = await holdCase(caller, reference, 'review');
-  const transition = requireStep(caller, 'hand-over', await gatherFacts(caller, file));
+  const facts = await gatherFacts(caller, file);
+  const transition = requireStep(caller, 'hand-over', facts);
   requireVersion(file, request.version);
-  if (request.to === actor.userId) throw conflict('You have the case already.');
+  if (request.to === file.round.reviewerId) throw conflict('That reviewer has the case already.');
   const { application } = file;
   const to = (await reviewersFor(tx.manager, application.orgId)).find((r) => r.id === request.to);
   if (to === undefined) {
@@ -34,10 +35,10 @@ export async function handOverApplication(
     file,
     'application.handed-over',
     { reviewer: to.name, reason: request.reason },
-    { reviewer: actor.name },
+    { reviewer: facts.reviewerName },
   );
   const recipient = await addressOf(tx.manager, to.id);
-  if (recipient === null) return;
+  if (recipient === null || to.id === actor.userId) return;
   await queueMail(tx, {
     kind: 'handed-over',
     causeId: `${file.round.id} ${file.round.version}`,

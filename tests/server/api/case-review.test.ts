@@ -152,6 +152,22 @@ describe('windows', () => {
   });
 });
 
+describe('a reviewer who is gone', () => {
+  it('leaves no case behind that nobody can go on with', async () => {
+    const leaver = await app.signInAs('reviewer');
+    number = await aCaseInReview(app, applicant, leaver, [aLine('Sarn tie')]);
+    const mine = { to: second.actor.userId, reason: 'The colleague has left.' };
+    await refused(second, '/hand-over', mine);
+    await app.db.owner.query(`UPDATE users SET status = 'disabled' WHERE id = $1`, [leaver.actor.userId]);
+    const seen = await expecting<Api.Application>(200, second.get(at()));
+    const open = seen.steps.filter((s) => s.open).map((s) => s.step);
+    expect(open).toEqual(['hand-over', 'put-back']);
+    const over = await step(second, number, 'hand-over', mine);
+    expect(over).toMatchObject({ state: 'in-review', reviewer: { id: second.actor.userId } });
+    expect(await step(second, number, 'accept', { revision: 'A' })).toMatchObject({ state: 'accepted' });
+  });
+});
+
 describe('findings', () => {
   it('an Explain or a Note is set aside, a Must answer is not', async () => {
     const noted = aLine('Fellgate – Sarn', { x1Factor: PER_MILE, earthGiven: false });

@@ -169,6 +169,11 @@ describe('refusals say what opens the step', () => {
     }
   });
 
+  it('any reviewer passes a case on whose reviewer is gone, and does nothing else with it', () => {
+    const others = STEPS.filter((step) => ask(step, { isReviewerGone: true }, 'another').open);
+    expect(others.filter((step) => STEP_RULES[step].role === 'reviewer')).toEqual(['hand-over', 'put-back']);
+  });
+
   it('return needs an open discrepancy', () => {
     expect(reason('return', { discrepancies: [answered(1)] })).toBe(
       'Return opens once a discrepancy is open.',
