@@ -31,6 +31,19 @@ export function presentDraftLine({ row, line, faults }: DraftLineReading): Api.D
   };
 }
 
+/** What a draft holds in all, incomplete lines with what they say so far. */
+export function draftTotals(rows: readonly Pick<DraftLine, 'body'>[]): {
+  voltagesKv: number[];
+  totalKm: number;
+} {
+  const bodies = rows.map((row) => row.body as Record<string, unknown>);
+  const voltages = bodies.flatMap((body) => numberOrNull(body['nominalVoltageKv'], 10_000) ?? []);
+  return {
+    voltagesKv: [...new Set(voltages)].sort((a, b) => b - a),
+    totalKm: bodies.reduce((sum, body) => sum + (lengthOf(body['sections']) ?? 0), 0),
+  };
+}
+
 export function presentFault(fault: PointerFault): Api.Fault {
   const { pointer, value, expected, message } = fault;
   return { pointer, value, expected, message };

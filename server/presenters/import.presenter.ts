@@ -4,6 +4,7 @@ import type * as Api from '../../shared/contracts/api.generated';
 import type { Fault } from '../../shared/contracts/faults';
 import type { LineSheet, Notice } from '../../shared/filing/types';
 import { instantOrNull } from './person.presenter';
+import { circuitCount } from './revision.presenter';
 
 /** A line that was read, as it is staged. */
 export interface StagedLine {
@@ -54,6 +55,7 @@ function presentStaged(staged: StagedLine, draft: readonly DraftLine[]): Api.Imp
     lineKey: known?.lineKey ?? null,
     lengthKm: staged.lengthKm,
     nominalVoltageKv: staged.nominalVoltageKv,
+    circuitCount: circuitCount(staged.sheet.line),
     replaces: known !== undefined,
   };
 }

@@ -47,7 +47,8 @@ export function presentLineHead(line: Omit<FiledLine, 'lineHash'>): LineHead {
   };
 }
 
-function circuitCount(line: FilingLine): number {
+/** Circuits of a line, by what is declared and by what hangs in its sections. */
+export function circuitCount(line: FilingLine): number {
   const circuits = line.declared.map((declared) => declared.circuit);
   for (const section of line.sections) {
     if (!('positions' in section) || section.positions === undefined) continue;

@@ -1292,6 +1292,8 @@ export interface Import {
     lengthKm: number | null;
     /** nominal voltage (kV) */
     nominalVoltageKv: number | null;
+    /** circuits (count) */
+    circuitCount: number;
     /** a line of this name is in the draft and would be replaced */
     replaces: boolean;
   }[];

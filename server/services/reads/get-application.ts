@@ -1,5 +1,6 @@
 import { revisionLetters } from '../../repositories/revision.repository';
 import { countersignsByIds, pendingCountersigns } from '../../repositories/disposition.repository';
+import { draftLines } from '../../repositories/draft.repository';
 import { decisionOfRound, windowsOfApplication } from '../../repositories/correspondence.repository';
 import { overviewOf } from '../../repositories/overview.repository';
 import { gridOwner, namesOf } from '../../repositories/people-names.repository';
@@ -8,6 +9,7 @@ import {
   presentDecision,
   type ApplicationDetail,
 } from '../../presenters/application.presenter';
+import { draftTotals } from '../../presenters/draft.presenter';
 import { presentCountersign } from '../../presenters/countersign.presenter';
 import { notFound } from '../../errors/problem';
 import type * as Api from '../../../shared/contracts/api.generated';
@@ -16,7 +18,6 @@ import type { Caller } from '../cases/caller';
 import { sightOf } from '../cases/caller';
 import { readCase, type CaseFile } from '../cases/case-file';
 import { gatherFacts } from '../cases/gather-facts';
-import { readDraft } from '../drafts/read-draft';
 import { spanOf } from '../windows/change-windows';
 import { readingOf } from './list-applications';
 
@@ -26,18 +27,9 @@ export async function getApplication(caller: Caller, reference: string): Promise
   const file = await readCase(caller, reference);
   const row = await overviewOf(tx.manager, file.application.id, sightOf(actor));
   if (row === null) throw notFound();
-  const drafted = file.revision === null ? await draftTotals(caller, file) : {};
+  // before the first filing the voltages and the length are those of the draft
+  const drafted = file.revision === null ? draftTotals(await draftLines(tx.manager, file.round.id)) : {};
   return presentApplication({ ...row, ...drafted }, await detailOf(caller, file), await readingOf(caller));
-}
-
-/** Before the first filing the voltages and the length are those of the draft. */
-async function draftTotals({ tx }: Caller, file: CaseFile) {
-  const { lines } = await readDraft(tx, file);
-  const voltages = new Set(lines.map((line) => line.nominalVoltageKv));
-  return {
-    voltagesKv: [...voltages].sort((a, b) => b - a),
-    totalKm: lines.reduce((sum, line) => sum + line.lengthKm, 0),
-  };
 }
 
 async function detailOf(caller: Caller, file: CaseFile): Promise<ApplicationDetail> {

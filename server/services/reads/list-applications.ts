@@ -1,7 +1,14 @@
-import { listOverview, queueCounts, type OverviewQuery } from '../../repositories/overview.repository';
+import { draftLines } from '../../repositories/draft.repository';
+import {
+  listOverview,
+  queueCounts,
+  type OverviewQuery,
+  type OverviewRow,
+} from '../../repositories/overview.repository';
 import type { OverviewFilters } from '../../repositories/overview-filters';
 import { decodeCursor, readLimit } from '../../repositories/paging';
 import { currentCalendar } from '../../repositories/calendar.repository';
+import { draftTotals } from '../../presenters/draft.presenter';
 import { presentSummary, type Reading } from '../../presenters/application.presenter';
 import type * as Api from '../../../shared/contracts/api.generated';
 import { endOfDay, localDay } from '../../../shared/workflow/calendar';
@@ -28,7 +35,15 @@ export async function listApplications(
     caller.ability,
     overviewQuery(caller, query, reading, { sort: '-updated', states: [] }),
   );
-  return { ...page, items: page.items.map((row) => presentSummary(row, reading)) };
+  const items: Api.ApplicationSummary[] = [];
+  for (const row of page.items) items.push(presentSummary(await withDraft(caller, row), reading));
+  return { ...page, items };
+}
+
+/** Before the first filing the voltages and the length are those of the draft. */
+async function withDraft({ tx }: Caller, row: OverviewRow): Promise<OverviewRow> {
+  if (row.revision !== null || row.lineCount === 0) return row;
+  return { ...row, ...draftTotals(await draftLines(tx.manager, row.roundId)) };
 }
 
 /** A page of the open applications, due first, with counts over all of them. */

@@ -101,8 +101,14 @@ function ApplicationPage({ number }: { number: string }) {
           {draft && <DraftFaults number={number} draft={draft} />}
         </div>
         <div className="grid min-w-0 grid-cols-[minmax(0,1fr)] gap-6 [&>.sheet]:mt-0">
-          {draft && <ImportPanel number={number} hasLines={draft.lines.length > 0} />}
-          <LettersAndRevisions letters={letters} revisions={revisions} />
+          {draft && (
+            <ImportPanel
+              number={number}
+              hasLines={draft.lines.length > 0}
+              incomplete={draft.lines.filter((l) => !l.complete).map((l) => l.lineKey)}
+            />
+          )}
+          <LettersAndRevisions number={number} letters={letters} revisions={revisions} />
           <AttachmentsSheet number={number} files={files} open={open} />
         </div>
       </div>

@@ -116,13 +116,7 @@ describe('attachments', () => {
       'application/pdf',
       422,
     ],
-    [
-      'more than 20 MB',
-      Buffer.concat([PDF, Buffer.alloc(20 * 1024 * 1024)]),
-      'a.pdf',
-      'application/pdf',
-      413,
-    ],
+    ['more than 20 MB', Buffer.concat([PDF, Buffer.alloc(20_000_000)]), 'a.pdf', 'application/pdf', 413],
   ])('refuse %s', async (_, bytes, name, type, status) => {
     expect((await attach(applicant, bytes, name, type)).status).toBe(status);
   });
@@ -243,7 +237,7 @@ describe('imports', () => {
     const found = await expecting<Api.Import>(201, send(Buffer.from(text), 'lines.txt'));
     expect(found.dialect).toMatchObject({ delimiter: 'semicolon', decimal: 'comma', encoding: 'utf-8' });
     expect(found.faults).toEqual([]);
-    expect(found.lines).toMatchObject([{ name: 'A', lengthKm: 4.5 }]);
+    expect(found.lines).toMatchObject([{ name: 'A', lengthKm: 4.5, nominalVoltageKv: 345, circuitCount: 1 }]);
     const corrected = await expecting<Api.Import>(
       201,
       send(Buffer.from(text), 'lines.txt', { decimal: 'point' }),
@@ -308,6 +302,16 @@ describe('drafts', () => {
     expect(draft.faults.every((fault) => fault.lineKey === 'L1')).toBe(true);
     const refused = await expecting<Problem>(422, applicant.post(at('/file'), {}));
     expect(refused.errors?.map((fault) => fault.pointer)).toContain('/lines/0/nominalVoltageKv');
+  });
+
+  it('count what they hold, incomplete lines too, on their page and in the list', async () => {
+    ({ number } = await aDraft(applicant, []));
+    await saveLine(applicant, number, 'L1', aLine('Sarn tie'), 0);
+    await saveLine(applicant, number, 'L2', { nominalVoltageKv: 230, sections: [{ lengthKm: 41.6 }] }, 0);
+    const held = { voltagesKv: [345, 230], lineCount: 2, totalLengthKm: 81.6, revision: null };
+    expect(await expecting<Api.Application>(200, applicant.get(at()))).toMatchObject(held);
+    const list = applicant.get(`/api/applications?filter[number]=${number}`);
+    expect((await expecting<Api.ApplicationList>(200, list)).items).toMatchObject([held]);
   });
 
   it('of two windows the second is told that the line was saved meanwhile, and nothing is lost', async () => {

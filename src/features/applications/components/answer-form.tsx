@@ -28,11 +28,15 @@ export function AnswerForm({ number, discrepancy, attach }: AnswerFormProps) {
   const answer = useCaseWrite('answerDiscrepancy', number);
   const [missing, setMissing] = useState(false);
   const name = `D-${discrepancy.number}`;
+  const fieldId = `answer-${discrepancy.number}`;
   const submit = (event: FormEvent) => {
     event.preventDefault();
     const text = draft.text.trim();
     setMissing(text === '');
-    if (text === '') return;
+    if (text === '') {
+      document.getElementById(fieldId)?.focus();
+      return;
+    }
     answer.mutate({
       params: { number: discrepancy.number },
       body: { by: draft.by, text, version: discrepancy.version },
@@ -52,6 +56,7 @@ export function AnswerForm({ number, discrepancy, attach }: AnswerFormProps) {
         ))}
       </div>
       <FormWords
+        id={fieldId}
         label={`Your answer to ${name}`}
         rows={2}
         placeholder="Say what you changed, or why the value stands."

@@ -133,7 +133,12 @@ function ApplicationRow({ item, role }: { item: ApplicationSummary; role: Role }
         {item.lineCount}
       </Cell>
       <Cell foldLabel="Revision" fold="end">
-        {item.revision ?? '–'}
+        {item.revision ?? (
+          <span className="text-ink-soft">
+            {item.nextRevision}
+            <span className="sr-only">, not filed yet</span>
+          </span>
+        )}
       </Cell>
       <Cell>
         <Stamp state={item.state} />

@@ -43,9 +43,15 @@ export function DiscrepancyPart({ application, discrepancy, attach, files }: Dis
     <div className="sheet-cut px-4 py-5 field:px-6" id={`D-${discrepancy.number}`}>
       <div className="flex flex-wrap items-baseline justify-between gap-x-4">
         <h3>{`D-${discrepancy.number}: ${discrepancy.title}`}</h3>
-        <GradeLabel grade={discrepancy.grade} settled={answered}>
-          {answered ? 'answered' : undefined}
-        </GradeLabel>
+        {discrepancy.findings.length === 0 ? (
+          <span className="text-table font-semibold">
+            {answered ? 'raised by hand, answered' : 'raised by hand'}
+          </span>
+        ) : (
+          <GradeLabel grade={discrepancy.grade} settled={answered}>
+            {answered ? 'answered' : undefined}
+          </GradeLabel>
+        )}
       </div>
       <p className="mt-2 max-w-prose">
         {`“${asked.text}” `}
@@ -55,7 +61,7 @@ export function DiscrepancyPart({ application, discrepancy, attach, files }: Dis
         <p className="mt-1 text-table text-ink-soft">{`What would settle it: ${discrepancy.wanted}`}</p>
       )}
       {explained.map((matter) => (
-        <CauseOffer key={matter.key} number={application.number} matter={matter} open={open} />
+        <CauseOffer key={matter.key} number={application.number} matter={matter} open={open && !answered} />
       ))}
       <PlainFindings matters={matters.filter((m) => m.causes.length === 0)} />
       {files}

@@ -2,6 +2,7 @@ import type { Letter, RevisionSummary } from '#shared/contracts/api.generated';
 import { formatDate } from '#shared/format/dates';
 import { RevisionTriangle } from '../../../components/ui/revision-triangle';
 import { Sheet } from '../../../components/ui/sheet';
+import { addressOf } from '../../../lib/api/call';
 
 interface Entry {
   key: string;
@@ -10,7 +11,30 @@ interface Entry {
   triangle: React.ReactNode;
 }
 
-function entries(letters: readonly Letter[], revisions: readonly RevisionSummary[]): Entry[] {
+/** The lines of a filed revision as a file, in both forms. */
+function RevisionFiles({ number, letter }: { number: string; letter: string }) {
+  const formats = ['json', 'csv'] as const;
+  return (
+    <span className="mt-0.5 flex gap-3 text-label">
+      {formats.map((format) => (
+        <a
+          key={format}
+          className="link"
+          href={addressOf('exportLines', {
+            params: { applicationId: number },
+            query: { format, revision: letter },
+          })}
+          download
+          aria-label={`Revision ${letter} as ${format.toUpperCase()}`}
+        >
+          {format.toUpperCase()}
+        </a>
+      ))}
+    </span>
+  );
+}
+
+function entries(number: string, letters: readonly Letter[], revisions: readonly RevisionSummary[]): Entry[] {
   const sent = letters.map((letter): Entry => ({
     key: `letter-${letter.number}`,
     at: letter.sentAt,
@@ -29,6 +53,7 @@ function entries(letters: readonly Letter[], revisions: readonly RevisionSummary
       <>
         {`Filed by ${revision.filedBy.name}`}
         <span className="block text-label text-ink-soft">{revision.change}</span>
+        <RevisionFiles number={number} letter={revision.letter} />
       </>
     ),
   }));
@@ -36,13 +61,14 @@ function entries(letters: readonly Letter[], revisions: readonly RevisionSummary
 }
 
 interface LettersAndRevisionsProps {
+  number: string;
   letters: readonly Letter[];
   revisions: readonly RevisionSummary[];
 }
 
 /** Every filing and every letter, newest first. */
-export function LettersAndRevisions({ letters, revisions }: LettersAndRevisionsProps) {
-  const all = entries(letters, revisions);
+export function LettersAndRevisions({ number, letters, revisions }: LettersAndRevisionsProps) {
+  const all = entries(number, letters, revisions);
   return (
     <Sheet title="Letters and revisions">
       {all.length === 0 ? (

@@ -82,7 +82,7 @@ interface LinesSheetProps {
   filed: { letter: string; lines: readonly LineSummary[] } | null;
 }
 
-function Heads({ removable }: { removable: boolean }) {
+function Heads({ removable, check }: { removable: boolean; check: string }) {
   return (
     <TableHead>
       <Row>
@@ -93,7 +93,7 @@ function Heads({ removable }: { removable: boolean }) {
         <HeadCell>Voltage</HeadCell>
         <HeadCell number>Length</HeadCell>
         <HeadCell>Circuits</HeadCell>
-        <HeadCell>Check</HeadCell>
+        <HeadCell>{check}</HeadCell>
         {removable && (
           <HeadCell>
             <span className="sr-only">Remove</span>
@@ -141,7 +141,11 @@ export function LinesSheet(props: LinesSheetProps) {
         </EmptyState>
       ) : (
         <Table label="Lines" folds>
-          <Heads removable={draft !== null} />
+          <Heads
+            removable={draft !== null}
+            // beside a draft stands what was found in the revision before it
+            check={draft && filed ? `Check of ${filed.letter}` : 'Check'}
+          />
           <TableBody>
             {draft && <DraftRows {...props} draft={draft} />}
             {!draft &&

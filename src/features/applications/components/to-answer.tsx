@@ -2,6 +2,7 @@ import type { ReactNode } from 'react';
 import type { Application, Discrepancy } from '#shared/contracts/api.generated';
 import { Disclosure } from '../../../components/ui/disclosure';
 import { Sheet } from '../../../components/ui/sheet';
+import { discrepanciesWords } from '../model/words';
 import { DiscrepancyPart } from './discrepancy-part';
 import { Thread } from './thread';
 
@@ -36,11 +37,10 @@ export function ToAnswer({ application, discrepancies, attachTo, filesOf }: ToAn
   if (discrepancies.length === 0) return null;
   const standing = discrepancies.filter((d) => !isClosed(d));
   const closed = discrepancies.filter(isClosed);
-  const open = standing.filter((d) => d.state === 'open').length;
   return (
     <Sheet
       title={application.state === 'returned' ? 'To answer' : 'Discrepancies'}
-      aside={standing.length === 0 ? 'all settled' : `${open} of ${standing.length} open`}
+      aside={discrepanciesWords(discrepancies)}
     >
       {standing.map((discrepancy) => (
         <DiscrepancyPart

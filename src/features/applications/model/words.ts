@@ -1,4 +1,4 @@
-import type { Application, ApplicationSummary } from '#shared/contracts/api.generated';
+import type { Application, ApplicationSummary, Discrepancy } from '#shared/contracts/api.generated';
 import { plainQuantity } from '../../../lib/plain-number';
 
 export const CONNECTION_KINDS = [
@@ -33,6 +33,16 @@ export function linesWords(lineCount: number, totalLengthKm: number): string {
 /** "345 kV, 230 kV". */
 export const voltagesWords = (voltagesKv: readonly number[]): string =>
   voltagesKv.length === 0 ? 'none yet' : voltagesKv.map((kv) => plainQuantity(kv, 'kV')).join(', ');
+
+/** "1 open, 1 answered, 1 settled": states that none is in are left out. */
+export function discrepanciesWords(discrepancies: readonly Pick<Discrepancy, 'state'>[]): string {
+  const states = ['open', 'answered', 'settled', 'waived'] as const;
+  const counts = states.map((state) => [discrepancies.filter((d) => d.state === state).length, state]);
+  return counts
+    .filter(([count]) => count !== 0)
+    .map(([count, state]) => `${count} ${state}`)
+    .join(', ');
+}
 
 /** Whether the application has a draft that its applicant may change. */
 export const hasDraft = ({ state }: Pick<Application, 'state'>): boolean =>

@@ -6,6 +6,7 @@ import { Sheet } from '../../../components/ui/sheet';
 import { addressOf } from '../../../lib/api/call';
 import { fileSize } from '../../../lib/file-size';
 import { useImportFile } from '../api/import-file';
+import { exportBlockedBy } from '../model/dialect-words';
 import type { Correction } from '../model/dialect-words';
 import { FileDrop } from './file-drop';
 import { ImportResult } from './import-result';
@@ -14,9 +15,13 @@ interface ImportPanelProps {
   number: string;
   /** Whether the draft holds lines that can be sent out again. */
   hasLines: boolean;
+  /** Keys of the lines that are not complete: while there are any, the draft cannot be sent out. */
+  incomplete: readonly string[];
 }
 
-function Exports({ number }: { number: string }) {
+function Exports({ number, incomplete }: Pick<ImportPanelProps, 'number' | 'incomplete'>) {
+  const reason = exportBlockedBy(incomplete);
+  if (reason) return <p className="text-ink-soft">{reason}</p>;
   const href = (format: 'json' | 'csv') =>
     addressOf('exportLines', { params: { applicationId: number }, query: { format } });
   return (
@@ -47,7 +52,7 @@ function Sending({ file, share }: { file: File; share: number }) {
 }
 
 /** Takes lines from a JSON or CSV file into the draft: sent, read, shown, and only then taken. */
-export function ImportPanel({ number, hasLines }: ImportPanelProps) {
+export function ImportPanel({ number, hasLines, incomplete }: ImportPanelProps) {
   const [file, setFile] = useState<File | null>(null);
   const [share, setShare] = useState(0);
   const [last, setLast] = useState<Import | null>(null);
@@ -83,7 +88,7 @@ export function ImportPanel({ number, hasLines }: ImportPanelProps) {
           </FileDrop>
         )}
         <ProblemNotice error={reading.error} />
-        {hasLines && <Exports number={number} />}
+        {hasLines && <Exports number={number} incomplete={incomplete} />}
       </div>
     </Sheet>
   );

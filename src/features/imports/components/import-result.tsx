@@ -8,6 +8,8 @@ import { readWords } from '../model/dialect-words';
 import type { Correction } from '../model/dialect-words';
 import { DialectForm } from './dialect-form';
 import { FaultTable } from './fault-table';
+import { FirstFaults } from './first-faults';
+import { ReadLines } from './read-lines';
 
 interface ImportResultProps {
   number: string;
@@ -25,24 +27,26 @@ export function ImportResult({ number, read, rereading, onReread, onDone }: Impo
   const { id, lines, faults, notices, dialect } = read;
   // What concerns the whole file stands in the words on its dialect.
   const aboutPlaces = notices.filter((n) => n.pointer !== undefined || n.row !== undefined);
-  const replaced = lines.filter((l) => l.replaces);
   const takeLines = (which: 'all' | 'good') =>
     take.mutate({ params: { importId: id }, body: { take: which } }, { onSuccess: onDone });
   return (
     <div className="grid gap-3 text-table" role="status">
       <p className="text-h3 font-strong">{readWords(read)}</p>
       {dialect && <DialectForm key={id} dialect={dialect} busy={rereading} onReread={onReread} />}
-      {replaced.length > 0 && <p>{`Replaced in the draft: ${replaced.map((l) => l.name).join(', ')}.`}</p>}
+      {lines.length > 0 && <ReadLines lines={lines} />}
       {aboutPlaces.map((notice, i) => (
         <p key={i} className="text-ink-soft">
           {notice.message}
         </p>
       ))}
       {faults.length > 0 && (
-        <div>
-          <Button small onClick={() => setLooking(true)}>
-            {faults.length === 1 ? 'The place to look at' : `All ${faults.length} places`}
-          </Button>
+        <div className="grid gap-2">
+          {lines.length === 0 && <FirstFaults faults={faults} />}
+          <div>
+            <Button small onClick={() => setLooking(true)}>
+              {faults.length === 1 ? 'The place to look at' : `All ${faults.length} places`}
+            </Button>
+          </div>
         </div>
       )}
       <ProblemNotice error={take.error} />

@@ -49,6 +49,17 @@ export function dialectWords({ delimiter, decimal, encoding, lineEnds }: Dialect
 
 const counted = (n: number, one: string): string => `${n} ${one}${n === 1 ? '' : 's'}`;
 
+/** Why the draft cannot be saved as a file: the lines that are not complete; null when it can. */
+export function exportBlockedBy(incomplete: readonly string[]): string | null {
+  const [first] = incomplete;
+  if (first === undefined) return null;
+  if (incomplete.length > 3)
+    return `The draft can be saved as a file once its ${incomplete.length} incomplete lines are complete.`;
+  const last = incomplete.at(-1) ?? first;
+  const names = incomplete.length === 1 ? first : `${incomplete.slice(0, -1).join(', ')} and ${last}`;
+  return `The draft can be saved as a file once ${names} ${incomplete.length === 1 ? 'is' : 'are'} complete.`;
+}
+
 /** What was read, in one sentence. */
 export function readWords({ format, rowCount, lines, faults }: Import): string {
   const rows = format === 'csv' ? `${counted(rowCount, 'row')} read: ` : '';

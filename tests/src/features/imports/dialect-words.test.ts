@@ -1,6 +1,10 @@
 import { describe, expect, it } from 'vitest';
 import type { Import } from '#shared/contracts/api.generated';
-import { dialectWords, readWords } from '../../../../src/features/imports/model/dialect-words';
+import {
+  dialectWords,
+  exportBlockedBy,
+  readWords,
+} from '../../../../src/features/imports/model/dialect-words';
 
 const read = (over: Partial<Import>): Import => ({
   id: 'i',
@@ -18,7 +22,14 @@ const read = (over: Partial<Import>): Import => ({
   importedAt: null,
   ...over,
 });
-const line = { name: 'A', lineKey: null, lengthKm: 1, nominalVoltageKv: 138, replaces: false };
+const line = {
+  name: 'A',
+  lineKey: null,
+  lengthKm: 1,
+  nominalVoltageKv: 138,
+  circuitCount: 1,
+  replaces: false,
+};
 
 describe('what was read of a file', () => {
   it('says how it is written', () => {
@@ -34,5 +45,14 @@ describe('what was read of a file', () => {
       '2 rows read: 2 lines can be taken, 1 place to look at.',
     );
     expect(readWords(read({ format: 'json', lines: [line] }))).toBe('1 line can be taken.');
+  });
+});
+
+describe('the draft as a file', () => {
+  it('waits for the lines that are not complete, and names them', () => {
+    expect(exportBlockedBy([])).toBeNull();
+    expect(exportBlockedBy(['L2'])).toBe('The draft can be saved as a file once L2 is complete.');
+    expect(exportBlockedBy(['L2', 'L3', 'L7'])).toMatch(/once L2, L3 and L7 are complete/);
+    expect(exportBlockedBy(['L1', 'L2', 'L3', 'L4'])).toMatch(/once its 4 incomplete lines are complete/);
   });
 });
