@@ -11,7 +11,8 @@ const KINDS: readonly FileKind[] = [
   { endings: ['.jpg', '.jpeg'], mediaType: 'image/jpeg', begins: [0xff, 0xd8, 0xff] },
 ];
 
-export const MAX_ATTACHMENT_BYTES = 20 * 1024 * 1024;
+/** 20 MB, of a thousand kB each, as sizes are shown. */
+export const MAX_ATTACHMENT_BYTES = 20_000_000;
 export const TAKEN_FILES = 'a PDF, PNG or JPEG';
 
 /** The media type of a file, or null when the three do not agree on one that is taken. */

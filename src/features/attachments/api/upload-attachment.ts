@@ -11,9 +11,10 @@ export interface AttachmentSubject {
   lineKey?: string;
 }
 
-function fieldsOf({ discrepancy, lineKey }: AttachmentSubject): Record<string, string> {
-  if (discrepancy !== undefined) return { discrepancy: String(discrepancy) };
-  return lineKey === undefined ? {} : { lineKey };
+/** The fields that tell the server what the file belongs to. */
+export function fieldsOf({ discrepancy, lineKey }: AttachmentSubject): Record<string, string> {
+  if (discrepancy !== undefined) return { subject: 'discrepancy', ref: String(discrepancy) };
+  return lineKey === undefined ? {} : { subject: 'line', ref: lineKey };
 }
 
 /** Sends a file to be kept with the case. */

@@ -27,6 +27,8 @@ export function AttachButton({ number, subject = {}, label = 'Attach a file' }: 
     const reason = whyNot(chosen);
     setRefusal(reason);
     setFile(chosen);
+    // what was said of the file before says nothing of this one
+    send.reset();
     if (reason) return;
     setShare(0);
     send.mutate(chosen);

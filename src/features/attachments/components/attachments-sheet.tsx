@@ -18,7 +18,7 @@ export function AttachmentsSheet({ number, files, open }: AttachmentsSheetProps)
       <div className="sheet-body">
         {files.length === 0 && (
           <p className="mb-3 text-control text-ink-soft">
-            Data sheets, single-line diagrams, tables: PDF, PNG or JPEG up to 20 MB.
+            {'Data sheets, single-line diagrams, tables: PDF, PNG or JPEG up to 20\u2009MB.'}
           </p>
         )}
         <FileList files={files} />
