@@ -1,6 +1,7 @@
 import { Suspense, useEffect, useRef } from 'react';
 import { Outlet, ScrollRestoration, useLocation, useNavigation } from 'react-router-dom';
 import { SkeletonPage } from '../components/feedback/skeleton';
+import { useKeptFocus } from '../hooks/use-kept-focus';
 import { useSession } from '../lib/api/session';
 import { SessionOverlay } from './session-overlay';
 import { TopBar } from './top-bar';
@@ -22,6 +23,7 @@ export function Shell() {
   const session = useSession();
   const page = usePageFocus();
   const navigation = useNavigation();
+  useKeptFocus();
   if (!session) return null;
   return (
     <>

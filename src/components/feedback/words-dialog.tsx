@@ -1,4 +1,4 @@
-import { useState, type FormEvent, type ReactNode } from 'react';
+import { useId, useState, type FormEvent, type ReactNode } from 'react';
 import { Button, type ButtonKind } from '../ui/button';
 import { Dialog } from '../ui/dialog';
 import { Field } from '../ui/field';
@@ -35,11 +35,13 @@ export function WordsDialog({
 }: WordsDialogProps) {
   const [words, setWords] = useState(initial);
   const [missing, setMissing] = useState(false);
+  const fieldId = useId();
   const submit = (event: FormEvent) => {
     event.preventDefault();
     const lacking = !optional && words.trim() === '';
     setMissing(lacking);
-    if (!lacking) props.onConfirm(words.trim());
+    if (lacking) document.getElementById(fieldId)?.focus();
+    else props.onConfirm(words.trim());
   };
   return (
     <Dialog
@@ -51,6 +53,7 @@ export function WordsDialog({
       <form onSubmit={submit} className="grid gap-4" noValidate>
         {props.children}
         <Field
+          id={fieldId}
           label={props.label}
           optional={optional}
           hint={props.hint}
