@@ -65,7 +65,7 @@ function NothingHere({ controls }: { controls: ListControls<QueueFilter> }) {
     return (
       <EmptyState
         title="No application fits these filters."
-        actions={<Button onClick={controls.clear}>Show everyone’s</Button>}
+        actions={<Button onClick={controls.clear}>Clear the filters</Button>}
       />
     );
   }
