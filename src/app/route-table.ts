@@ -63,7 +63,7 @@ export const ROUTES: readonly RouteEntry[] = [
     roles: ['reviewer', 'administrator'],
     lazy: () => import('./routes/review'),
   },
-  { path: '/queue', roles: ['reviewer', 'administrator'], lazy: () => import('./routes/queue') },
+  { path: '/queue', roles: ['reviewer'], lazy: () => import('./routes/queue') },
   { path: '/lines', lazy: () => import('./routes/lines') },
   { path: '/letters', lazy: () => import('./routes/letters') },
   { path: '/rules', lazy: () => import('./routes/rules') },

@@ -3,6 +3,7 @@ import { useSearchParams } from 'react-router-dom';
 import type { Application, Discrepancy, Finding, Revision } from '#shared/contracts/api.generated';
 import { EmptyState } from '../../../components/feedback/empty-state';
 import { PageHead } from '../../../components/ui/page-head';
+import { useSession } from '../../../lib/api/session';
 import { useApplication } from '../../../lib/queries/get-application';
 import { useRevision } from '../../../lib/queries/get-revision';
 import { useDiscrepancies } from '../../../lib/queries/list-discrepancies';
@@ -44,11 +45,12 @@ interface ReviewPageProps {
 export function ReviewPage({ number, slots }: ReviewPageProps) {
   const application = useApplication(number);
   const [params] = useSearchParams();
+  const crumbs = useCrumbs(application);
   const letter = params.get('revision') ?? application.revision;
   if (letter === null || application.revision === null) {
     return (
       <>
-        <PageHead title={application.title} crumbs={crumbsOf(application)} />
+        <PageHead title={application.title} crumbs={crumbs} />
         <EmptyState title="Nothing has been filed yet.">
           The applicant is still drafting. The review begins with the first revision.
         </EmptyState>
@@ -62,12 +64,12 @@ export function ReviewPage({ number, slots }: ReviewPageProps) {
 
 const IN_QUEUE: readonly Application['state'][] = ['filed', 'in-review', 'returned'];
 
-const crumbsOf = ({ number, state }: Application) => [
-  IN_QUEUE.includes(state)
-    ? { label: 'Queue', to: '/queue' }
-    : { label: 'Applications', to: '/applications' },
-  { label: number },
-];
+/** Back to the queue for a reviewer whose case stands in it: nobody else has one. */
+function useCrumbs({ number, state }: Application) {
+  const inQueue = useSession()?.role === 'reviewer' && IN_QUEUE.includes(state);
+  const above = inQueue ? { label: 'Queue', to: '/queue' } : { label: 'Applications', to: '/applications' };
+  return [above, { label: number }];
+}
 
 interface FiledReviewProps {
   application: Application;
@@ -80,6 +82,7 @@ interface FiledReviewProps {
 
 function FiledReview({ application, current, letter, slots }: FiledReviewProps) {
   const { number } = application;
+  const crumbs = useCrumbs(application);
   const revision = useRevision(number, letter);
   const discrepancies = useDiscrepancies(number).items;
   const selection = useSelection();
@@ -91,7 +94,7 @@ function FiledReview({ application, current, letter, slots }: FiledReviewProps) 
       <PageHead
         title={`${application.title}, ${connectionWords(application)}`}
         documentTitle={`${number} ${application.title}`}
-        crumbs={crumbsOf(application)}
+        crumbs={crumbs}
         lead={reviewLead(application, discrepancies)}
         actions={
           <HeadActions
