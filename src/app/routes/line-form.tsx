@@ -8,7 +8,6 @@ import { hasDraft } from '../../features/applications/model/words';
 import { draftLineQuery } from '../../features/line-form/api/get-draft-line';
 import { LineForm } from '../../features/line-form/components/line-form';
 import { LineTitleBlock } from '../../features/line-form/components/line-title-block';
-import { PutNotice } from '../../features/line-form/components/put-notice';
 import { SaveWords } from '../../features/line-form/components/save-words';
 import { useFieldNotes } from '../../features/line-form/hooks/use-field-notes';
 import { useFormSettings } from '../../features/line-form/hooks/use-form-settings';
@@ -80,7 +79,7 @@ function LinePage({ input }: { input: LineEditorInput }) {
   const findings = useMemo(() => drawingNotes(outcome), [outcome]);
   const notes = useFieldNotes(editor.form, [...editor.textNotes, ...blockers], findings);
   const settings = useFormSettings(editor.form);
-  const { put, offer, values, keep, undo } = usePut(editor);
+  const { put, offer, notice } = usePut(editor);
   usePutFromElsewhere(put);
   useLeaveGuard(editor.save.kind === 'failed' || editor.save.kind === 'conflict');
   const isNew = !draft.lines.some((l) => l.lineKey === lineKey);
@@ -104,11 +103,11 @@ function LinePage({ input }: { input: LineEditorInput }) {
           />
         }
       />
-      {values && <PutNotice values={values} onKeep={keep} onUndo={undo} />}
       <LineForm
         editor={editor}
         notes={notes}
         view={settings.view}
+        put={notice}
         backTo={`/applications/${number}`}
         clearanceM={settings.clearanceM}
         badPositions={(section) => badPositions(outcome, section)}

@@ -1,12 +1,15 @@
 import { Disclosure } from '../../../components/ui/disclosure';
 import { Checkbox } from '../../../components/ui/inputs';
 import { useLineFormView } from '../hooks/form-context';
+import { useTakeBack } from '../hooks/take-back-context';
 import { getAt, setDeclares } from '../model/edit';
 import type { FormPath, MutualKey, SequenceKey } from '../model/form-types';
 import { MUTUAL_KEYS } from '../model/form-types';
+import { backDeclared } from '../model/take-back';
 import { declaredUnits, needsBase } from '../model/unit-choices';
 import { FieldGrid, FormPart } from './form-part';
 import { RatingsAndBasis } from './ratings-and-basis';
+import { TakeBackNotice } from './take-back-notice';
 import { PlainNumber } from './text-fields';
 import { TypedField } from './typed-field';
 
@@ -56,19 +59,33 @@ function CircuitValues({ circuit }: { circuit: number }) {
   const { form, change } = useLineFormView();
   const index = form.declared.findIndex((d) => d.circuit === circuit);
   const others = form.declared.some((d) => d.circuit !== circuit);
+  const { offer, end } = useTakeBack();
+  const place = `line-declared-${circuit}`;
+  const declare = (declares: boolean) => {
+    end();
+    if (!declares)
+      offer({
+        at: place,
+        words: `The values of circuit ${circuit} are removed.`,
+        back: backDeclared(form, circuit),
+        focusId: place,
+      });
+    change((f) => setDeclares(f, circuit, declares));
+  };
   return (
     <div className={circuit === 2 ? 'mt-6 border-t border-rule pt-4' : undefined}>
       {form.circuits === 2 && (
-        <div className="mb-3 flex flex-wrap items-baseline justify-between gap-x-4">
+        <div id={place} className="mb-3 flex flex-wrap items-baseline justify-between gap-x-4">
           <h2 className="text-h3">{`Circuit ${circuit}`}</h2>
           <Checkbox
             label="Somebody else’s, no values"
             checked={index < 0}
             disabled={index >= 0 && !others}
-            onChange={(event) => change((f) => setDeclares(f, circuit, !event.target.checked))}
+            onChange={(event) => declare(!event.target.checked)}
           />
         </div>
       )}
+      <TakeBackNotice at={place} />
       {index >= 0 && (
         <>
           <SequenceFields path={['declared', index]} />
@@ -80,8 +97,10 @@ function CircuitValues({ circuit }: { circuit: number }) {
 }
 
 function MutualValues() {
+  const { put } = useLineFormView();
+  const hasPut = put?.values[0]?.pointer.startsWith('/declaredMutual/') === true;
   return (
-    <Disclosure summary="Coupling of the two circuits" className="mt-5">
+    <Disclosure summary="Coupling of the two circuits" className="mt-5" open={hasPut || undefined}>
       <p className="mt-2 mb-3 text-table text-ink-soft">
         Zero-sequence values between the circuits; B0m is the off-diagonal element and negative.
       </p>

@@ -1,5 +1,9 @@
-import type { FormPath } from '../model/form-types';
-import { DIAMETER_UNITS, GMR_UNITS, WIRE_RESISTANCE_UNITS } from '../model/unit-choices';
+import { Button } from '../../../components/ui/button';
+import { useLineFormView } from '../hooks/form-context';
+import { proposedResistance } from '../model/area-resistance';
+import { getAt } from '../model/edit';
+import type { ConductorForm, FormPath } from '../model/form-types';
+import { AREA_UNITS, DIAMETER_UNITS, GMR_UNITS, WIRE_RESISTANCE_UNITS } from '../model/unit-choices';
 import { FieldGrid } from './form-part';
 import { ChoiceField, TextField } from './text-fields';
 import { TypedField } from './typed-field';
@@ -8,6 +12,28 @@ const MODELS = [
   { value: 'handbook', label: 'Handbook: a.c. resistance and GMR' },
   { value: 'tube', label: 'Tube: d.c. resistance and diameters' },
 ];
+
+/** An area in place of a resistance: it proposes one, and the applicant puts it in. */
+function AluminiumArea({ path }: { path: FormPath }) {
+  const { form, set } = useLineFormView();
+  const proposed = proposedResistance(getAt(form, path) as ConductorForm);
+  return (
+    <div className="grid content-start justify-items-start gap-2 [&>:first-child]:justify-self-stretch">
+      <TypedField
+        path={[...path, 'aluminiumArea']}
+        label="Nominal aluminium area"
+        units={AREA_UNITS}
+        optional
+        hint="not filed: it only proposes the d.c. resistance, by the resistivity of IEC 60889 without the lay of the strands"
+      />
+      {proposed && (
+        <Button small onClick={() => set([...path, 'dcResistance20OhmPerKm'], proposed)}>
+          {`Put ${proposed.text}\u2009Ω/km into the d.c. resistance`}
+        </Button>
+      )}
+    </div>
+  );
+}
 
 /** A conductor's own data: what the chosen model needs first, the rest optional. */
 export function OwnConductor({ path, model }: { path: FormPath; model: 'handbook' | 'tube' }) {
@@ -32,6 +58,7 @@ export function OwnConductor({ path, model }: { path: FormPath; model: 'handbook
           units={WIRE_RESISTANCE_UNITS}
           optional={tube}
         />
+        {tube && <AluminiumArea path={path} />}
         <TypedField
           path={[...path, 'dcResistance20OhmPerKm']}
           label="D.C. resistance at 20 °C"

@@ -7,6 +7,7 @@ import type { FormPath, PositionForm } from '../model/form-types';
 import { midspan } from '../model/midspan';
 import { fieldId, pointerOf, positionName } from '../model/pointers';
 import { PositionMark } from './position-mark';
+import { PutHere } from './put-notice';
 
 const COORDINATES = [
   { key: 'horizontalM', head: 'Across' },
@@ -57,6 +58,21 @@ function PositionErrors({ path }: { path: FormPath }) {
             {n.message}
           </FieldError>
         ))}
+      </Cell>
+    </Row>
+  );
+}
+
+/** A place that the check put in, under its row. */
+function PositionPut({ path }: { path: FormPath }) {
+  const { put } = useLineFormView();
+  const first = put?.values[0]?.pointer;
+  const here = COORDINATES.map(({ key }) => pointerOf([...path, key])).find((p) => p === first);
+  if (here === undefined) return null;
+  return (
+    <Row>
+      <Cell colSpan={5} fold="row" className="!h-auto !border-b-0 !pt-0">
+        <PutHere pointer={here} />
       </Cell>
     </Row>
   );
@@ -129,6 +145,7 @@ export function PositionsTable({ section }: { section: number }) {
         <TableBody key={index}>
           <PositionRow section={section} index={index} position={position} />
           <PositionErrors path={['sections', section, 'positions', index]} />
+          <PositionPut path={['sections', section, 'positions', index]} />
         </TableBody>
       ))}
     </Table>

@@ -1,28 +1,39 @@
+import { useEffect } from 'react';
 import { Notice } from '../../../components/feedback/notice';
 import { Button } from '../../../components/ui/button';
-import type { PutValue } from '../model/put-values';
+import { useLineFormView } from '../hooks/form-context';
+import type { StandingPut } from '../hooks/use-put';
+import { focusOn } from '../model/focus';
+import { fieldId, shownPointer } from '../model/pointers';
 
-interface PutNoticeProps {
-  values: readonly PutValue[];
-  onKeep: () => void;
-  onUndo: () => void;
+/** Values that the check put in, right under the first of their fields, to be confirmed or taken back. */
+export function PutHere({ pointer }: { pointer: string }) {
+  const { form, put } = useLineFormView();
+  const first = put?.values[0];
+  if (!put || !first || shownPointer(form, first.pointer) !== pointer) return null;
+  return <PutNotice key={`${first.after} ${put.values.length}`} put={put} id={fieldId(pointer)} />;
 }
 
-/** Values that the check put in, for the applicant to confirm or to take back. */
-export function PutNotice({ values, onKeep, onUndo }: PutNoticeProps) {
+function PutNotice({ put, id }: { put: StandingPut; id: string }) {
+  // The reader comes from the check, which may stand a screen away.
+  useEffect(() => focusOn(id), [id]);
+  const settle = (apply: () => void) => {
+    apply();
+    focusOn(id);
+  };
   return (
-    <Notice className="mb-6" announce title="Put in for you to confirm">
+    <Notice className="mt-3" announce title="Put in for you to confirm">
       <ul>
-        {values.map((v) => (
+        {put.values.map((v) => (
           <li key={v.pointer}>{`${v.label} is now ${v.after}, was ${v.before}.`}</li>
         ))}
       </ul>
       <p className="mt-1">Keep it only if your own source says so: you declare these values.</p>
       <div className="actions !mt-3">
-        <Button small kind="primary" onClick={onKeep}>
+        <Button small kind="primary" onClick={() => settle(put.keep)}>
           Keep
         </Button>
-        <Button small onClick={onUndo}>
+        <Button small onClick={() => settle(put.undo)}>
           Take it back
         </Button>
       </div>

@@ -1,11 +1,14 @@
 import { Field } from '../../../components/ui/field';
 import { Select } from '../../../components/ui/inputs';
 import { useLineFormView } from '../hooks/form-context';
+import { useFieldTies } from '../hooks/use-field';
 import { changeSection, groundWiresOf, phasesOf, setBundle } from '../model/edit';
 import type { SectionForm } from '../model/form-types';
+import { pointerOf } from '../model/pointers';
 import { SPACING_UNITS } from '../model/unit-choices';
 import { ConductorFields } from './conductor-fields';
 import { FieldGrid, FormPart } from './form-part';
+import { PutHere } from './put-notice';
 import { SharedBundleSpacing } from './shared-bundle-spacing';
 import { ChoiceField } from './text-fields';
 import { TypedField } from './typed-field';
@@ -31,24 +34,36 @@ function Bundle({ index, section }: SectionPartProps) {
   const { change } = useLineFormView();
   const counts = [...new Set(phasesOf(section).map((p) => p.bundleCount))];
   const count = counts.length === 1 ? (counts[0] ?? '1') : '';
+  const first = section.positions.findIndex((p) => p.kind === 'phase');
+  const ties = useFieldTies(['sections', index, 'positions', first, 'bundleCount']);
+  const pointer = pointerOf(['sections', index, 'positions', first, 'bundleCount']);
   return (
     <>
-      <Field
-        label="Subconductors per phase"
-        hint={counts.length > 1 ? 'the phases differ; a choice here sets them all' : undefined}
-      >
-        {(ties) => (
-          <Select
-            {...ties}
-            value={count}
-            onChange={(event) =>
-              change((f) => changeSection(f, index, (s) => setBundle(s, { bundleCount: event.target.value })))
-            }
-            none={counts.length > 1 ? 'differ' : undefined}
-            options={Array.from({ length: 8 }, (_, i) => ({ value: String(i + 1), label: String(i + 1) }))}
-          />
-        )}
-      </Field>
+      <div className="min-w-0">
+        <Field
+          id={ties.id}
+          error={ties.error}
+          label="Subconductors per phase"
+          hint={counts.length > 1 ? 'the phases differ; a choice here sets them all' : undefined}
+        >
+          {(control) => (
+            <Select
+              {...control}
+              onFocus={ties.onFocus}
+              onBlur={ties.onBlur}
+              value={count}
+              onChange={(event) =>
+                change((f) =>
+                  changeSection(f, index, (s) => setBundle(s, { bundleCount: event.target.value })),
+                )
+              }
+              none={counts.length > 1 ? 'differ' : undefined}
+              options={Array.from({ length: 8 }, (_, i) => ({ value: String(i + 1), label: String(i + 1) }))}
+            />
+          )}
+        </Field>
+        <PutHere pointer={pointer} />
+      </div>
       {count === '1' ? (
         <span className="hidden field:block" />
       ) : (

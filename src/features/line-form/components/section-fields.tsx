@@ -1,13 +1,17 @@
 import { Button } from '../../../components/ui/button';
 import { SegmentChoice } from '../../../components/ui/segment';
 import { useLineFormView } from '../hooks/form-context';
+import { useTakeBack } from '../hooks/take-back-context';
 import { addSection, removeSection } from '../model/edit';
 import type { SectionForm } from '../model/form-types';
+import { fieldId } from '../model/pointers';
+import { backSection } from '../model/take-back';
 import { SPAN_UNITS } from '../model/unit-choices';
 import { SequenceFields } from './declared-values';
 import { FieldGrid, FormPart } from './form-part';
 import { SectionConductors } from './section-conductors';
 import { SectionGeometry } from './section-geometry';
+import { TakeBackNotice } from './take-back-notice';
 import { ChoiceField } from './text-fields';
 import { TypedField } from './typed-field';
 
@@ -44,14 +48,24 @@ function SectionChooser({ shown, onShow }: SectionsProps) {
 /** Adds a section, which begins as the last one is, or takes the shown one away. */
 function SectionCount({ shown, onShow }: SectionsProps) {
   const { form, change } = useLineFormView();
+  const { offer } = useTakeBack();
   const count = form.sections.length;
   const add = () => {
     change(addSection);
     onShow(count);
   };
   const remove = () => {
+    const next = Math.max(0, shown - 1);
+    offer({
+      at: 'sections',
+      words: `Section ${shown + 1} is removed.`,
+      back: backSection(form, shown),
+      focusId: fieldId(`/sections/${next}/lengthKm`),
+      backFocusId: fieldId(`/sections/${shown}/lengthKm`),
+      onBack: () => onShow(shown),
+    });
     change((f) => removeSection(f, shown));
-    onShow(Math.max(0, shown - 1));
+    onShow(next);
   };
   return (
     <div className="mt-4 flex flex-wrap gap-3">
@@ -100,6 +114,7 @@ export function SectionFields({ shown, onShow }: SectionsProps) {
           <ChoiceField path={[...path, 'kind']} label="Kind" options={KINDS} />
         </FieldGrid>
         <SectionCount shown={shown} onShow={onShow} />
+        <TakeBackNotice at="sections" />
       </FormPart>
       {section.kind === 'cable' ? (
         <CableValues index={shown} section={section} />

@@ -1,31 +1,62 @@
+import { flushSync } from 'react-dom';
 import { Field } from '../../../components/ui/field';
 import { Checkbox, Select } from '../../../components/ui/inputs';
 import { Button } from '../../../components/ui/button';
 import { useLineFormView } from '../hooks/form-context';
-import { changeSection, groundWiresOf, heightUnit, setGroundWires, setHeightUnit } from '../model/edit';
-import type { SectionForm } from '../model/form-types';
+import { useTakeBack } from '../hooks/take-back-context';
+import { changeSection, groundWiresOf, heightUnit, setHeightUnit } from '../model/edit';
+import { focusOn } from '../model/focus';
+import type { LineForm, PositionForm, SectionForm } from '../model/form-types';
 import { readNumber } from '../model/number-text';
-import { TEMPLATES, applyTemplate } from '../model/templates';
+import { backGroundWires, backPositions } from '../model/take-back';
+import { TEMPLATES, applyTemplate, hangGroundWires } from '../model/templates';
 import { FieldGrid, FormPart } from './form-part';
 import { PositionsTable } from './positions-table';
+import { TakeBackNotice } from './take-back-notice';
+
+/** A voltage to begin with while none is entered, kV. */
+const USUAL_KV = 230;
+
+function voltageOf(form: LineForm): number {
+  const voltage = readNumber(form.nominalVoltageKv.text);
+  return voltage.kind === 'number' ? voltage.value : USUAL_KV;
+}
 
 interface SectionPartProps {
   index: number;
   section: SectionForm;
 }
 
+const TEMPLATE_ID = 'line-fill-from';
+const GROUND_WIRES_ID = 'line-ground-wires';
+const ENTER_ID = 'line-enter-geometry';
+
+const isEntered = (p: PositionForm): boolean =>
+  [p.horizontalM, p.attachmentHeightM, p.sagM].some(({ text }) => text.trim() !== '');
+
 /** Fills the positions from an arrangement; choosing one again fills them anew. */
-function TemplateChoice({ index }: { index: number }) {
+function TemplateChoice({ index, section }: SectionPartProps) {
   const { form, change } = useLineFormView();
-  const voltage = readNumber(form.nominalVoltageKv.text);
+  const { offer } = useTakeBack();
   const apply = (name: string) => {
     const template = TEMPLATES.find((t) => t.name === name);
     if (!template) return;
-    const kv = voltage.kind === 'number' ? voltage.value : 230;
+    const kv = voltageOf(form);
+    if (section.positions.some(isEntered))
+      offer({
+        at: 'positions',
+        words: `The positions that stood here are replaced by “${template.label}”.`,
+        back: backPositions(section, index),
+        focusId: TEMPLATE_ID,
+      });
     change((f) => changeSection(f, index, (s) => applyTemplate(s, template.name, kv)));
   };
   return (
-    <Field label="Fill from a structure" hint="starting values for the voltage; move each to what is built">
+    <Field
+      id={TEMPLATE_ID}
+      label="Fill from a structure"
+      hint="starting values for the voltage; move each to what is built"
+    >
       {(ties) => (
         <Select {...ties} value="" onChange={(event) => apply(event.target.value)} none="Own positions">
           {TEMPLATES.filter((t) => t.circuits === form.circuits).map((t) => (
@@ -42,7 +73,7 @@ function TemplateChoice({ index }: { index: number }) {
 function LengthsIn({ index, section }: SectionPartProps) {
   const { change } = useLineFormView();
   return (
-    <Field label="Lengths in">
+    <Field label="Lengths in" hint="the figures stay as they are typed">
       {(ties) => (
         <Select
           {...ties}
@@ -61,16 +92,27 @@ function LengthsIn({ index, section }: SectionPartProps) {
 }
 
 function GroundWireCount({ index, section }: SectionPartProps) {
-  const { change } = useLineFormView();
+  const { form, change } = useLineFormView();
+  const { offer, end } = useTakeBack();
+  const choose = (count: number) => {
+    const gone = groundWiresOf(section).slice(count);
+    end();
+    if (gone.some(isEntered))
+      offer({
+        at: 'positions',
+        words: gone.length === 1 ? 'A ground wire is removed.' : `${gone.length} ground wires are removed.`,
+        back: backGroundWires(section, index),
+        focusId: GROUND_WIRES_ID,
+      });
+    change((f) => changeSection(f, index, (s) => hangGroundWires(s, count, voltageOf(form))));
+  };
   return (
-    <Field label="Ground wires">
+    <Field id={GROUND_WIRES_ID} label="Ground wires">
       {(ties) => (
         <Select
           {...ties}
           value={String(groundWiresOf(section).length)}
-          onChange={(event) =>
-            change((f) => changeSection(f, index, (s) => setGroundWires(s, Number(event.target.value))))
-          }
+          onChange={(event) => choose(Number(event.target.value))}
           options={['none', '1', '2', '3', '4'].map((label, i) => ({ value: String(i), label }))}
         />
       )}
@@ -81,14 +123,20 @@ function GroundWireCount({ index, section }: SectionPartProps) {
 /** Where phases and ground wires hang; or that the geometry is still owed. */
 export function SectionGeometry({ index, section }: SectionPartProps) {
   const { set } = useLineFormView();
-  const hasGeometry = ['sections', index, 'hasGeometry'] as const;
+  const setHasGeometry = (has: boolean) => {
+    // At once: what was pressed is gone, and the reader goes on where its place was.
+    flushSync(() => set(['sections', index, 'hasGeometry'], has));
+    focusOn(has ? TEMPLATE_ID : ENTER_ID);
+  };
   if (!section.hasGeometry)
     return (
       <FormPart
         title="Positions at the structure"
-        note="Without the geometry only physics and typical values can be checked, and the line owes it."
+        note="Without it only physics and typical values can be checked; the geometry is still owed."
       >
-        <Button onClick={() => set(hasGeometry, true)}>Enter the geometry</Button>
+        <Button id={ENTER_ID} onClick={() => setHasGeometry(true)}>
+          Enter the geometry
+        </Button>
       </FormPart>
     );
   return (
@@ -97,17 +145,18 @@ export function SectionGeometry({ index, section }: SectionPartProps) {
       note="From the centre line and above ground, of the bundle’s centre. In the drawing, drag a disc or move it with the arrow keys."
     >
       <FieldGrid>
-        <TemplateChoice index={index} />
+        <TemplateChoice index={index} section={section} />
         <LengthsIn index={index} section={section} />
         <GroundWireCount index={index} section={section} />
         <div className="self-end pb-2">
           <Checkbox
             label="The geometry is not known yet"
             checked={false}
-            onChange={() => set(hasGeometry, false)}
+            onChange={() => setHasGeometry(false)}
           />
         </div>
       </FieldGrid>
+      <TakeBackNotice at="positions" />
       <PositionsTable section={index} />
     </FormPart>
   );

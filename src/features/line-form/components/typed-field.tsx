@@ -1,7 +1,9 @@
 import { NumberField } from '../../../components/ui/number-field';
 import { useTypedField } from '../hooks/use-field';
 import type { FormPath } from '../model/form-types';
+import { pointerOf } from '../model/pointers';
 import type { UnitChoice } from '../model/unit-choices';
+import { PutHere } from './put-notice';
 
 interface TypedFieldProps {
   path: FormPath;
@@ -27,5 +29,10 @@ export function TypedField({ path, units, hint, ...rest }: TypedFieldProps) {
           options: units.map((u) => ({ value: u.unit, label: u.label })),
         };
   const hints = [bandHint, hint].filter(Boolean).join('; ') || undefined;
-  return <NumberField {...rest} {...control} value={text} onChange={onText} unit={chooser} hint={hints} />;
+  return (
+    <div className="min-w-0">
+      <NumberField {...rest} {...control} value={text} onChange={onText} unit={chooser} hint={hints} />
+      <PutHere pointer={pointerOf(path)} />
+    </div>
+  );
 }

@@ -1,6 +1,7 @@
 import { createContext, useContext } from 'react';
 import type { Conductor } from '#shared/contracts/api.generated';
 import type { FormPath, LineForm } from '../model/form-types';
+import type { StandingPut } from './use-put';
 
 /** What the check or the schema says at a field. */
 export interface FieldNote {
@@ -18,6 +19,8 @@ export interface LineFormView {
   set: (path: FormPath, value: unknown) => void;
   /** Replaces the form by another made from it. */
   change: (change: (form: LineForm) => LineForm) => void;
+  /** Values that the check put in and that wait for a word. */
+  put?: StandingPut | null;
   /** What is to be shown under a field now. */
   noteAt: (pointer: string) => FieldNote | null;
   /** The reader has come to a field, or has left it. */

@@ -1,7 +1,7 @@
 import { useCallback, useMemo, useState } from 'react';
 import type { LineForm } from '../model/form-types';
 import { getAt } from '../model/edit';
-import { faultSentence, fieldPointer, inFormOrder } from '../model/pointers';
+import { faultSentence, fieldPointer, inFormOrder, shownPointer } from '../model/pointers';
 import type { FieldNote } from './form-context';
 
 /** A fault or a finding at a place of the line. */
@@ -40,7 +40,7 @@ export function useFieldNotes(
     const map = new Map<string, FieldNote>();
     // Faults first: a finding at the same field waits until the field holds a value.
     for (const { pointer, ...note } of [...faults, ...findings]) {
-      const field = fieldPointer(form, pointer);
+      const field = shownPointer(form, fieldPointer(form, pointer));
       if (!map.has(field)) map.set(field, note);
     }
     return map;
@@ -54,7 +54,7 @@ export function useFieldNotes(
   const items = useMemo((): NoteItem[] => {
     const first = new Map<string, NoteItem>();
     for (const { pointer, message } of faults) {
-      const field = fieldPointer(form, pointer);
+      const field = shownPointer(form, fieldPointer(form, pointer));
       if (!first.has(field))
         first.set(field, { pointer: field, message: faultSentence(form, field, message) });
     }

@@ -1,11 +1,18 @@
 import { useState } from 'react';
 import { getAt, setAt } from '../model/edit';
 import type { LineForm } from '../model/form-types';
-import { fieldId, pathOf } from '../model/pointers';
+import { pathOf } from '../model/pointers';
 import { putCorrection } from '../model/put-values';
 import { putWords } from '../model/put-words';
 import type { Correction, PutValue } from '../model/put-values';
 import type { LineEditor } from './use-line-editor';
+
+/** Values that were put in and wait for a word. */
+export interface StandingPut {
+  values: readonly PutValue[];
+  keep: () => void;
+  undo: () => void;
+}
 
 interface Standing {
   values: PutValue[];
@@ -21,7 +28,6 @@ export function usePut(editor: Pick<LineEditor, 'form' | 'change'>) {
     if (!first) return;
     setStanding({ values, before: editor.form });
     editor.change(() => form);
-    document.getElementById(fieldId(first.pointer))?.focus();
   };
   const undo = () => {
     if (!standing) return;
@@ -35,5 +41,6 @@ export function usePut(editor: Pick<LineEditor, 'form' | 'change'>) {
   };
   const offer = (correction: Correction, circuit: number | undefined) =>
     putWords(editor.form, correction, circuit ?? 1);
-  return { put, offer, undo, keep: () => setStanding(null), values: standing?.values ?? null };
+  const notice = standing && { values: standing.values, keep: () => setStanding(null), undo };
+  return { put, offer, notice };
 }

@@ -65,6 +65,7 @@ export const blankConductor = (): ConductorForm => ({
   dcResistance20OhmPerKm: typed('ohm/km'),
   temperatureC: typed('degC'),
   temperatureCoefficientPerK: typed('1/K'),
+  aluminiumArea: typed('mm2'),
 });
 
 export const blankPhase = (circuit: number, phase: PhaseName, lengthUnit = 'm'): PhaseForm => ({

@@ -2,10 +2,10 @@ import type { Conductor } from '#shared/contracts/api.generated';
 import { quantity } from '#shared/format/numbers';
 import { handbookData } from '#shared/library/handbook-data';
 import type { LibraryConductor } from '#shared/library/types';
-import { plainQuantity } from '../../../lib/plain-number';
+import { plainNumber, plainQuantity } from '../../../lib/plain-number';
 import type { ConductorForm } from './form-types';
 import { fieldOf } from './leaf';
-import { readNumber, writeNumber } from './number-text';
+import { digitsTyped, readNumber, writeNumber } from './number-text';
 
 /** The library's row of a conductor: the API sends it as the library has it. */
 export const rowOf = ({ row }: Conductor): LibraryConductor => row as unknown as LibraryConductor;
@@ -64,7 +64,9 @@ export function ownData(form: ConductorForm, before: Conductor | undefined): Con
 export function conductorWords(form: ConductorForm, conductor: Conductor | undefined): string | undefined {
   const data = form.source === 'library' ? dataOf(form, conductor) : null;
   if (!data) return undefined;
-  const shown = (value: number, unit: string) => plainQuantity(value, unit, 4);
+  // As the list has it, but in three digits at least: 28.14 mm, 1.00 mm.
+  const shown = (value: number, unit: string) =>
+    digitsTyped(plainNumber(value, 4)) < 3 ? quantity(value, unit) : plainQuantity(value, unit, 4);
   const geometry = `${shown(data.diameterMm, 'mm')}, GMR ${shown(data.gmrMm, 'mm')}`;
-  return `${geometry}, ${quantity(data.acResistanceOhmPerKm, 'Ω/km')} at ${shown(data.temperatureC, '°C')}`;
+  return `${geometry}, ${quantity(data.acResistanceOhmPerKm, 'Ω/km')} at ${plainQuantity(data.temperatureC, '°C')}`;
 }

@@ -34,6 +34,8 @@ export interface ConductorForm {
   dcResistance20OhmPerKm: Typed;
   temperatureC: Typed;
   temperatureCoefficientPerK: Typed;
+  /** Kept as it was typed and never filed: it only proposes the d.c. resistance. */
+  aluminiumArea: Typed;
 }
 
 export type PhaseName = 'a' | 'b' | 'c';

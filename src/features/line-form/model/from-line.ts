@@ -14,6 +14,7 @@ import type {
 import { MUTUAL_KEYS, SEQUENCE_KEYS } from './form-types';
 import { fieldOf } from './leaf';
 import {
+  AREA_UNITS,
   DIAMETER_UNITS,
   GMR_UNITS,
   HEIGHT_UNITS,
@@ -98,6 +99,7 @@ function conductor(r: Reader): ConductorForm {
     dcResistance20OhmPerKm: r.number('dcResistance20OhmPerKm', 'ohm/km', WIRE_RESISTANCE_UNITS),
     temperatureC: r.number('temperatureC', 'degC'),
     temperatureCoefficientPerK: r.number('temperatureCoefficientPerK', '1/K'),
+    aluminiumArea: r.number('aluminiumArea', 'mm2', AREA_UNITS),
   };
 }
 

@@ -6,7 +6,7 @@ import type { QuantityKind } from '#shared/units/declared-units';
 import { convert } from './convert';
 import { getAt } from './edit';
 import type { DeclaredTyped, LineForm, Typed } from './form-types';
-import { readNumber } from './number-text';
+import { digitsTyped, readNumber } from './number-text';
 
 const numberIn = (text: string): number | null => {
   const reading = readNumber(text);
@@ -64,12 +64,16 @@ function declaredInSi(
   return `is ${quantity(converted.si / lengthKm, kind === 'susceptance' ? 'µS/km' : 'Ω/km', 4)}`;
 }
 
-/** A length or a wire's resistance in the filing's unit, where another was chosen. */
+const LEAST_DIGITS = 3;
+const MOST_DIGITS = 6;
+
+/** A length or a wire's resistance, in no more digits than were typed, in the filing's unit, where another was chosen. */
 function lengthInSi(key: string, field: Typed): string | undefined {
   const unit = SI_OF[key];
   const value = numberIn(field.text);
   if (!unit || value === null || field.unit === unit) return undefined;
-  return `is ${quantity(convert(value, field.unit, unit), unit.replace('ohm', 'Ω'), 5)}`;
+  const digits = Math.min(MOST_DIGITS, Math.max(LEAST_DIGITS, digitsTyped(field.text)));
+  return `is ${quantity(convert(value, field.unit, unit), unit.replace('ohm', 'Ω'), digits)}`;
 }
 
 const isTyped = (node: unknown): node is Typed =>

@@ -36,6 +36,10 @@ export function readNumber(text: string): NumberReading {
   return { kind: 'fault', expected: 'a smaller number', message: `${plain} is too large to be kept.` };
 }
 
+/** How many significant digits a text says its number with; zeros that lead say nothing. */
+export const digitsTyped = (text: string): number =>
+  text.replace(/e.*$/i, '').replace(/[^\d]/g, '').replace(/^0+/, '').length;
+
 /** A number as the form writes it when nobody typed it: shortest digits that read back the same. */
 export function writeNumber(value: number): string {
   return Object.is(value, -0) ? '0' : String(value).replace('-', '\u2212');

@@ -44,6 +44,16 @@ export function fieldPointer(form: LineForm, pointer: string): string {
   return '/name';
 }
 
+const BUNDLE = /^\/sections\/(\d+)\/positions\/\d+\/(bundleCount|bundleSpacingM)$/;
+
+/** The field that the page shows for a field of the form: a bundle is entered once for all phases of its section. */
+export function shownPointer(form: LineForm, pointer: string): string {
+  const [, section, key] = BUNDLE.exec(pointer) ?? [];
+  if (section === undefined || key === undefined) return pointer;
+  const first = form.sections[Number(section)]?.positions.findIndex((p) => p.kind === 'phase') ?? -1;
+  return first < 0 ? pointer : `/sections/${section}/positions/${first}/${key}`;
+}
+
 /** The field that a person would go to for a fault of a whole group: its first number, else its first text. */
 function firstFieldBelow(form: LineForm, head: string[]): string {
   const node = getAt(form, head);
@@ -108,7 +118,7 @@ export function positionName(form: LineForm, section: number, position: number):
 function placeWords(form: LineForm, path: readonly string[]): string {
   const section = path[0] === 'sections' ? Number(path[1]) : null;
   const inSection = section !== null && form.sections.length > 1 ? `Section ${section + 1}` : '';
-  if (section !== null && path[2] === 'positions') {
+  if (section !== null && path[2] === 'positions' && !BUNDLE.test(pointerOf(path))) {
     const name = positionName(form, section, Number(path[3]));
     const words = /^(the )?ground/.test(name) ? name.replace(/^(the )?g/, 'G') : `Phase ${name}`;
     return inSection ? `${inSection}, ${words.charAt(0).toLowerCase()}${words.slice(1)}` : words;

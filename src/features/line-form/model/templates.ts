@@ -1,8 +1,8 @@
 import { PHASES, blankGroundWire, blankPhase } from './blank';
-import { groundWiresOf, heightUnit, phasesOf } from './edit';
-import type { PhaseName, PositionForm, SectionForm } from './form-types';
+import { groundWiresOf, heightUnit, phasesOf, setGroundWires } from './edit';
+import type { GroundWireForm, PhaseName, PositionForm, SectionForm } from './form-types';
 import { convert } from './convert';
-import { writeNumber } from './number-text';
+import { readNumber, writeNumber } from './number-text';
 
 /**
  * Arrangements that fill the positions of a structure. Spacings and heights are round starting values
@@ -138,11 +138,51 @@ export function applyTemplate(
   });
   const wires = groundWiresOf(section);
   const shields = shieldPlaces(places, wires.length, spacingM).slice(0, wires.length);
-  const grounds = shields.map(([acrossM, heightM], i): PositionForm => ({
-    ...(wires[i] ?? blankGroundWire(unit)),
+  const grounds = shields.map((place, i) => hung(wires[i] ?? blankGroundWire(unit), place, sagM));
+  return { ...section, positions: [...phases, ...grounds] };
+}
+
+/** A ground wire at a place over the phases; it sags less than they do. */
+function hung(wire: GroundWireForm, [acrossM, heightM]: [number, number], phaseSagM: number): GroundWireForm {
+  const { unit } = wire.attachmentHeightM;
+  return {
+    ...wire,
     horizontalM: inUnit(acrossM, unit),
     attachmentHeightM: inUnit(heightM, unit),
-    sagM: inUnit(sagM * 0.8, unit),
-  }));
-  return { ...section, positions: [...phases, ...grounds] };
+    sagM: inUnit(phaseSagM * 0.8, unit),
+  };
+}
+
+const isBlank = ({ horizontalM, attachmentHeightM, sagM }: GroundWireForm): boolean =>
+  [horizontalM, attachmentHeightM, sagM].every(({ text }) => text.trim() === '');
+
+/** Where the phases hang, in metres; null while one of them lacks its place. */
+function entered(section: SectionForm): Place[] | null {
+  const places = phasesOf(section).map((p): Place | null => {
+    const [across, height] = [readNumber(p.horizontalM.text), readNumber(p.attachmentHeightM.text)];
+    if (across.kind !== 'number' || height.kind !== 'number') return null;
+    return {
+      circuit: p.circuit,
+      phase: p.phase,
+      acrossM: convert(across.value, p.horizontalM.unit, 'm'),
+      heightM: convert(height.value, p.attachmentHeightM.unit, 'm'),
+    };
+  });
+  const known = places.filter((p) => p !== null);
+  return known.length === places.length && known.length > 0 ? known : null;
+}
+
+/**
+ * As many ground wires as asked for. Where the phases hang already and the wires stand nowhere yet, they
+ * begin over the phases, as a structure would fill them; wires that have a place keep it.
+ */
+export function hangGroundWires(section: SectionForm, count: number, nominalVoltageKv: number): SectionForm {
+  const next = setGroundWires(section, count);
+  const places = entered(next);
+  const wires = groundWiresOf(next);
+  if (!places || !wires.every(isBlank)) return next;
+  const { spacingM, sagM } = sizes(nominalVoltageKv);
+  const shields = shieldPlaces(places, count, spacingM).slice(0, count);
+  const grounds = shields.map((place, i) => hung(wires[i] ?? blankGroundWire(), place, sagM));
+  return { ...next, positions: [...phasesOf(next), ...grounds] };
 }

@@ -58,6 +58,8 @@ function conductor(form: ConductorForm, pointer: string, g: Gathered): Json {
   const at = (name: keyof ConductorForm, field: Typed, unit: string) =>
     numberOf(field, unit, `${pointer}/${name}`, g);
   const temperatureC = at('temperatureC', form.temperatureC, 'degC');
+  if (form.aluminiumArea.text.trim() !== '')
+    g.asTyped[`${pointer}/aluminiumArea`] = { ...form.aluminiumArea };
   // A library conductor that nobody has chosen yet keeps its member, so that its fault is said at the choice.
   if (form.source === 'library') return { library: form.library, ...given({ temperatureC }) };
   return given({

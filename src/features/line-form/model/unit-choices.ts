@@ -14,6 +14,7 @@ export const HEIGHT_UNITS = choices(['m', 'm'], ['ft', 'ft']);
 export const SPACING_UNITS = choices(['m', 'm'], ['mm', 'mm'], ['cm', 'cm'], ['in', 'in'], ['ft', 'ft']);
 export const DIAMETER_UNITS = choices(['mm', 'mm'], ['in', 'in'], ['cm', 'cm']);
 export const GMR_UNITS = choices(['mm', 'mm'], ['in', 'in'], ['ft', 'ft'], ['cm', 'cm']);
+export const AREA_UNITS = choices(['mm2', 'mm²'], ['kcmil', 'kcmil']);
 export const WIRE_RESISTANCE_UNITS = choices(['ohm/km', 'Ω/km'], ['ohm/mi', 'Ω/mi'], ['ohm/kft', 'Ω/kft']);
 
 const RESISTANCE = choices(

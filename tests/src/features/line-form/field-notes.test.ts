@@ -41,6 +41,15 @@ describe('when the form says what is wrong', () => {
     expect(result.current.asked).toBe(true);
   });
 
+  it('says once what every phase of a bundle lacks, at the one field and without a phase', () => {
+    const spacing = (n: number) =>
+      note(`/sections/0/positions/${n}/bundleSpacingM`, 'Bundle spacing is missing.');
+    const { result } = renderHook(() => useFieldNotes(form, [spacing(0), spacing(1), spacing(2)], []));
+    expect(result.current.all).toEqual([
+      { pointer: '/sections/0/positions/0/bundleSpacingM', message: 'Bundle spacing is missing.' },
+    ]);
+  });
+
   it('lets a fault go before a finding at the same field', () => {
     const finding: PlacedNote = { pointer: '/declared/0/x1', message: 'odd', grade: 'explain' };
     const { result } = renderHook(() => useFieldNotes(form, [slip], [finding]));

@@ -5,8 +5,10 @@ import { MemoryRouter } from 'react-router-dom';
 import { describe, expect, it } from 'vitest';
 import { LineDrawing } from '../../../../src/features/line-form/components/line-drawing';
 import { DeclaredValues } from '../../../../src/features/line-form/components/declared-values';
+import { LineIdentity } from '../../../../src/features/line-form/components/line-identity';
 import { SectionFields } from '../../../../src/features/line-form/components/section-fields';
 import { LineFormContext } from '../../../../src/features/line-form/hooks/form-context';
+import { TakeBackContext, useTakenBack } from '../../../../src/features/line-form/hooks/take-back-context';
 import { useFieldNotes } from '../../../../src/features/line-form/hooks/use-field-notes';
 import type { PlacedNote } from '../../../../src/features/line-form/hooks/use-field-notes';
 import { blankLine } from '../../../../src/features/line-form/model/blank';
@@ -22,6 +24,7 @@ function Stage({ start, notes = NO_NOTES, onForm }: StageProps) {
   const [form, setForm] = useState(start);
   const [shown, setShown] = useState(0);
   const said = useFieldNotes(form, notes, NO_NOTES);
+  const takeBack = useTakenBack();
   onForm(form);
   const view = {
     form,
@@ -39,9 +42,12 @@ function Stage({ start, notes = NO_NOTES, onForm }: StageProps) {
   return (
     <MemoryRouter>
       <LineFormContext value={view}>
-        <DeclaredValues />
-        <SectionFields shown={shown} onShow={setShown} />
-        <LineDrawing shown={shown} />
+        <TakeBackContext value={takeBack}>
+          <LineIdentity />
+          <DeclaredValues />
+          <SectionFields shown={shown} onShow={setShown} />
+          <LineDrawing shown={shown} />
+        </TakeBackContext>
       </LineFormContext>
     </MemoryRouter>
   );
@@ -85,7 +91,7 @@ describe('form and drawing', () => {
     expect(screen.getByRole('textbox', { name: 'Phase b, height, metres' })).not.toHaveValue('');
     expect(form().sections[0]?.positions).toHaveLength(3);
     await user.selectOptions(screen.getByLabelText('Ground wires'), '2');
-    expect(screen.getByRole('textbox', { name: 'Ground wire 2, sag, metres' })).toHaveValue('');
+    expect(screen.getByRole('textbox', { name: 'Ground wire 2, sag, metres' })).toHaveValue('5.6');
   });
 
   it('asks for the bundle’s spacing from two subconductors on, and writes it to every phase', async () => {
@@ -129,5 +135,39 @@ describe('form and drawing', () => {
     const chooser = screen.getByRole('group', { name: 'Section' });
     await user.click(within(chooser).getByRole('button', { name: 'Section 1' }));
     expect(screen.getByText('As it hangs')).toBeInTheDocument();
+  });
+});
+
+describe('what one press takes away', () => {
+  it('a removed section comes back to its place, and the reader to its length', async () => {
+    const { user, form } = stand();
+    await user.click(screen.getByRole('button', { name: 'Add a section' }));
+    await user.type(screen.getByRole('textbox', { name: 'Length' }), '12.5');
+    await user.click(screen.getByRole('button', { name: 'Remove section 2' }));
+    expect(form().sections).toHaveLength(1);
+    expect(screen.getByRole('button', { name: 'Take it back' })).toHaveFocus();
+    await user.click(screen.getByRole('button', { name: 'Take it back' }));
+    expect(form().sections[1]?.lengthKm.text).toBe('12.5');
+    expect(screen.queryByRole('button', { name: 'Take it back' })).toBeNull();
+    expect(document.body).not.toHaveFocus();
+  });
+
+  it('the second circuit comes back with its values', async () => {
+    const { user, form } = stand();
+    await user.click(screen.getByRole('button', { name: 'Two' }));
+    await user.type(screen.getAllByRole('textbox', { name: 'X1' })[1] as HTMLElement, '0.4');
+    await user.click(screen.getByRole('button', { name: 'One' }));
+    expect(form().declared).toHaveLength(1);
+    await user.click(screen.getByRole('button', { name: 'Take it back' }));
+    expect(form().declared[1]?.x1.text).toBe('0.4');
+    expect(screen.getByRole('button', { name: 'Two' })).toHaveFocus();
+  });
+
+  it('the geometry that is not known yet leads to the button that enters it, and back', async () => {
+    const { user } = stand();
+    await user.click(screen.getByRole('checkbox', { name: 'The geometry is not known yet' }));
+    expect(screen.getByRole('button', { name: 'Enter the geometry' })).toHaveFocus();
+    await user.keyboard('{Enter}');
+    expect(screen.getByRole('combobox', { name: 'Fill from a structure' })).toHaveFocus();
   });
 });

@@ -24,11 +24,27 @@ describe('the value in the filing’s unit', () => {
     expect(plain(siHint(long, '/declared/0/x1', 100))).toBe('is 0.3809 Ω/km');
   });
 
+  it.each([
+    // 1 mi = 1.609344 km, 1 ft = 0.3048 m, exact.
+    ['bundleSpacingM', '457', 'mm', 'is 0.457 m'],
+    ['attachmentHeightM', '30', 'ft', 'is 9.14 m'],
+    ['attachmentHeightM', '78.704', 'ft', 'is 23.989 m'],
+  ])('says %s of %s %s in no more digits than were typed, but three', (key, text, unit, hint) => {
+    const path = ['sections', 0, 'positions', 0, key] as const;
+    const form = setAt(blankLine(), path, { text, unit });
+    expect(plain(siHint(form, `/sections/0/positions/0/${key}`, 100))).toBe(hint);
+  });
+
+  it('says 41.6 mi as 66.9 km', () => {
+    const form = setAt(blankLine(), ['sections', 0, 'lengthKm'], { text: '41.6', unit: 'mi' });
+    expect(plain(siHint(form, '/sections/0/lengthKm', 100))).toBe('is 66.9 km');
+  });
+
   it('says a length in metres, and nothing where the unit is the filing’s own or the text no number', () => {
     const path = ['sections', 0, 'positions', 0, 'attachmentHeightM'] as const;
     const pointer = '/sections/0/positions/0/attachmentHeightM';
     expect(plain(siHint(setAt(blankLine(), path, { text: '78.7', unit: 'ft' }), pointer, 100))).toBe(
-      'is 23.988 m',
+      'is 24.0 m',
     );
     expect(siHint(setAt(blankLine(), path, { text: '24', unit: 'm' }), pointer, 100)).toBeUndefined();
     expect(siHint(setAt(blankLine(), path, { text: 'high', unit: 'ft' }), pointer, 100)).toBeUndefined();
