@@ -2,6 +2,7 @@ import { useEffect } from 'react';
 
 const FOCUSABLE = 'a, button, input, select, textarea, summary, label, [tabindex]';
 const DIALOG = '[role="dialog"], [role="alertdialog"]';
+const ABOVE = `${DIALOG}, [role="menu"]`;
 /** A closed dialog gives the focus back, and a form may lead it on: both come first. */
 const PATIENCE_MS = 100;
 
@@ -29,8 +30,11 @@ function headingFor(path: readonly Element[]): HTMLElement | null {
 export function keepFocus(): () => void {
   let path: Element[] = [];
   let waiting: ReturnType<typeof setTimeout> | undefined;
+  let above = false;
   const remember = (target: EventTarget | null) => {
-    if (!(target instanceof Element) || target.closest(DIALOG)) return;
+    if (!(target instanceof Element)) return;
+    above = target.closest(ABOVE) !== null;
+    if (above) return;
     path = pathOf(target.closest(FOCUSABLE));
   };
   const onFocus = ({ target }: FocusEvent) => remember(target);
@@ -38,8 +42,12 @@ export function keepFocus(): () => void {
   const lead = () => {
     const [last] = path;
     const nowhere = document.activeElement === null || document.activeElement === document.body;
-    if (!nowhere || last === undefined || document.querySelector(DIALOG)) return;
-    if (last.isConnected && !last.matches(':disabled')) return;
+    if (!nowhere || last === undefined || document.querySelector(ABOVE)) return;
+    if (last.isConnected && !last.matches(':disabled')) {
+      // what stood above the page is closed: back to where it was opened
+      if (above && last instanceof HTMLElement) last.focus();
+      return;
+    }
     const heading = headingFor(path);
     if (!heading) return;
     heading.tabIndex = -1;

@@ -1,5 +1,5 @@
 import { Dialog as Radix } from 'radix-ui';
-import type { ReactNode } from 'react';
+import { useRef, type ReactNode } from 'react';
 import { IconButton } from './button';
 import { classNames } from './class-names';
 
@@ -28,6 +28,12 @@ export function Dialog({
   wide,
   insistent,
 }: DialogProps) {
+  const opener = useRef<Element | null>(null);
+  // Opened by state and not by a trigger of its own, the dialog itself has to know where the focus came from.
+  const goBack = (event: Event) => {
+    event.preventDefault();
+    if (opener.current instanceof HTMLElement && opener.current.isConnected) opener.current.focus();
+  };
   const hold = insistent ? (event: Event) => event.preventDefault() : undefined;
   return (
     <Radix.Root open={open} onOpenChange={onOpenChange}>
@@ -35,6 +41,10 @@ export function Dialog({
         <Radix.Overlay className="dialog-veil" />
         <Radix.Content
           className={classNames('dialog', wide && 'dialog-wide')}
+          onOpenAutoFocus={() => {
+            opener.current = document.activeElement;
+          }}
+          onCloseAutoFocus={goBack}
           onEscapeKeyDown={hold}
           onInteractOutside={hold}
           {...(description ? {} : { 'aria-describedby': undefined })}

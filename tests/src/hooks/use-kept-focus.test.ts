@@ -44,6 +44,18 @@ describe('the focus, when its control goes', () => {
     expect(document.activeElement?.textContent).toBe('Lines');
   });
 
+  it('goes back to what opened a dialog, by a menu too', async () => {
+    named('stays').focus();
+    document.body.insertAdjacentHTML('beforeend', '<div role="menu"><button id="item">Roles</button></div>');
+    named('item').focus();
+    document.querySelector('[role="menu"]')?.remove();
+    document.body.insertAdjacentHTML('beforeend', '<div role="dialog"><button id="yes">Yes</button></div>');
+    named('yes').focus();
+    document.querySelector('[role="dialog"]')?.remove();
+    await settled();
+    expect(document.activeElement).toBe(named('stays'));
+  });
+
   it('is left alone where it stands, and where the reader put it aside', async () => {
     named('stays').focus();
     named('remove').remove();
