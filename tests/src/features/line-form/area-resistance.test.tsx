@@ -52,12 +52,12 @@ describe('an area in the form', () => {
   it('puts the resistance in when asked to, and keeps its own text beside the line', async () => {
     let form = tube;
     render(<Stage onForm={(next) => (form = next)} />);
-    await userEvent.type(screen.getByLabelText(/Nominal aluminium area/), '402.8');
+    await userEvent.type(screen.getByRole('textbox', { name: /^Nominal aluminium area/ }), '402.8');
     const before = readForm(form);
     expect(JSON.stringify(before.line)).not.toContain('402.8');
     expect(before.asTyped['/sections/0/conductors/phase/aluminiumArea']).toMatchObject({ text: '402.8' });
     await userEvent.click(
-      screen.getByRole('button', { name: /^Put 0\.07017 Ω\/km into the d\.c\. resistance/ }),
+      screen.getByRole('button', { name: /^Put 0\.07017\sΩ\/km into the d\.c\. resistance/ }),
     );
     expect(readForm(form).line).toMatchObject({
       sections: [{ conductors: { phase: { dcResistance20OhmPerKm: 0.07017 } } }],
