@@ -15,6 +15,7 @@ import { useLineEditor } from '../../features/line-form/hooks/use-line-editor';
 import type { LineEditorInput } from '../../features/line-form/hooks/use-line-editor';
 import { usePut } from '../../features/line-form/hooks/use-put';
 import type { Correction } from '../../features/line-form/model/put-values';
+import { outcomeInFormWords } from '../../features/line-form/model/form-words';
 import { writtenDigits } from '../../features/line-form/model/written-digits';
 import { FindingCount } from '../../features/live-check/components/finding-count';
 import { LiveCheckPanel } from '../../features/live-check/components/live-check';
@@ -65,7 +66,10 @@ function useCheckOf(editor: ReturnType<typeof useLineEditor>) {
   const conductors = useConductors();
   const basis = useMemo(() => checkBasis(rules, conductors), [rules, conductors]);
   const written = useMemo(() => writtenDigits(editor.form), [editor.form]);
-  return useLiveCheck(editor.reading.line, written, basis);
+  const check = useLiveCheck(editor.reading.line, written, basis);
+  const { outcome } = check;
+  const worded = useMemo(() => outcomeInFormWords(editor.form, outcome), [editor.form, outcome]);
+  return { ...check, outcome: worded };
 }
 
 function LinePage({ input }: { input: LineEditorInput }) {
