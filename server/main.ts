@@ -77,6 +77,6 @@ async function main(): Promise<void> {
 }
 
 main().catch((error: unknown) => {
-  console.error(error);
+  console.error(error instanceof ConfigError ? error.message : error);
   process.exit(1);
 });

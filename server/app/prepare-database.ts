@@ -1,9 +1,10 @@
 import { createHmac } from 'node:crypto';
+import { ConfigError } from '../config/config';
 import type { Config } from '../config/config';
 import { migrate } from '../database/migrate';
 import { makeDataSource } from '../database/data-source';
 import { seedBaseline } from '../database/seeds/baseline';
-import { seedDemo } from '../database/seeds/demo';
+import { holdsDemo, seedDemo } from '../database/seeds/demo';
 import { User } from '../entities/people.entities';
 
 /** The owner's calendar until an administrator sets another. */
@@ -22,7 +23,11 @@ export async function prepareDatabase(config: Config, now: Date): Promise<Prepar
   await owner.initialize();
   try {
     await owner.transaction((manager) => seedBaseline(manager, { now, timeZone: FIRST_TIME_ZONE }));
-    if (demo) await seedDemo(owner, publicUrl, now);
+    // The demo shows everybody's mail: never over people who are not invented.
+    if (demo && !(await seedDemo(owner, publicUrl, now)) && !(await holdsDemo(owner)))
+      throw new ConfigError([
+        'DEMO is on, but the database holds people of a real set-up: start with DEMO=off.',
+      ]);
     return { empty: !(await owner.manager.exists(User)) };
   } finally {
     await owner.destroy();
