@@ -2,6 +2,7 @@ import { useCallback, useMemo, useState } from 'react';
 import type { LineForm } from '../model/form-types';
 import { getAt } from '../model/edit';
 import { faultSentence, fieldPointer, inFormOrder, shownPointer } from '../model/pointers';
+import { unitLabel } from '../model/unit-choices';
 import type { FieldNote } from './form-context';
 
 /** A fault or a finding at a place of the line. */
@@ -20,6 +21,14 @@ function hasText(form: LineForm, pointer: string): boolean {
   return typeof node === 'object' && node !== null && 'text' in node && String(node.text).trim() !== '';
 }
 
+/** A wish for a value in the unit that its field stands at: "Give it in mm." */
+function inItsUnit(form: LineForm, pointer: string, message: string): string {
+  const node = getAt(form, pointer.split('/').slice(1));
+  const unit =
+    typeof node === 'object' && node !== null && 'unit' in node ? unitLabel(String(node.unit)) : '';
+  return unit === '' ? message : message.replace(/Give it in\s[^\s.]+\.$/u, `Give it in ${unit}.`);
+}
+
 /** What the form says about its fields, and when. */
 export type FormNotes = ReturnType<typeof useFieldNotes>;
 
@@ -35,13 +44,14 @@ export function useFieldNotes(
   const [visited, setVisited] = useState<ReadonlySet<string>>(new Set());
   const [focused, setFocused] = useState<string | null>(null);
   const [showAll, setShowAll] = useState(false);
+  const [asked, setAsked] = useState(false);
 
   const byField = useMemo(() => {
     const map = new Map<string, FieldNote>();
     // Faults first: a finding at the same field waits until the field holds a value.
-    for (const { pointer, ...note } of [...faults, ...findings]) {
+    for (const { pointer, message, ...note } of [...faults, ...findings]) {
       const field = shownPointer(form, fieldPointer(form, pointer));
-      if (!map.has(field)) map.set(field, note);
+      if (!map.has(field)) map.set(field, { ...note, message: inItsUnit(form, field, message) });
     }
     return map;
   }, [form, faults, findings]);
@@ -56,7 +66,10 @@ export function useFieldNotes(
     for (const { pointer, message } of faults) {
       const field = shownPointer(form, fieldPointer(form, pointer));
       if (!first.has(field))
-        first.set(field, { pointer: field, message: faultSentence(form, field, message) });
+        first.set(field, {
+          pointer: field,
+          message: faultSentence(form, field, inItsUnit(form, field, message)),
+        });
     }
     return [...first.values()].sort((a, b) => inFormOrder(a.pointer, b.pointer));
   }, [form, faults]);
@@ -66,7 +79,11 @@ export function useFieldNotes(
       (pointer: string) => (isShown(pointer) ? (byField.get(pointer) ?? null) : null),
       [byField, isShown],
     ),
-    enter: useCallback((pointer: string) => setFocused(pointer), []),
+    enter: useCallback((pointer: string) => {
+      setFocused(pointer);
+      // Whoever types again is not called away to the summary when another fault turns up.
+      setAsked(false);
+    }, []),
     leave: useCallback((pointer: string) => {
       setFocused(null);
       setVisited((before) => (before.has(pointer) ? before : new Set([...before, pointer])));
@@ -75,7 +92,11 @@ export function useFieldNotes(
     shown: items.filter((item) => isShown(item.pointer)),
     /** All faults, shown or not. */
     all: items,
-    showAll: useCallback(() => setShowAll(true), []),
-    asked: showAll,
+    showAll: useCallback(() => {
+      setShowAll(true);
+      setAsked(true);
+    }, []),
+    /** The writer has just asked for them. */
+    asked,
   };
 }

@@ -41,6 +41,24 @@ describe('when the form says what is wrong', () => {
     expect(result.current.asked).toBe(true);
   });
 
+  it('wishes for a value in the unit that its field stands at', () => {
+    const inMm = setAt(form, ['sections', 0, 'positions', 0, 'bundleSpacingM', 'unit'], 'mm');
+    const wish = note(
+      '/sections/0/positions/0/bundleSpacingM',
+      'Bundle spacing is missing. Give it in\u2009m.',
+    );
+    const { result } = renderHook(() => useFieldNotes(inMm, [wish], []));
+    expect(result.current.all[0]?.message).toBe('Bundle spacing is missing. Give it in mm.');
+  });
+
+  it('calls to the summary when asked, not any more once somebody types again', () => {
+    const { result } = renderHook(() => useFieldNotes(form, [missing], []));
+    act(() => result.current.showAll());
+    act(() => result.current.enter('/from'));
+    expect(result.current.asked).toBe(false);
+    expect(result.current.shown).toHaveLength(1);
+  });
+
   it('says once what every phase of a bundle lacks, at the one field and without a phase', () => {
     const spacing = (n: number) =>
       note(`/sections/0/positions/${n}/bundleSpacingM`, 'Bundle spacing is missing.');
