@@ -68,7 +68,7 @@ async function sendLetter(
     closingHeading: 'How to answer',
     closing: [
       `Open ${number}, answer each discrepancy by a change or an explanation, and file revision ${next} by ${due}, ` +
-        `${cure.workingDays} working days from today. If you need longer, ask before that day.`,
+        `${cure.workingDays} working days from today.`,
     ],
     mail: [
       `Revision ${revision.letter} is returned with ${counted(open.length).toLowerCase()}.`,
@@ -96,14 +96,15 @@ async function itemsOf({ tx }: Caller, file: CaseFile, open: readonly Discrepanc
       links.filter((l) => l.discrepancyId === discrepancy.id),
       findings,
     );
+    const found = own.filter((finding) => finding.follows === null).flatMap(sentencesOf);
     const last = entries.filter((e) => e.discrepancyId === discrepancy.id && e.kind === 'reopened').at(-1);
     return {
       label: `D-${discrepancy.number}`,
       grade: worstGrade(own.map((f) => f.grade)),
       title: discrepancy.title,
-      // what only follows from a questioned value is not said again
+      // what only follows from a questioned value is not said, nor what the reviewer's own words say already
       body: [
-        ...own.filter((finding) => finding.follows === null).flatMap(sentencesOf),
+        ...found.filter((sentence) => !discrepancy.questioned.includes(sentence)),
         discrepancy.questioned,
         ...(last === undefined ? [] : [last.text]),
       ],
