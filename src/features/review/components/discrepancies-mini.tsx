@@ -7,12 +7,14 @@ interface DiscrepanciesMiniProps {
   items: readonly Discrepancy[];
   /** State of the case: it says whose turn an open one is. */
   state: Application['state'];
+  /** Who has the case: "you", or the name. */
+  reviewer: string;
 }
 
 const isLive = (d: Discrepancy) => d.state === 'open' || d.state === 'answered';
 
 /** The discrepancies in brief, each leading to its thread. */
-export function DiscrepanciesMini({ items, state }: DiscrepanciesMiniProps) {
+export function DiscrepanciesMini({ items, state, reviewer }: DiscrepanciesMiniProps) {
   if (items.length === 0) return null;
   const live = items.filter(isLive).length;
   return (
@@ -29,7 +31,7 @@ export function DiscrepanciesMini({ items, state }: DiscrepanciesMiniProps) {
             ) : (
               <span className="text-ink-soft">{d.state}</span>
             )}
-            <span className="mini-more">{turnWords(d, state)}</span>
+            <span className="mini-more">{turnWords(d, state, reviewer)}</span>
           </li>
         ))}
       </ul>

@@ -71,6 +71,13 @@ function useCrumbs({ number, state }: Application) {
   return [above, { label: number }];
 }
 
+/** "you" where the case is the reader's own, else who has it. */
+function useReviewerWords({ reviewer }: Application): string {
+  const session = useSession();
+  if (reviewer === null) return 'its reviewer';
+  return reviewer.id === session?.user.id ? 'you' : reviewer.name;
+}
+
 interface FiledReviewProps {
   application: Application;
   /** The latest revision: what steps are taken on. */
@@ -89,13 +96,14 @@ function FiledReview({ application, current, letter, slots }: FiledReviewProps) 
   const [raising, setRaising] = useState<readonly Finding[] | null>(null);
   const nextName = `D-${Math.max(0, ...discrepancies.map((d) => d.number)) + 1}`;
   const mayAct = letter === current && isOpen(application, 'raise');
+  const reviewer = useReviewerWords(application);
   return (
     <>
       <PageHead
         title={`${application.title}, ${connectionWords(application)}`}
         documentTitle={`${number} ${application.title}`}
         crumbs={crumbs}
-        lead={reviewLead(application, discrepancies)}
+        lead={reviewLead(application, discrepancies, reviewer)}
         actions={
           <HeadActions
             application={application}
@@ -167,12 +175,13 @@ function SideColumn({ revision, application, discrepancies, mayAct, papers }: Si
   const [params] = useSearchParams();
   const shown = params.get('line') ?? revision.lines[0]?.lineKey ?? null;
   const { number } = application;
+  const reviewer = useReviewerWords(application);
   const lineHref = (lineKey: string) => `?revision=${revision.letter}&line=${lineKey}`;
   return (
     <div>
       <LinesNav lines={revision.lines} shown={shown} hrefOf={lineHref} />
       <div className="side-rest">
-        <DiscrepanciesMini items={discrepancies} state={application.state} />
+        <DiscrepanciesMini items={discrepancies} state={application.state} reviewer={reviewer} />
         <RevisionsMini
           number={number}
           shown={revision.letter}

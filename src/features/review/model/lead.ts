@@ -29,15 +29,20 @@ export function gradeLead(grades: Application['grades']): string {
   return `${capital(parts.join(', '))}.`;
 }
 
-/** What is to do with the discrepancies. */
-export function discrepancyLead(items: readonly Pick<Discrepancy, 'number' | 'state'>[]): string {
+/** What is to do with the discrepancies, and by whom: `reviewer` is the name, or "you". */
+export function discrepancyLead(
+  items: readonly Pick<Discrepancy, 'number' | 'state'>[],
+  reviewer = 'you',
+): string {
   const answered = items.filter((d) => d.state === 'answered').map((d) => `D-${d.number}`);
   const open = items.filter((d) => d.state === 'open').map((d) => `D-${d.number}`);
   const list = (names: string[]) =>
     names.length < 2 ? names.join('') : `${names.slice(0, -1).join(', ')} and ${names.at(-1) ?? ''}`;
   const is = (names: string[]) => (names.length === 1 ? 'is' : 'are');
   return [
-    answered.length > 0 ? `${list(answered)} ${is(answered)} answered: your turn.` : '',
+    answered.length > 0
+      ? `${list(answered)} ${is(answered)} answered: ${reviewer === 'you' ? 'your turn' : `${reviewer} settles or asks again`}.`
+      : '',
     open.length > 0 ? `${list(open)} ${is(open)} open and would go with the letter.` : '',
   ]
     .filter(Boolean)
@@ -48,6 +53,7 @@ export function discrepancyLead(items: readonly Pick<Discrepancy, 'number' | 'st
 export function reviewLead(
   application: Pick<Application, 'state' | 'grades' | 'check' | 'revision' | 'reviewer'>,
   discrepancies: readonly Pick<Discrepancy, 'number' | 'state'>[],
+  who = 'you',
 ): string {
   const { state, grades, check, revision, reviewer } = application;
   if (check && check.state !== 'done') {
@@ -59,7 +65,7 @@ export function reviewLead(
     case 'filed':
       return `${gradeLead(grades)} Nobody has taken the case yet.`.trim();
     case 'in-review':
-      return [gradeLead(grades), discrepancyLead(discrepancies)].filter(Boolean).join(' ');
+      return [gradeLead(grades), discrepancyLead(discrepancies, who)].filter(Boolean).join(' ');
     case 'returned':
       return 'The applicant has the letter; the case comes back once revised and filed again.';
     case 'accepted':

@@ -22,6 +22,9 @@ describe('what the heading says', () => {
         { number: 4, state: 'open' },
       ]),
     ).toBe('D-2 is answered: your turn. D-3 and D-4 are open and would go with the letter.');
+    expect(discrepancyLead([{ number: 2, state: 'answered' }], 'M. Thornholt')).toBe(
+      'D-2 is answered: M. Thornholt settles or asks again.',
+    );
     expect(discrepancyLead([])).toBe('');
   });
 

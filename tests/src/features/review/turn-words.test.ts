@@ -7,9 +7,12 @@ const discrepancy = (state: Discrepancy['state'], entries: Partial<Discrepancy['
 
 describe('whose turn a discrepancy is', () => {
   it('follows the case', () => {
-    expect(turnWords(discrepancy('open'), 'in-review')).toBe('goes with the letter');
-    expect(turnWords(discrepancy('open'), 'returned')).toBe('with the applicant');
-    expect(turnWords(discrepancy('answered'), 'in-review')).toBe('answered, your turn');
+    expect(turnWords(discrepancy('open'), 'in-review', 'you')).toBe('goes with the letter');
+    expect(turnWords(discrepancy('open'), 'returned', 'you')).toBe('with the applicant');
+    expect(turnWords(discrepancy('answered'), 'in-review', 'you')).toBe('answered, your turn');
+    expect(turnWords(discrepancy('answered'), 'in-review', 'M. Thornholt')).toBe(
+      'answered, with M. Thornholt',
+    );
   });
 
   it('names the revision that closed it last', () => {
@@ -18,6 +21,6 @@ describe('whose turn a discrepancy is', () => {
       { kind: 'reopened', revision: 'B' },
       { kind: 'settled', revision: 'C' },
     ] as const;
-    expect(turnWords(discrepancy('settled', [...entries]), 'in-review')).toBe('settled on revision C');
+    expect(turnWords(discrepancy('settled', [...entries]), 'in-review', 'you')).toBe('settled on revision C');
   });
 });
