@@ -82,6 +82,14 @@ function range(ends: readonly [number, number] | null, scale: number): WrittenRa
   return { low: { value: low, text: lowText }, high: { value: high, text: highText } };
 }
 
+/** What a difference in per cent with one decimal shows as 0.0. */
+const SHOWN_AS_ZERO = 0.0005;
+
+function gradeOf({ deviation, follows, grade }: WeighedValue): BalanceEntry['grade'] {
+  if (follows) return 'in-balance';
+  return grade ?? (deviation === null ? null : 'in-balance');
+}
+
 /** One row of the balance for a weighed value. */
 export function balanceEntry(row: BalanceRow, weighed: WeighedValue): BalanceEntry {
   const { name, unit, scale } = WORDS[row];
@@ -91,7 +99,10 @@ export function balanceEntry(row: BalanceRow, weighed: WeighedValue): BalanceEnt
   const decimals = decimalsFor([declared, recomputed]);
   const written = (v: number | null): Written | null =>
     v === null ? null : { value: v, text: fixed(v, decimals) };
-  const { deviation, follows } = weighed;
+  const { deviation, tolerance } = weighed;
+  // A derived value follows its parent in what is wrong with it; where it is level there is nothing to follow.
+  const level = deviation !== null && Math.abs(deviation) <= Math.max(tolerance ?? 0, SHOWN_AS_ZERO);
+  const follows = level ? null : weighed.follows;
   return {
     key: row,
     name,
@@ -102,8 +113,8 @@ export function balanceEntry(row: BalanceRow, weighed: WeighedValue): BalanceEnt
     typical: range(weighed.typical, scale),
     outer: range(weighed.outer, scale),
     difference: deviation === null ? null : { value: deviation, text: signedPercent(deviation) },
-    tolerance: weighed.tolerance,
-    grade: follows ? null : (weighed.grade ?? (deviation === null ? null : 'in-balance')),
+    tolerance,
+    grade: follows ? null : gradeOf(weighed),
     remark: follows ? `follows ${parameterName(follows)}` : undefined,
   };
 }
