@@ -15,6 +15,7 @@ import { Cell, HeadCell, Row, RowHead, Table, TableBody, TableHead } from '../..
 import { useListView, type ListControls } from '../../../hooks/use-list-view';
 import { isFiltered } from '../../../lib/list-view';
 import { useActors } from '../api/list-actors';
+import { actWords } from '../model/act-words';
 import { AUDIT_LIST, useAuditEvents, type AuditFilter } from '../api/list-audit-events';
 
 /** The audit trail of the whole house, newest first. Nothing in it can be changed. */
@@ -96,7 +97,10 @@ function AuditTable({ items }: { items: readonly AuditEvent[] }) {
               {event.seq}
             </Cell>
             <Cell oneLine>{formatInstant(event.at)}</Cell>
-            <RowHead fold="row">{event.act}</RowHead>
+            <RowHead fold="row">
+              {actWords(event.act)}
+              <code className="block text-axis font-normal text-ink-soft">{event.act}</code>
+            </RowHead>
             <Cell fold="row">
               {event.actor} <span className="text-ink-soft">{event.actorRole}</span>
             </Cell>
