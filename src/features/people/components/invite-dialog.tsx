@@ -32,7 +32,7 @@ export function InviteDialog({ onClose }: { onClose: () => void }) {
       open
       onOpenChange={(open) => !open && onClose()}
       title="Invite somebody"
-      description="They get a mail with a link that is good for a few days."
+      description="They get a mail with a link that is good for 30 minutes."
     >
       <form onSubmit={submit} className="grid gap-4" noValidate>
         <Field label="Name" error={tried ? nameFault : null}>

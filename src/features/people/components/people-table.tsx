@@ -14,6 +14,8 @@ type Acting = { person: PeopleEntry; how: 'status' | 'roles' };
 /** Everybody with an account: roles, last sign-in, whether a second factor is in place. */
 export function PeopleTable({ people }: { people: readonly PeopleEntry[] }) {
   const session = useSession();
+  // The demo lets everybody in by the password alone.
+  const asksForSecond = session?.demo !== true;
   const [acting, setActing] = useState<Acting | null>(null);
   // The roles dialog shows the person as read last, not as read when it was opened.
   const current = people.find((person) => person.id === acting?.person.id);
@@ -46,7 +48,9 @@ export function PeopleTable({ people }: { people: readonly PeopleEntry[] }) {
                   </span>
                 ))}
               </Cell>
-              <Cell foldLabel="Second factor">{person.hasSecondFactor ? 'in place' : 'not yet'}</Cell>
+              <Cell foldLabel="Second factor">
+                {person.hasSecondFactor ? 'in place' : asksForSecond ? 'not yet' : 'not asked for'}
+              </Cell>
               <Cell foldLabel="Last sign-in">
                 {person.lastSignInAt ? formatInstant(person.lastSignInAt) : 'never'}
               </Cell>

@@ -1,6 +1,6 @@
 import { useState } from 'react';
 import type { Invitation } from '#shared/contracts/api.generated';
-import { formatDate } from '#shared/format/dates';
+import { formatDate, formatInstant } from '#shared/format/dates';
 import { ProblemNotice } from '../../../components/feedback/problem-notice';
 import { WordsDialog } from '../../../components/feedback/words-dialog';
 import { Button } from '../../../components/ui/button';
@@ -57,7 +57,7 @@ export function RequestsSheet() {
             </div>
             <span className="text-table text-ink-soft">
               {`invited as ${ROLE_WORDS[item.role].toLowerCase()}${item.organisation ? ` of ${item.organisation.name}` : ''}`}
-              {item.expiresAt && `, until ${formatDate(item.expiresAt)}`}
+              {item.expiresAt && `, until ${formatInstant(item.expiresAt)}`}
             </span>
           </li>
         ))}
