@@ -34,9 +34,9 @@ export function ImportResult({ number, read, rereading, onReread, onDone }: Impo
       <p className="text-h3 font-strong">{readWords(read)}</p>
       {dialect && <DialectForm key={id} dialect={dialect} busy={rereading} onReread={onReread} />}
       {lines.length > 0 && <ReadLines lines={lines} />}
-      {aboutPlaces.map((notice, i) => (
-        <p key={i} className="text-ink-soft">
-          {notice.message}
+      {[...new Set(aboutPlaces.map((notice) => notice.message))].map((message) => (
+        <p key={message} className="text-ink-soft">
+          {message}
         </p>
       ))}
       {faults.length > 0 && (
