@@ -9,6 +9,22 @@ import type { Matter } from '../model/matters';
 
 const unitOf = (parameter: string): string => (parameter.startsWith('b') ? 'µS/km' : 'Ω/km');
 
+/** Fields of the geometry as the button calls them, each with its unit; the cause line beside it names the place. */
+const ENTRIES: Readonly<Record<string, readonly [unit: string, field: string]>> = {
+  horizontalM: ['\u2009m', 'offset'],
+  attachmentHeightM: ['\u2009m', 'height'],
+  sagM: ['\u2009m', 'sag'],
+  bundleCount: ['', 'number of subconductors'],
+  bundleSpacingM: ['\u2009m', 'bundle spacing'],
+  diameterMm: ['\u2009mm', 'diameter'],
+  gmrMm: ['\u2009mm', 'GMR'],
+};
+
+function entryWords(name: string, value: number): string {
+  const [unit, field] = ENTRIES[name] ?? ['', 'geometry'];
+  return `Put ${name === 'bundleCount' ? value : figure(value, 4)}${unit} into the ${field}`;
+}
+
 /** What the button says: the value and its field where there is one, else how many. */
 function putWords({ in: place, corrected = {} }: Cause): string {
   const entries = Object.entries(corrected);
@@ -16,7 +32,7 @@ function putWords({ in: place, corrected = {} }: Cause): string {
   if (!first) return '';
   if (entries.length > 1) return `Put these ${entries.length} values in`;
   const [name, value] = first;
-  if (place === 'geometry') return `Put ${figure(value, 4)} in`;
+  if (place === 'geometry') return entryWords(name, value);
   return `Put ${figure(value, 4)}\u2009${unitOf(name)} into ${parameterName(name)}`;
 }
 

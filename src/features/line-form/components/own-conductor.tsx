@@ -18,17 +18,17 @@ function AluminiumArea({ path }: { path: FormPath }) {
   const { form, set } = useLineFormView();
   const proposed = proposedResistance(getAt(form, path) as ConductorForm);
   return (
-    <div className="grid content-start justify-items-start gap-2 [&>:first-child]:justify-self-stretch">
+    <div className="grid min-w-0 grid-cols-[minmax(0,1fr)] content-start gap-2 [&>button]:justify-self-start">
       <TypedField
         path={[...path, 'aluminiumArea']}
         label="Nominal aluminium area"
         units={AREA_UNITS}
         optional
-        hint="not filed: it only proposes the d.c. resistance, by the resistivity of IEC 60889 without the lay of the strands"
+        hint="not filed; it proposes the d.c. resistance at 20 °C by the resistivity of IEC 60889, without the lay of the strands"
       />
       {proposed && (
         <Button small onClick={() => set([...path, 'dcResistance20OhmPerKm'], proposed)}>
-          {`Put ${proposed.text}\u2009Ω/km into the d.c. resistance`}
+          {`Put in ${proposed.text}\u2009Ω/km`}
         </Button>
       )}
     </div>

@@ -56,9 +56,7 @@ describe('an area in the form', () => {
     const before = readForm(form);
     expect(JSON.stringify(before.line)).not.toContain('402.8');
     expect(before.asTyped['/sections/0/conductors/phase/aluminiumArea']).toMatchObject({ text: '402.8' });
-    await userEvent.click(
-      screen.getByRole('button', { name: /^Put 0\.07017\sΩ\/km into the d\.c\. resistance/ }),
-    );
+    await userEvent.click(screen.getByRole('button', { name: /^Put in 0\.07017\sΩ\/km$/ }));
     expect(readForm(form).line).toMatchObject({
       sections: [{ conductors: { phase: { dcResistance20OhmPerKm: 0.07017 } } }],
     });
