@@ -130,6 +130,8 @@ export function useSwitchOrganisation() {
         ),
       ),
     onSuccess: (session) => {
+      // Set before as well: what is on the page listens to the entry that is about to be forgotten.
+      client.setQueryData(sessionQuery().queryKey, session);
       client.clear();
       client.setQueryData(sessionQuery().queryKey, session);
     },
