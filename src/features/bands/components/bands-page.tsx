@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import type { Band, BandDraft, RuleSetSummary, Rules } from '#shared/contracts/api.generated';
 import { formatDate } from '#shared/format/dates';
@@ -39,13 +40,17 @@ export function BandsPage() {
     <>
       <PageHead
         title={part === 'bands' && shown ? `Typical bands, ${shown.classKv}${THIN_SPACE}kV` : TITLES[part]}
-        lead={
-          <>
-            Outside its typical band a value is graded <strong>Explain</strong>, outside the outer limits{' '}
-            <strong>Must answer</strong>.
-          </>
+        lead={LEADS[part]}
+        block={
+          part === 'calendar' ? undefined : (
+            <DraftBlock
+              draft={draft}
+              sets={sets}
+              about={part === 'bands' && shown ? shown : null}
+              changed={part === 'bands' ? changed.length : otherChanges.length}
+            />
+          )
         }
-        block={<DraftBlock draft={draft} sets={sets} shown={shown} changed={changed.length} />}
       />
       <div className="mb-4 flex flex-wrap items-end gap-4">
         <SegmentChoice
@@ -77,7 +82,10 @@ export function BandsPage() {
           {part === 'calendar' && <CalendarSheet />}
         </div>
         <div>
-          <DraftSheet draft={draft} edits={edits} changed={changed} changedSettings={otherChanges} />
+          {/* The calendar holds from the moment that it is saved: it is no part of the draft. */}
+          {part !== 'calendar' && (
+            <DraftSheet draft={draft} edits={edits} changed={changed} changedSettings={otherChanges} />
+          )}
           <HistorySheet sets={sets} />
         </div>
       </div>
@@ -92,6 +100,17 @@ const TITLES = {
 } as const;
 
 type Part = keyof typeof TITLES;
+
+const LEADS: Readonly<Record<Part, ReactNode>> = {
+  bands: (
+    <>
+      Outside its typical band a value is graded <strong>Explain</strong>, outside the outer limits{' '}
+      <strong>Must answer</strong>.
+    </>
+  ),
+  settings: 'How far a declared value may lie from what the geometry gives, and how long each step may take.',
+  calendar: 'The days on which windows run: the weekend and the holidays are left out.',
+};
 
 /** Which part of the rules is shown stands in the address too. */
 function usePart(): [Part, (part: Part) => void] {
@@ -135,11 +154,12 @@ function useShownClass(classes: readonly ShownClass[]): [ShownClass | null, (sho
 interface DraftBlockProps {
   draft: BandDraft;
   sets: readonly RuleSetSummary[];
-  shown: ShownClass | null;
+  /** The class shown; without one the figures beside the bands. */
+  about: ShownClass | null;
   changed: number;
 }
 
-function DraftBlock({ draft, sets, shown, changed }: DraftBlockProps) {
+function DraftBlock({ draft, sets, about, changed }: DraftBlockProps) {
   const inForce = sets.find((set) => set.inForce);
   const begun = draft.version > 0;
   return (
@@ -147,9 +167,9 @@ function DraftBlock({ draft, sets, shown, changed }: DraftBlockProps) {
       label="Title block of the rules"
       cells={[
         {
-          label: 'Voltage class',
-          value: shown ? `${shown.classKv}${THIN_SPACE}kV` : 'none',
-          aside: shown ? `${shown.frequencyHz}${THIN_SPACE}Hz, overhead` : undefined,
+          label: about ? 'Voltage class' : 'Part of the rules',
+          value: about ? `${about.classKv}${THIN_SPACE}kV` : TITLES.settings,
+          aside: about ? `${about.frequencyHz}${THIN_SPACE}Hz, overhead` : undefined,
           span: 6,
           lead: true,
           fold: 'name',
@@ -168,7 +188,7 @@ function DraftBlock({ draft, sets, shown, changed }: DraftBlockProps) {
           span: 6,
         },
         {
-          label: 'Bands changed',
+          label: about ? 'Bands changed' : 'Figures changed',
           value: changed === 0 ? 'none' : changed,
           span: 6,
           fold: 'due',

@@ -36,7 +36,7 @@ export function CalendarSheet() {
         <WeekendDays days={form.weekendDays} fault={faultOf('weekendDays')} onChange={change} />
         <Field
           label="Holidays"
-          hint="One a line: the day as YYYY-MM-DD, then its name."
+          hint="One a line: the day as YYYY-MM-DD, then its name, such as 2027-01-01 New Year."
           error={faultOf('holidays')}
         >
           {(ties) => (

@@ -92,7 +92,7 @@ export function settingGroups(draft: BandDraft): SettingGroup[] {
         {
           place: 'windows/take-up',
           label: 'To take a case up',
-          unit: 'days',
+          unit: 'working days',
           scale: 1,
           value: windows['take-up'],
           whole: true,
@@ -100,7 +100,7 @@ export function settingGroups(draft: BandDraft): SettingGroup[] {
         {
           place: 'windows/review',
           label: 'To review',
-          unit: 'days',
+          unit: 'working days',
           scale: 1,
           value: windows.review,
           whole: true,
@@ -108,7 +108,7 @@ export function settingGroups(draft: BandDraft): SettingGroup[] {
         {
           place: 'windows/cure',
           label: 'To answer a letter',
-          unit: 'days',
+          unit: 'working days',
           scale: 1,
           value: windows.cure,
           whole: true,
