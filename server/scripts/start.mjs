@@ -75,6 +75,9 @@ function greet({ setUpToken, accounts = [] }) {
     }
     console.log('');
   }
+  if (process.env.DEMO === 'off' && !process.env.SMTP_URL) {
+    console.log('SMTP_URL is not set: mails, invitations among them, are kept here and reach nobody.\n');
+  }
   console.log('Ctrl-C stops it.');
 }
 
