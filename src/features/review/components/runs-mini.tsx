@@ -39,7 +39,12 @@ export function RunsMini({ number, letter, mayRun }: RunsMiniProps) {
       </ul>
       {mayRun && (
         <div className="grid gap-2 px-4 pb-4 pt-2">
-          <Button small busy={again.isPending} onClick={() => again.mutate({ params: { letter }, body: {} })}>
+          <Button
+            small
+            className="whitespace-normal"
+            busy={again.isPending}
+            onClick={() => again.mutate({ params: { letter }, body: {} })}
+          >
             Check again under the rules in force
           </Button>
           <ProblemNotice error={again.error} />
