@@ -1,22 +1,11 @@
-import { createHash } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { Problem } from '#shared/contracts/errors';
 import type * as Api from '#shared/contracts/api.generated';
-import {
-  aCaseInReview,
-  aDraft,
-  aLine,
-  expecting,
-  PER_MILE,
-  runChecks,
-  saveLine,
-  step,
-} from '../../support/case';
+import { aDraft, aLine, expecting, runChecks, saveLine, step } from '../../support/case';
 import { makeTestApp, type Client, type TestApp } from '../../support/test-app';
 
 let app: TestApp;
 let applicant: Client;
-let rival: Client;
 let reviewer: Client;
 let number: string;
 const at = (path = '') => `/api/applications/${number}${path}`;
@@ -24,111 +13,9 @@ const at = (path = '') => `/api/applications/${number}${path}`;
 beforeAll(async () => {
   app = await makeTestApp();
   applicant = await app.signInAs('applicant');
-  rival = await app.signInAs('applicant');
   reviewer = await app.signInAs('reviewer');
 });
 afterAll(() => app.close());
-
-const PDF = Buffer.from('%PDF-1.7\n% a sheet of the tower\n');
-const PNG = Buffer.from([0x89, 0x50, 0x4e, 0x47, 0x0d, 0x0a, 0x1a, 0x0a, 1, 2, 3]);
-const JPEG = Buffer.from([0xff, 0xd8, 0xff, 0xe0, 1, 2, 3]);
-
-function attach(
-  client: Client,
-  bytes: Buffer,
-  filename: string,
-  contentType: string,
-  fields: Record<string, string> = {},
-) {
-  const request = client.agent.post(at('/attachments')).set('X-CSRF-Token', client.csrfToken);
-  for (const [name, value] of Object.entries(fields)) void request.field(name, value);
-  return request.attach('file', bytes, { filename, contentType });
-}
-
-describe('attachments', () => {
-  beforeAll(async () => {
-    number = await aCaseInReview(app, applicant, reviewer, [aLine('Sarn tie', { x1Factor: PER_MILE })]);
-  });
-
-  it('are kept with their hash and come back byte for byte, as a file and not as a page', async () => {
-    const kept = await expecting<Api.Attachment>(
-      201,
-      attach(applicant, PDF, 'tower sheet.pdf', 'application/pdf'),
-    );
-    expect(kept).toMatchObject({
-      fileName: 'tower sheet.pdf',
-      mediaType: 'application/pdf',
-      byteLength: PDF.length,
-      sha256: createHash('sha256').update(PDF).digest('hex'),
-      subject: { kind: 'application' },
-    });
-    const answer = await reviewer.get(kept.href).buffer(true);
-    expect(answer.body as Buffer).toEqual(PDF);
-    expect(answer.headers['content-disposition']).toMatch(/^attachment; filename="tower sheet\.pdf"/);
-    expect(answer.headers['x-content-type-options']).toBe('nosniff');
-    expect(answer.headers['content-security-policy']).toContain('sandbox');
-    expect((await rival.get(kept.href)).status).toBe(404);
-  });
-
-  it('hang on a line or a discrepancy, and on nothing else', async () => {
-    const onLine = await expecting<Api.Attachment>(
-      201,
-      attach(reviewer, PNG, 'a.png', 'image/png', { subject: 'line', ref: 'L1' }),
-    );
-    expect(onLine.subject).toEqual({ kind: 'line', lineKey: 'L1', discrepancy: null });
-    const raise = { revision: 'A', title: 'X1', question: 'Why?' };
-    await expecting(201, reviewer.post(at('/discrepancies'), raise));
-    const subject = { subject: 'discrepancy', ref: '1' };
-    const onD = await expecting<Api.Attachment>(201, attach(reviewer, JPEG, 'b.JPG', 'image/jpeg', subject));
-    expect(onD.subject).toEqual({ kind: 'discrepancy', lineKey: null, discrepancy: 1 });
-    // the applicant knows of D-1 only once it is sent
-    expect((await applicant.get(onD.href)).status).toBe(404);
-    await expecting<Problem>(422, attach(applicant, JPEG, 'b.jpg', 'image/jpeg', subject));
-    await step(reviewer, number, 'return', { revision: 'A' });
-    expect((await applicant.get(onD.href)).status).toBe(200);
-    const { items } = await expecting<Api.DiscrepancyList>(200, applicant.get(at('/discrepancies')));
-    expect(items[0]?.attachments.map((a) => a.fileName)).toEqual(['b.JPG']);
-    for (const fields of [
-      { subject: 'line', ref: 'L9' },
-      { subject: 'discrepancy', ref: '7' },
-      { subject: 'user' },
-    ]) {
-      expect(
-        (await attach(applicant, PNG, 'a.png', 'image/png', fields as Record<string, string>)).status,
-      ).toBe(422);
-    }
-  });
-
-  it.each([
-    ['a page under another name', Buffer.from('<html><script>1</script>'), 'a.pdf', 'application/pdf', 415],
-    ['a picture declared as PDF', PNG, 'a.pdf', 'application/pdf', 415],
-    ['a PDF with the ending of a picture', PDF, 'a.png', 'application/pdf', 415],
-    ['a page', Buffer.from('<html>'), 'a.html', 'text/html', 415],
-    ['a drawing', Buffer.from('<svg xmlns="http://www.w3.org/2000/svg"/>'), 'a.svg', 'image/svg+xml', 415],
-    ['nothing', Buffer.alloc(0), 'a.pdf', 'application/pdf', 422],
-    [
-      'what the scan refuses',
-      Buffer.concat([
-        PDF,
-        Buffer.from('X5O!P%@AP[4\\PZX54(P^)7CC)7}$EICAR-STANDARD-ANTIVIRUS-TEST-FILE!$H+H*'),
-      ]),
-      'a.pdf',
-      'application/pdf',
-      422,
-    ],
-    ['more than 20 MB', Buffer.concat([PDF, Buffer.alloc(20_000_000)]), 'a.pdf', 'application/pdf', 413],
-  ])('refuse %s', async (_, bytes, name, type, status) => {
-    expect((await attach(applicant, bytes, name, type)).status).toBe(status);
-  });
-
-  it('take their own name and nothing of a path', async () => {
-    const kept = await expecting<Api.Attachment>(
-      201,
-      attach(applicant, PDF, '../../etc/\u202Efdp.pdf', 'application/pdf'),
-    );
-    expect(kept.fileName).toBe('fdp.pdf');
-  });
-});
 
 function send(bytes: Buffer, filename: string, fields: Record<string, string> = {}) {
   return applicant.agent
@@ -353,107 +240,5 @@ describe('drafts', () => {
     const draft = await expecting<Api.Draft>(200, applicant.delete(at('/draft/lines/L2?version=1')));
     expect(draft.lines.map((line) => line.lineKey)).toEqual(['L1']);
     expect(draft.nextLineKey).toBe('L3');
-  });
-});
-
-describe('lists', () => {
-  it('filter, sort, search and go on from page to page', async () => {
-    const all = await expecting<Api.ApplicationList>(
-      200,
-      applicant.get('/api/applications?sort=number&limit=200'),
-    );
-    expect(all.total).toBeGreaterThan(4);
-    const numbers: string[] = [];
-    let cursor: string | null = null;
-    do {
-      const next: string = cursor === null ? '' : `&cursor=${encodeURIComponent(cursor)}`;
-      const path = `/api/applications?sort=number&limit=2${next}`;
-      const page: Api.ApplicationList = await expecting(200, applicant.get(path));
-      expect(page.items.length).toBeLessThanOrEqual(2);
-      numbers.push(...page.items.map((item) => item.number));
-      cursor = page.nextCursor;
-    } while (cursor !== null);
-    expect(numbers).toEqual(all.items.map((item) => item.number));
-    expect(numbers).toEqual([...numbers].sort());
-    const drafts = await expecting<Api.ApplicationList>(
-      200,
-      applicant.get('/api/applications?filter[state]=draft'),
-    );
-    expect(new Set(drafts.items.map((item) => item.state))).toEqual(new Set(['draft']));
-    expect(drafts.total).toBeLessThan(all.total);
-    const one = await expecting<Api.ApplicationList>(
-      200,
-      applicant.get(`/api/applications?filter[search]=${number}`),
-    );
-    expect(one.items.map((item) => item.number)).toEqual([number]);
-    const none = await expecting<Api.ApplicationList>(
-      200,
-      applicant.get('/api/applications?filter[search]=%25'),
-    );
-    expect(none.total).toBe(0);
-  });
-
-  it.each(['applicant', 'state', 'voltage', 'lines', 'grade', 'due', 'age', 'reviewer', 'number'])(
-    'the queue sorts by %s, both ways, over pages',
-    async (sort) => {
-      for (const order of [sort, `-${sort}`]) {
-        const all = await expecting<Api.Queue>(200, reviewer.get(`/api/queue?sort=${order}`));
-        const first = await expecting<Api.Queue>(200, reviewer.get(`/api/queue?sort=${order}&limit=1`));
-        const rest = await expecting<Api.Queue>(
-          200,
-          reviewer.get(`/api/queue?sort=${order}&cursor=${encodeURIComponent(first.nextCursor ?? '')}`),
-        );
-        expect([...first.items, ...rest.items].map((i) => i.number)).toEqual(all.items.map((i) => i.number));
-      }
-    },
-  );
-
-  it('the queue filters by who has it, by grade and by voltage', async () => {
-    const get = (query: string) => expecting<Api.Queue>(200, reviewer.get(`/api/queue?${query}`));
-    const mine = await get('filter[reviewer]=me');
-    expect(new Set(mine.items.map((item) => item.reviewer?.id))).toEqual(new Set([reviewer.actor.userId]));
-    expect(mine.total).toBe(mine.counts.mine);
-    const nobody = await get('filter[reviewer]=nobody');
-    expect(nobody.total).toBe(nobody.counts.nobody);
-    const grave = await get('filter[grade]=must-answer');
-    expect(new Set(grave.items.map((item) => item.worstGrade))).toEqual(new Set(['must-answer']));
-    expect((await get('filter[voltage]=345')).total).toBe((await get('')).total);
-    expect((await get('filter[voltage]=115')).total).toBe(0);
-    const [first] = mine.items;
-    const byNumber = await get(`filter[number]=${first?.number ?? ''}`);
-    expect(byNumber.items.map((item) => item.number)).toEqual([first?.number]);
-    expect((await get('filter[state]=accepted')).total).toBe(0);
-  });
-
-  it('lines and letters of all cases', async () => {
-    const lines = await expecting<Api.LineList>(
-      200,
-      reviewer.get('/api/lines?filter[search]=sarn&sort=-length'),
-    );
-    expect(lines.total).toBeGreaterThan(2);
-    expect(lines.items[0]).toMatchObject({
-      conductors: '2 × Drake',
-      circuitCount: 1,
-      sectionCount: 1,
-      nominalVoltageKv: 345,
-    });
-    const letters = await expecting<Api.LetterList>(
-      200,
-      reviewer.get('/api/letters?filter[kind]=return&limit=1'),
-    );
-    expect(letters.items).toHaveLength(1);
-    expect(letters.total).toBeGreaterThan(1);
-  });
-
-  it('rules and conductors go to whoever is signed in', async () => {
-    const rules = await expecting<Api.Rules>(200, applicant.get('/api/rules'));
-    expect(rules.bands.length).toBeGreaterThan(100);
-    expect(rules.owner).toEqual({ baseMva: 100, earthResistivityOhmM: 100 });
-    expect(rules.tolerances).toHaveProperty('x1');
-    const conductors = await expecting<Api.ConductorList>(200, applicant.get('/api/conductors'));
-    expect(conductors.items.find((item) => item.name === 'Drake')).toMatchObject({
-      choosable: true,
-      retired: false,
-    });
   });
 });
